@@ -1,0 +1,154 @@
+/**
+ * What an analysis answers, `groundward.analysis/1`: one tidy demand table, the diagrams behind it, the path graph,
+ * findings and the certificate. The JSON Schema of the analysis is generated from this definition.
+ */
+import { z } from 'zod';
+import { Point, Units } from '../building/definition.js';
+
+export const DemandKind = z.enum(['level', 'diaphragm-span', 'opening', 'collector', 'wall-line', 'pier', 'support']);
+
+export const Quantity = z.enum([
+  'force',
+  'diaphragm-force',
+  'storey-shear',
+  'overturning-moment',
+  'drift',
+  'centre-of-mass-x',
+  'centre-of-mass-y',
+  'centre-of-rigidity-x',
+  'centre-of-rigidity-y',
+  'torsion',
+  'torsional-ratio',
+  'torsional-amplification',
+  'shear',
+  'unit-shear',
+  'moment',
+  'chord-force',
+  'secondary-moment',
+  'corner-force',
+  'axial-tension',
+  'axial-compression',
+  'reaction',
+  'end-tension',
+  'end-compression',
+  'deflection',
+  'ratio',
+  'uplift',
+  'bearing',
+]);
+
+export const Sense = z.union([z.literal(1), z.literal(-1)]);
+
+export const Demand = z.strictObject({
+  member: z.string().describe('Key of the member, such as `1/L2/1a`'),
+  kind: DemandKind,
+  quantity: Quantity,
+  case: z
+    .string()
+    .describe('Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components'),
+  sense: Sense.describe('1 along the case’s direction, -1 against it'),
+  combination: z.string().optional().describe('Absent for the unfactored component'),
+  value: z.number(),
+  unit: z.string(),
+  at: Point.optional().describe('Place on plan where the value occurs [length]'),
+});
+
+export const SpanPiece = z.strictObject({
+  from: z.number().describe('s at the start of the piece [length]'),
+  to: z.number().describe('s at its end [length]'),
+  load: z.array(z.number()).describe('w [force/length]; coefficients of (s − from)⁰, (s − from)¹ …, as in all below'),
+  shear: z.array(z.number()).describe('V [force]'),
+  moment: z.array(z.number()).describe('M [force·length]'),
+  depth: z.array(z.number()).describe('Net depth d [length]'),
+  chordDepth: z.array(z.number()).describe('Chord depth D [length]'),
+});
+
+export const DiaphragmDiagram = z.strictObject({
+  kind: z.literal('diaphragm'),
+  member: z.string().describe('`level/diaphragm`'),
+  level: z.string(),
+  case: z.string(),
+  along: Point.describe('Unit vector t along the load'),
+  across: Point.describe('Unit vector s across the load'),
+  lines: z.array(
+    z.strictObject({
+      line: z.string(),
+      s: z.number(),
+      reaction: z.number().describe('Into the wall line, along t [force]'),
+    }),
+  ),
+  spans: z.array(z.strictObject({ member: z.string(), from: z.number(), to: z.number() })),
+  pieces: z.array(SpanPiece),
+});
+
+export const CollectorDiagram = z.strictObject({
+  kind: z.literal('collector'),
+  member: z.string().describe('`level/line`'),
+  level: z.string(),
+  line: z.string(),
+  case: z.string(),
+  points: z
+    .array(z.strictObject({ at: z.number(), axial: z.number() }))
+    .describe('Axial force, tension positive, linear between points; `at` is the distance along the line’s axis'),
+});
+
+export const Diagram = z.discriminatedUnion('kind', [DiaphragmDiagram, CollectorDiagram]);
+
+export const PathNode = z.strictObject({
+  id: z.string(),
+  kind: z.enum(['mass', 'diaphragm-span', 'collector', 'wall-line', 'pier', 'end-post', 'support']),
+  member: z.string(),
+  level: z.string().describe('The level, or the level above the storey, where the member stands'),
+});
+
+export const PathEdge = z.strictObject({
+  from: z.string(),
+  to: z.string(),
+  case: z.string(),
+  force: z.number().describe('For sense 1 [force]; horizontal along the receiving line’s axis, vertical downwards'),
+  acts: z.enum(['horizontal', 'vertical']),
+});
+
+export const Finding = z.strictObject({
+  code: z.string(),
+  severity: z.enum(['note', 'warning', 'open-end']),
+  member: z.string(),
+  sentence: z.string(),
+  case: z.string().optional(),
+  numbers: z.record(z.string(), z.number()).optional().describe('The numbers that decided it'),
+});
+
+export const Residual = z.strictObject({ what: z.string(), residual: z.number() });
+
+export const Certificate = z.strictObject({
+  worstResidual: z.number().describe('Largest equilibrium residual relative to the forces involved'),
+  bound: z.number(),
+  worst: z.string().describe('Where it occurs'),
+  checks: z.array(Residual).describe('The largest residual of each kind of check'),
+});
+
+export const Analysis = z
+  .strictObject({
+    schema: z.literal('groundward.analysis/1'),
+    units: Units,
+    demands: z.array(Demand),
+    diagrams: z.array(Diagram),
+    path: z.strictObject({ nodes: z.array(PathNode), edges: z.array(PathEdge) }),
+    findings: z.array(Finding),
+    certificate: Certificate,
+  })
+  .meta({ id: 'groundward.analysis/1', title: 'Groundward analysis' });
+
+export type DemandKind = z.infer<typeof DemandKind>;
+export type Quantity = z.infer<typeof Quantity>;
+export type Sense = z.infer<typeof Sense>;
+export type Demand = z.infer<typeof Demand>;
+export type SpanPiece = z.infer<typeof SpanPiece>;
+export type DiaphragmDiagram = z.infer<typeof DiaphragmDiagram>;
+export type CollectorDiagram = z.infer<typeof CollectorDiagram>;
+export type Diagram = z.infer<typeof Diagram>;
+export type PathNode = z.infer<typeof PathNode>;
+export type PathEdge = z.infer<typeof PathEdge>;
+export type Finding = z.infer<typeof Finding>;
+export type Certificate = z.infer<typeof Certificate>;
+export type Analysis = z.infer<typeof Analysis>;
