@@ -88,23 +88,15 @@ export function beamAlong(
     for (let jump = jumps[next]; jump !== undefined && jump.s <= s + tolerance; jump = jumps[++next])
       shear += jump.force;
   };
-  let first = 0;
   for (let i = 0; i + 1 < ends.length; i++) {
     const from = ends[i] as number;
     const to = ends[i + 1] as number;
     jumpUpTo(from);
     const middle = (from + to) / 2;
-    while (
-      first < load.pieces.length &&
-      (load.pieces[first]?.to ?? 0) <= from + tolerance / 2 &&
-      sortedByStart(load, first)
-    )
-      first += 1;
     let w: number[] = [0];
     let couple: number[] | undefined;
-    for (let k = first; k < load.pieces.length; k++) {
-      const piece = load.pieces[k];
-      if (piece === undefined || piece.from > middle || piece.to < middle) continue;
+    for (const piece of load.pieces) {
+      if (piece.from > middle || piece.to < middle) continue;
       w = sum(w, shifted(piece.w, from - piece.from));
       if (piece.couple !== undefined) couple = sum(couple ?? [0], shifted(piece.couple, from - piece.from));
     }
@@ -119,12 +111,6 @@ export function beamAlong(
   }
   jumpUpTo(Infinity);
   return { pieces, closingShear: shear, closingMoment: moment };
-}
-
-/** Pieces before `index` can be left behind only where no later piece starts earlier. */
-function sortedByStart(load: SpanLoad, index: number): boolean {
-  const next = load.pieces[index + 1];
-  return next === undefined || next.from >= (load.pieces[index]?.from ?? 0);
 }
 
 function shifted(c: Polynomial, by: number): number[] {
