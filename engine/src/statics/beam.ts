@@ -2,25 +2,34 @@
 import { integral, sum, valueAt, type Polynomial } from './polynomial.js';
 import { resultantWithin, type SpanLoad } from './span-load.js';
 
+export type SpanStatics = {
+  /** One for each pair of neighbouring supports: the load on the span and what its ends hand over [force] */
+  readonly spans: readonly { force: number; near: number; far: number }[];
+  /** What goes straight into each support [force] */
+  readonly direct: readonly number[];
+};
+
 /**
- * Reactions of simple spans between adjacent supports; a part beyond the outermost support is an overhang of the end span.
+ * Simple spans between adjacent supports; a part beyond the outermost support is an overhang of the end span.
  * A point load at a support goes straight into it.
  *
  * @param load     load along `s` [force/length], [force]
  * @param supports positions, ascending, two or more [length]
  * @param tolerance positions closer than this are one [length]
- * @returns one reaction a support [force]
  * Source: statics of a simply supported beam with overhangs.
  */
-export function simpleSpanReactions(load: SpanLoad, supports: readonly number[], tolerance: number): Float64Array {
-  const reactions = new Float64Array(supports.length);
-  const last = supports.length - 2;
+export function simpleSpans(load: SpanLoad, supports: readonly number[], tolerance: number): SpanStatics {
+  const spans = supports.slice(1).map(() => ({ force: 0, near: 0, far: 0 }));
+  const direct = supports.map(() => 0);
+  const last = spans.length - 1;
   const add = (span: number, force: number, moment: number): void => {
     const a = supports[span] as number;
     const b = supports[span + 1] as number;
     const far = (moment - force * a) / (b - a);
-    reactions[span] = (reactions[span] as number) + force - far;
-    reactions[span + 1] = (reactions[span + 1] as number) + far;
+    const into = spans[span] as { force: number; near: number; far: number };
+    into.force += force;
+    into.near += force - far;
+    into.far += far;
   };
   for (const piece of load.pieces) {
     for (let span = 0; span <= last; span++) {
@@ -34,14 +43,19 @@ export function simpleSpanReactions(load: SpanLoad, supports: readonly number[],
   for (const point of load.points) {
     const at = supports.findIndex((s) => Math.abs(s - point.s) <= tolerance);
     if (at >= 0) {
-      reactions[at] = (reactions[at] as number) + point.force;
+      direct[at] = (direct[at] as number) + point.force;
       continue;
     }
     let span = 0;
     while (span < last && (supports[span + 1] as number) < point.s) span += 1;
     add(span, point.force, point.force * point.s);
   }
-  return reactions;
+  return { spans, direct };
+}
+
+/** One reaction a support [force] */
+export function reactionsOf({ spans, direct }: SpanStatics): number[] {
+  return direct.map((force, i) => force + (spans[i - 1]?.far ?? 0) + (spans[i]?.near ?? 0));
 }
 
 export type BeamPiece = {
