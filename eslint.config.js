@@ -53,6 +53,7 @@ export default tseslint.config(
     files: ['**/*.{js,mjs}'],
     languageOptions: {
       globals: {
+        AbortController: 'readonly',
         Buffer: 'readonly',
         URL: 'readonly',
         clearInterval: 'readonly',

@@ -6,14 +6,13 @@
 import { readFile } from 'node:fs/promises';
 import { resolve } from 'node:path';
 import { pathToFileURL } from 'node:url';
+import { calledFrom } from './build/called-from.mjs';
 import { root } from './build/root.mjs';
+import { sentenceOf } from './fault.mjs';
 import { nodeVersionFault } from './start/node-version.mjs';
 
 /** The commands' own exit codes are 0 to 3; this one says that none of them ran. */
 const COULD_NOT_RUN = 70;
-
-/** `npm run` changes into the checkout; paths are meant from where the person stands. */
-const calledFrom = process.env['npm_lifecycle_event'] === undefined ? process.cwd() : (process.env['INIT_CWD'] ?? '');
 
 /**
  * Writes a text and waits until the stream has taken it, so that a long table on a pipe arrives whole.
@@ -65,6 +64,6 @@ try {
   // The exit code alone is set: the process ends by itself once all output has been taken.
   process.exitCode = await run();
 } catch (error) {
-  err(`${error instanceof Error ? error.message : String(error)}\n`);
+  err(`${sentenceOf(error)}\n`);
   process.exitCode = COULD_NOT_RUN;
 }

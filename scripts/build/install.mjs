@@ -7,7 +7,7 @@ import { runQuietly, step } from './step.mjs';
  * Installs the packages that `package-lock.json` names, unless they are there already.
  *
  * @param {{ progress: import('./step.mjs').Progress }} options
- * @throws Error with npm's own words when the installation fails
+ * @throws Fault with npm's own words when the installation fails
  */
 export async function ensureInstalled({ progress }) {
   if (await isInstalled(root)) return;

@@ -1,4 +1,5 @@
 import { spawn } from 'node:child_process';
+import { Fault } from '../fault.mjs';
 
 /**
  * Takes the lines that tell a waiting person what is being done.
@@ -40,20 +41,33 @@ export async function step(title, progress, work) {
  * @param {readonly string[]} args
  * @param {{ cwd: string, env?: Record<string, string> }} options `env` is added to the present environment
  * @returns {Promise<string>} what it printed
- * @throws Error with the whole output when the program ends with anything but 0
+ * @throws Fault with the whole output when the program ends with anything but 0
  */
 export function runQuietly(program, args, { cwd, env }) {
   return new Promise((resolve, reject) => {
     const child = spawn(program, args, { cwd, env: { ...process.env, ...env }, stdio: ['ignore', 'pipe', 'pipe'] });
+    running.add(child);
     /** @type {Buffer[]} */
     const chunks = [];
     child.stdout.on('data', (chunk) => chunks.push(chunk));
     child.stderr.on('data', (chunk) => chunks.push(chunk));
-    child.on('error', reject);
+    child.on('error', (error) => {
+      running.delete(child);
+      reject(error);
+    });
     child.on('close', (code, signal) => {
+      running.delete(child);
       const output = Buffer.concat(chunks).toString('utf8').trim();
       if (code === 0) resolve(output);
-      else reject(new Error(`${[program, ...args].join(' ')} ended with ${code ?? signal}:\n${output}`));
+      else reject(new Fault(`${[program, ...args].join(' ')} ended with ${code ?? signal}:\n${output}`));
     });
   });
+}
+
+/** @type {Set<import('node:child_process').ChildProcess>} */
+const running = new Set();
+
+/** Ends all programs that {@link runQuietly} runs at the moment; each then fails. */
+export function endRunning() {
+  for (const child of running) child.kill('SIGTERM');
 }

@@ -52,7 +52,7 @@ export const everything = /** @type {BuildName[]} */ (Object.keys(steps));
  *
  * @param {readonly BuildName[]} names
  * @param {{ progress: import('./step.mjs').Progress }} options
- * @throws Error with the compiler's output when a part doesn't build
+ * @throws Fault with the compiler's output when a part doesn't build
  */
 export async function ensureBuilt(names, { progress }) {
   if (!(await anyStale(names))) return;

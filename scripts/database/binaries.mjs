@@ -3,7 +3,7 @@ import { chmod, cp, mkdir, readdir, readFile, rename, rm, stat, symlink } from '
 import { basename, dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { isAlive } from '../build/lock.mjs';
-import { DatabaseFault, hasCode } from './fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 
 /**
  * Puts the server's programs into the database's own folder, where the user who runs them can read them whatever
@@ -11,7 +11,7 @@ import { DatabaseFault, hasCode } from './fault.mjs';
  *
  * @param {import('./home.mjs').Home} home
  * @returns {Promise<string>} the folder with `bin`, `lib` and `share`
- * @throws DatabaseFault when no package carries binaries for this machine
+ * @throws Fault when no package carries binaries for this machine
  */
 export async function placeBinaries({ folder }) {
   const { native, version } = await installedBinaries();
@@ -30,7 +30,7 @@ async function installedBinaries() {
     return { native: join(root, 'native'), version: String(version) };
   } catch (error) {
     if (!hasCode(error, 'ERR_MODULE_NOT_FOUND', 'ENOENT')) throw error;
-    throw new DatabaseFault(
+    throw new Fault(
       `There are no PostgreSQL binaries for ${platform} in the installed packages: name a PostgreSQL of your own in DATABASE_URL.`,
     );
   }

@@ -3,7 +3,7 @@ import { randomBytes } from 'node:crypto';
 import { chown, link, mkdir, readdir, readFile, rename, rm, stat, writeFile } from 'node:fs/promises';
 import { basename, join } from 'node:path';
 import { isAlive } from '../build/lock.mjs';
-import { DatabaseFault, hasCode } from './fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 
 /**
  * An initialised data folder and the superuser's password.
@@ -15,7 +15,7 @@ import { DatabaseFault, hasCode } from './fault.mjs';
  *
  * @param {{ home: import('./home.mjs').Home, binaries: string, ephemeral: boolean }} options
  * @returns {Promise<Cluster>}
- * @throws DatabaseFault when the folder holds something else, or another version, or cannot be initialised
+ * @throws Fault when the folder holds something else, or another version, or cannot be initialised
  */
 export async function ensureCluster({ home, binaries, ephemeral }) {
   const folder = join(home.folder, 'cluster');
@@ -40,9 +40,8 @@ async function versionOf(folder) {
   try {
     return (await readFile(join(folder, 'PG_VERSION'), 'utf8')).trim();
   } catch (error) {
-    if (hasCode(error, 'ENOENT'))
-      throw new DatabaseFault(`The folder ${folder} holds no database (no PG_VERSION in it).`);
-    if (hasCode(error, 'EACCES')) throw new DatabaseFault(await foreign(folder));
+    if (hasCode(error, 'ENOENT')) throw new Fault(`The folder ${folder} holds no database (no PG_VERSION in it).`);
+    if (hasCode(error, 'EACCES')) throw new Fault(await foreign(folder));
     throw error;
   }
 }
@@ -55,16 +54,14 @@ async function versionOf(folder) {
 async function checkVersion(folder, version, binaries) {
   const ours = /^postgres-(\d+)/.exec(basename(binaries))?.[1];
   if (version !== ours) {
-    throw new DatabaseFault(
-      `The database in ${folder} was made by PostgreSQL ${version}; these packages carry ${ours}.`,
-    );
+    throw new Fault(`The database in ${folder} was made by PostgreSQL ${version}; these packages carry ${ours}.`);
   }
 }
 
 /** @param {string} folder */
 async function checkOwner(folder) {
   const uid = process.getuid?.() ?? 0;
-  if (uid !== 0 && (await stat(folder)).uid !== uid) throw new DatabaseFault(await foreign(folder));
+  if (uid !== 0 && (await stat(folder)).uid !== uid) throw new Fault(await foreign(folder));
 }
 
 /** @param {string} folder */
@@ -94,9 +91,8 @@ async function passwordOf(home, expected) {
   try {
     return (await readFile(file, 'utf8')).trim();
   } catch (error) {
-    if (hasCode(error, 'ENOENT')) throw new DatabaseFault(`The database's password is missing: ${file} is not there.`);
-    if (hasCode(error, 'EACCES'))
-      throw new DatabaseFault(`The database's password in ${file} is not readable for you.`);
+    if (hasCode(error, 'ENOENT')) throw new Fault(`The database's password is missing: ${file} is not there.`);
+    if (hasCode(error, 'EACCES')) throw new Fault(`The database's password in ${file} is not readable for you.`);
     throw error;
   }
 }
@@ -151,10 +147,10 @@ function initdb({ home, binaries, ephemeral, folder, passwordFile }) {
     });
     let said = '';
     child.stderr.on('data', (chunk) => (said += chunk));
-    child.on('error', (error) => reject(new DatabaseFault(`The database cannot be made: ${error.message}.`)));
+    child.on('error', (error) => reject(new Fault(`The database cannot be made: ${error.message}.`)));
     child.on('close', (code) => {
       if (code === 0) resolve();
-      else reject(new DatabaseFault(`The database in ${home.folder} cannot be made: ${firstFault(said)}.`));
+      else reject(new Fault(`The database in ${home.folder} cannot be made: ${firstFault(said)}.`));
     });
   });
 }

@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { chmod, mkdir, mkdtemp, readFile, realpath, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
-import { DatabaseFault, hasCode } from './fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 import { canReach, serverUser } from './user.mjs';
 
 /**
@@ -20,7 +20,7 @@ const ELSEWHERE = '/var/lib/groundward';
  * @param {string} dataDir
  * @param {(line: string) => void} progress
  * @returns {Promise<Home>}
- * @throws DatabaseFault when there is no such folder
+ * @throws Fault when there is no such folder
  */
 export async function findHome(dataDir, progress) {
   const wanted = await makeFolder(resolve(dataDir));
@@ -37,7 +37,7 @@ export async function findHome(dataDir, progress) {
   await makeFolder(ELSEWHERE);
   await makeFolder(other);
   if (!canReach(user, other)) {
-    throw new DatabaseFault(
+    throw new Fault(
       `The user ${user?.name}, who runs the database because PostgreSQL refuses root, can reach neither ${folder} nor ` +
         `${other}: name a folder within its reach in GROUNDWARD_DATA.`,
     );
@@ -60,7 +60,7 @@ export async function ephemeralHome() {
     if (user !== null) await chmod(folder, 0o711);
     return { folder, user };
   }
-  throw new DatabaseFault(`The user ${user?.name}, who runs the database, cannot reach the folder ${tmpdir()}.`);
+  throw new Fault(`The user ${user?.name}, who runs the database, cannot reach the folder ${tmpdir()}.`);
 }
 
 /** @param {Home} home */
@@ -79,7 +79,7 @@ async function makeFolder(path) {
     if (made !== undefined) await chmod(path, process.getuid?.() === 0 ? 0o711 : 0o700);
     return await realpath(path);
   } catch (error) {
-    throw new DatabaseFault(
+    throw new Fault(
       `The folder ${path} for the database cannot be made: ${error instanceof Error ? error.message : error}.`,
     );
   }

@@ -1,7 +1,7 @@
 import { setTimeout as pause } from 'node:timers/promises';
 import { isAlive } from '../build/lock.mjs';
 import { connect } from './client.mjs';
-import { DatabaseFault, hasCode } from './fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 
 /**
  * A process owns a server as long as one session of its holds this advisory lock. The session ends with the process,
@@ -26,7 +26,7 @@ const PATIENCE = 60_000;
  * @param {import('./postmaster.mjs').Server} server
  * @param {string} password
  * @returns {Promise<Ownership | null>} null when the server ended before it could be owned
- * @throws DatabaseFault when another living process owns it, or when it doesn't know the password
+ * @throws Fault when another living process owns it, or when it doesn't know the password
  */
 export async function claim(server, password) {
   const client = await connectWhenReady(server, password);
@@ -45,7 +45,7 @@ export async function claim(server, password) {
   }
   const owner = await ownerOf(client);
   await release();
-  throw new DatabaseFault(`Another Groundward${owner} is already using the database in this folder.`);
+  throw new Fault(`Another Groundward${owner} is already using the database in this folder.`);
 }
 
 /**
@@ -60,7 +60,7 @@ async function connectWhenReady(server, password) {
     } catch (error) {
       if (!isAlive(server.pid)) return null;
       if (hasCode(error, '28P01', '28000')) {
-        throw new DatabaseFault('The database does not accept the password that is kept beside it.');
+        throw new Fault('The database does not accept the password that is kept beside it.');
       }
       // 57P03: it starts, recovers or stops; 57P01: it stopped while answering.
       if (!hasCode(error, 'ECONNREFUSED', 'ECONNRESET', '57P03', '57P01') || Date.now() > deadline) throw error;

@@ -2,7 +2,7 @@ import { setTimeout as pause } from 'node:timers/promises';
 import { placeBinaries } from './binaries.mjs';
 import { ensureCluster } from './cluster.mjs';
 import { ensureDatabase } from './client.mjs';
-import { DatabaseFault } from './fault.mjs';
+import { Fault } from '../fault.mjs';
 import { ephemeralHome, findHome } from './home.mjs';
 import { freePort } from './port.mjs';
 import { postmasterOf } from './postmaster.mjs';
@@ -33,7 +33,7 @@ const PATIENCE = 120_000;
  * @param {{ dataDir?: string, ephemeral?: boolean, progress?: (line: string) => void }} options `dataDir`: the folder
  *   that keeps the database; an ephemeral database has a folder of its own that ends with it, and is not synced to disk
  * @returns {Promise<Postgres>}
- * @throws DatabaseFault with one sentence
+ * @throws Fault with one sentence
  */
 export async function startPostgres({ dataDir, ephemeral = false, progress = () => undefined }) {
   if (!ephemeral && dataDir === undefined) throw new TypeError('A database that is kept needs a dataDir.');
@@ -104,7 +104,7 @@ async function startOwned({ home, binaries, cluster, ephemeral }) {
       }
     }
     if (Date.now() > deadline) {
-      throw new DatabaseFault(`The database in ${cluster.folder} did not start: ${reason}.`);
+      throw new Fault(`The database in ${cluster.folder} did not start: ${reason}.`);
     }
     await pause(100);
   }

@@ -3,7 +3,7 @@ import { readFileSync } from 'node:fs';
 import { readFile, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
 import { isAlive } from '../build/lock.mjs';
-import { hasCode } from './fault.mjs';
+import { hasCode } from '../fault.mjs';
 
 /**
  * A server that runs on a data folder.

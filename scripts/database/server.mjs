@@ -4,7 +4,7 @@ import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
 import { isAlive } from '../build/lock.mjs';
 import { serverEnvironment } from './cluster.mjs';
-import { DatabaseFault, hasCode } from './fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 import { postmasterOf } from './postmaster.mjs';
 
 /** A log longer than this is begun anew at a start [bytes]. */
@@ -20,7 +20,7 @@ const PASSING = /lock file "postmaster\.pid"|pre-existing shared memory|could no
  *   ephemeral: boolean, port: number }} options
  * @returns {Promise<{ server: import('./postmaster.mjs').Server | null, reason: string }>} no server, and the reason,
  *   when it is worth trying again
- * @throws DatabaseFault when it isn't
+ * @throws Fault when it isn't
  */
 export async function launch({ home, binaries, cluster, ephemeral, port }) {
   const log = await openLog(home);
@@ -52,14 +52,14 @@ export async function launch({ home, binaries, cluster, ephemeral, port }) {
   }
   const reason = lastFault((await readFile(log.path)).subarray(begin).toString('utf8')) ?? end;
   if (PASSING.test(reason)) return { server: null, reason };
-  throw new DatabaseFault(`The database in ${cluster.folder} did not start: ${reason} (its log: ${log.path}).`);
+  throw new Fault(`The database in ${cluster.folder} did not start: ${reason} (its log: ${log.path}).`);
 }
 
 /**
  * Ends a server: it rolls back what is under way, writes all that is committed and stops.
  *
  * @param {number} pid
- * @throws DatabaseFault when it doesn't end
+ * @throws Fault when it doesn't end
  */
 export async function stopServer(pid) {
   for (const [signal, patience] of /** @type {const} */ ([
@@ -78,7 +78,7 @@ export async function stopServer(pid) {
       await pause(20);
     }
   }
-  throw new DatabaseFault(`The database server (process ${pid}) does not stop.`);
+  throw new Fault(`The database server (process ${pid}) does not stop.`);
 }
 
 /**

@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { readdir, readFile } from 'node:fs/promises';
 import { join } from 'node:path';
-import { DatabaseFault } from '../database/fault.mjs';
+import { Fault } from '../fault.mjs';
 
 /**
  * One migration's file. `checksum`: SHA-256 of its bytes, hexadecimal, as Prisma records it.
@@ -14,7 +14,7 @@ const TRANSACTION = /^\s*(?:begin|start\s+transaction|commit|rollback)\s*;/im;
 /**
  * @param {string} folder
  * @returns {Promise<Migration[]>} in the order of their names
- * @throws DatabaseFault when a file begins or ends transactions itself
+ * @throws Fault when a file begins or ends transactions itself
  */
 export async function readMigrations(folder) {
   const entries = await readdir(folder, { withFileTypes: true });
@@ -31,9 +31,7 @@ async function readMigration(folder, name) {
   const sql = content.toString('utf8');
   const found = TRANSACTION.exec(sql)?.[0].trim();
   if (found !== undefined) {
-    throw new DatabaseFault(
-      `The migration ${name} says "${found}": each file already runs in a transaction of its own.`,
-    );
+    throw new Fault(`The migration ${name} says "${found}": each file already runs in a transaction of its own.`);
   }
   return { name, sql, checksum: createHash('sha256').update(content).digest('hex') };
 }

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import pg from 'pg';
-import { DatabaseFault, hasCode } from '../database/fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 import { reachFault } from '../database/reach.mjs';
 import { checkHistory } from './history.mjs';
 import { readMigrations } from './files.mjs';
@@ -15,7 +15,7 @@ const LOCK = 72707369;
  * @param {string} databaseUrl
  * @param {{ folder: string }} options `folder` holds one folder a migration, with a `migration.sql` in it
  * @returns {Promise<{ applied: string[] }>} the names of those applied now
- * @throws DatabaseFault when the database cannot be reached, its history doesn't fit the files, or a file fails
+ * @throws Fault when the database cannot be reached, its history doesn't fit the files, or a file fails
  */
 export async function migrate(databaseUrl, { folder }) {
   const migrations = await readMigrations(folder);
@@ -44,7 +44,7 @@ async function connect(databaseUrl) {
     await client.connect();
     return client;
   } catch (error) {
-    throw new DatabaseFault(reachFault(databaseUrl, error));
+    throw new Fault(reachFault(databaseUrl, error));
   }
 }
 
@@ -55,7 +55,7 @@ async function lock(client) {
     await client.query('select pg_advisory_lock($1)', [LOCK]);
   } catch (error) {
     if (!hasCode(error, '55P03')) throw error;
-    throw new DatabaseFault('Another process has been migrating the database for more than a minute.');
+    throw new Fault('Another process has been migrating the database for more than a minute.');
   }
 }
 
@@ -79,7 +79,7 @@ async function apply(client, { name, sql, checksum }) {
   } catch (error) {
     await client.query('rollback').catch(() => undefined);
     const message = error instanceof Error ? error.message : String(error);
-    throw new DatabaseFault(`The migration ${name} failed and was taken back: ${message}.`);
+    throw new Fault(`The migration ${name} failed and was taken back: ${message}.`);
   }
 }
 
