@@ -38,7 +38,7 @@ export type Landing = {
   /** Level at which it lands. */
   readonly level: number;
   /** The pier on which it lands. */
-  readonly pier?: PierModel;
+  readonly foot?: PierFeet;
 };
 
 export type PostDescent = {
@@ -61,6 +61,7 @@ export function descendPosts(
 ): PostDescent {
   const feet: PierFeet[][] = model.levels.map(() => []);
   const landings: Landing[] = [];
+  const carriedOnce = new Set<string>();
   let columns: Column[] = [];
   for (let level = model.levels.length - 1; level > 0; level--) {
     const storeyFeet = feet[level] as PierFeet[];
@@ -72,8 +73,13 @@ export function descendPosts(
     const onward: Column[] = [];
     for (const column of columns) {
       const landing = land(model, column, storeyFeet, level);
-      if (landing.on === 'nothing') onward.push(column);
-      if (landing.on !== 'nothing' || isFirst(landings, column)) landings.push(landing);
+      if (landing.on !== 'nothing') landings.push(landing);
+      else {
+        onward.push(column);
+        // Reported where it first finds nothing, not again in every storey below.
+        if (!carriedOnce.has(column.key)) landings.push(landing);
+        carriedOnce.add(column.key);
+      }
     }
     for (const foot of storeyFeet) {
       const { line, pier } = foot;
@@ -86,10 +92,6 @@ export function descendPosts(
   }
   const lowest = new Set((feet[1] ?? []).flatMap((foot) => [`${foot.pier.key}/from`, `${foot.pier.key}/to`]));
   return { feet, landings, carried: columns.filter((column) => !lowest.has(column.key)) };
-}
-
-function isFirst(landings: readonly Landing[], column: Column): boolean {
-  return !landings.some((landing) => landing.column.key === column.key);
 }
 
 /** The pier's own storey: couple of its shear, gravity on its top shared by statics. */
@@ -129,12 +131,12 @@ function land(model: Model, column: Column, feet: readonly PierFeet[], level: nu
   const own = stands ?? within;
   if (own !== undefined) {
     share(own, at, column.force);
-    return { on: stands === undefined ? 'within' : 'stands', column, level, pier: own.pier };
+    return { on: stands === undefined ? 'within' : 'stands', column, level, foot: own };
   }
   const other = crossing(feet, column, 1e-9 * model.extent);
   if (other !== undefined) {
     share(other.foot, other.distance, column.force);
-    return { on: 'another-line', column, level, pier: other.foot.pier };
+    return { on: 'another-line', column, level, foot: other.foot };
   }
   return { on: 'nothing', column, level };
 }
