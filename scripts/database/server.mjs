@@ -107,10 +107,22 @@ async function openLog({ folder, user }) {
   return { path, handle };
 }
 
-/** @param {string} text */
+/**
+ * @param {string} text what the server wrote to its log
+ * @returns {string | null} why it ended: its last fatal line, or what it said before it had a log
+ */
 function lastFault(text) {
-  const lines = [...text.matchAll(/(?:FATAL|PANIC|could not bind[^:]*|error while loading[^:]*):\s*(.+)/g)];
-  return lines.at(-1)?.[1] ?? null;
+  const fatal = [...text.matchAll(/(?:FATAL|PANIC|error while loading[^:]*):\s*(.+)/g)].at(-1)?.[1];
+  const plain = text.split('\n').filter((line) => line !== '' && !/^\d{4}-\d\d-\d\d /.test(line));
+  return (
+    fatal ??
+    (plain.length === 0
+      ? null
+      : plain
+          .slice(0, 3)
+          .join(' ')
+          .replace(/^postgres: /, ''))
+  );
 }
 
 /** @param {string} code */
