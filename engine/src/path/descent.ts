@@ -78,6 +78,7 @@ function sharedLine(line: LineModel, first: DiaphragmModel, second: DiaphragmMod
  *
  * @param push     the inertia of a level, one entry for each of its diaphragms
  * @param channels number of sources carried side by side
+ * @param start    a level to start at, with what arrives there; the top without anything where it is left out
  * @returns outcomes by level index; the base has none
  * @throws Refusal where a force finds no way on
  */
@@ -86,10 +87,11 @@ export function descend(
   bodies: RigidBodies,
   push: (level: LevelModel) => readonly Pushed[],
   channels: number,
+  start?: { readonly level: number; readonly above: readonly Channels[] },
 ): (LevelOutcome | undefined)[] {
   const outcomes: (LevelOutcome | undefined)[] = model.levels.map(() => undefined);
-  let above: readonly Channels[] = model.lines.map(() => new Float64Array(channels));
-  for (let i = model.levels.length - 1; i > 0; i--) {
+  let above: readonly Channels[] = start?.above ?? model.lines.map(() => new Float64Array(channels));
+  for (let i = start?.level ?? model.levels.length - 1; i > 0; i--) {
     const level = model.levels[i] as LevelModel;
     const outcome = throughLevel(model, bodies, level, above, push(level), channels);
     outcomes[i] = outcome;

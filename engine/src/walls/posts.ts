@@ -52,12 +52,15 @@ export type PostDescent = {
 /**
  * @param shear     shear of a line in a storey by component [force]; gravity components are zero
  * @param size      number of components
+ * @param push      puts a further force on a pier's end posts before anything else lands there
  * Source: statics of a cantilever wall; M = V·h + moment from above, end posts at the arm of the pier.
  */
 export function descendPosts(
   model: Model,
   shear: (line: LineModel, level: number) => Components,
   size: number,
+  gravity: 'with-gravity' | 'without-gravity' = 'with-gravity',
+  push?: (foot: PierFeet) => void,
 ): PostDescent {
   const feet: PierFeet[][] = model.levels.map(() => []);
   const landings: Landing[] = [];
@@ -68,7 +71,11 @@ export function descendPosts(
     for (const line of model.lines) {
       const storey = line.storeys[level];
       if (storey === undefined) continue;
-      for (const pier of storey.piers) storeyFeet.push(footOf(line, storey, pier, shear(line, level), size));
+      for (const pier of storey.piers) {
+        const foot = footOf(line, storey, pier, shear(line, level), size, gravity === 'with-gravity');
+        push?.(foot);
+        storeyFeet.push(foot);
+      }
     }
     const onward: Column[] = [];
     for (const column of columns) {
@@ -95,16 +102,23 @@ export function descendPosts(
 }
 
 /** The pier's own storey: couple of its shear, gravity on its top shared by statics. */
-function footOf(line: LineModel, storey: StoreyModel, pier: PierModel, shear: Components, size: number): PierFeet {
+function footOf(
+  line: LineModel,
+  storey: StoreyModel,
+  pier: PierModel,
+  shear: Components,
+  size: number,
+  weighed: boolean,
+): PierFeet {
   const near = new Float64Array(size);
   const far = new Float64Array(size);
-  for (let c = GRAVITY.length; c < size; c++) {
+  for (let c = weighed ? GRAVITY.length : 0; c < size; c++) {
     const couple = ((shear[c] as number) * pier.share * pier.height) / pier.arm;
     near[c] = -couple;
     far[c] = couple;
   }
   const middle = (pier.from + pier.to) / 2;
-  for (const load of pier.pier.gravity ?? []) {
+  for (const load of weighed ? (pier.pier.gravity ?? []) : []) {
     const c = GRAVITY.indexOf(load.case);
     const force = load.perLength * pier.length;
     const farPart = (middle - pier.posts[0]) / pier.arm;
