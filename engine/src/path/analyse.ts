@@ -17,6 +17,7 @@ import { planFindings, postFindings, torsionFinding } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
 import { edgeDrifts, levelDemands, torsionalAmplification } from './level-demands.js';
 import { buildModel, type LevelModel, type Model } from './model.js';
+import { openingDemands } from './opening-demands.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { diaphragmDiagram, spanDemands, spansOf, type SpanRange } from './span-demands.js';
 import { unitNames, type Table } from './table.js';
@@ -258,6 +259,7 @@ function diaphragmDemands(
       const supports = supportsOf(diaphragm, frame);
       const spans = spansOf(forces, supports);
       spanDemands(table, forces, spans, subCase.id, (span) => shearAtCollectors(forces, span, level.id));
+      openingDemands(table, forces, subCase.id);
       diagrams.push(
         diaphragmDiagram(
           forces,
