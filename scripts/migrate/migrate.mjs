@@ -64,19 +64,21 @@ async function lock(client) {
  * @param {import('./files.mjs').Migration} migration
  */
 async function apply(client, { name, sql, checksum }) {
+  const id = randomUUID();
   try {
     await client.query('begin');
     await client.query(
       'insert into _prisma_migrations (id, checksum, migration_name, started_at) values ($1, $2, $3, clock_timestamp())',
-      [randomUUID(), checksum, name],
+      [id, checksum, name],
     );
     await client.query(sql);
     await client.query(
-      'update _prisma_migrations set finished_at = clock_timestamp(), applied_steps_count = 1 where migration_name = $1 and finished_at is null',
-      [name],
+      'update _prisma_migrations set finished_at = clock_timestamp(), applied_steps_count = 1 where id = $1',
+      [id],
     );
     await client.query('commit');
   } catch (error) {
+    // Where the connection broke, the server has taken it back already.
     await client.query('rollback').catch(() => undefined);
     const message = error instanceof Error ? error.message : String(error);
     throw new Fault(`The migration ${name} failed and was taken back: ${message}.`);
