@@ -15,7 +15,7 @@ import { pointOn, type LineModel } from '../walls/wall-line.js';
 import type { LevelModel, Model } from './model.js';
 
 /** Force by channel [force]. */
-export type Channels = Float64Array<ArrayBufferLike>;
+export type Channels = Float64Array;
 
 /** The inertia of one diaphragm with its force by channel, along the frame's t. */
 export type Pushed = { readonly inertia: Inertia; readonly force: Channels };

@@ -10,7 +10,7 @@ import { pointOn, type LineModel, type PierModel, type StoreyModel } from './wal
 export const GRAVITY: readonly GravityCase[] = ['D', 'L', 'Lr', 'S'];
 
 /** Force by component, compression positive [force]. */
-export type Components = Float64Array<ArrayBufferLike>;
+export type Components = Float64Array;
 
 export type PierFeet = {
   readonly line: LineModel;

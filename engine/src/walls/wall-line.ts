@@ -114,7 +114,7 @@ function storeyModel(
   const stiffnesses = sorted.map((pier, i) => pierStiffness(building, pier, lengths[i] as number, height));
   const everyStated = sorted.every((pier) => pier.stiffness !== undefined);
   const absolute = stiffnesses.every((k) => k !== undefined);
-  const basis = line.line.shareBy === 'stiffness' && absolute ? (stiffnesses as number[]) : lengths;
+  const basis = line.line.shareBy === 'stiffness' && absolute ? stiffnesses : lengths;
   const total = basis.reduce((sum, value) => sum + value, 0);
   const pierLength = lengths.reduce((sum, value) => sum + value, 0);
   return {
@@ -134,7 +134,7 @@ function storeyModel(
         share: (basis[i] as number) / total,
       };
     }),
-    stiffness: absolute ? (stiffnesses as number[]).reduce((sum, k) => sum + k, 0) : pierLength,
+    stiffness: absolute ? stiffnesses.reduce((sum, k) => sum + k, 0) : pierLength,
     stated: absolute,
     pierLength,
     pierStiffness: everyStated ? sorted.reduce((sum, pier) => sum + (pier.stiffness ?? 0), 0) : undefined,
