@@ -2,24 +2,18 @@
 import type { Building } from '../building/definition.js';
 import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
-import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
-import { supportsOf } from '../diaphragms/flexible.js';
-import { shiftedBy, spreadOver, type Inertia } from '../diaphragms/inertia.js';
-import { innerForces, shearAt, type InnerForces } from '../diaphragms/inner-forces.js';
-import { totalLength, type Profile } from '../geometry/profile.js';
 import { combinationsOf } from '../loads/combinations.js';
-import { descendPosts, GRAVITY, type Components } from '../walls/posts.js';
-import { subCases, type SubCase } from './cases.js';
-import { BOUND, certificateOf, checkBase, checkLevels, checkPosts, enter, type Ledger } from './certificate.js';
-import { clip, collectorDemands, collectorsOf } from './collectors.js';
-import { descend, rigidBodies, throughLevel, type LevelOutcome, type Pushed, type RigidBodies } from './descent.js';
+import { GRAVITY } from '../walls/posts.js';
+import { subCases } from './cases.js';
+import { BOUND, certificateOf, checkBase, checkLevels, checkPosts, type Ledger } from './certificate.js';
+import { rigidBodies } from './descent.js';
+import { diaphragmDemands } from './diaphragm-demands.js';
 import { planFindings, postFindings, torsionFinding } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
-import { edgeDrifts, levelDemands, torsionalAmplification } from './level-demands.js';
-import { buildModel, type LevelModel, type Model } from './model.js';
-import { openingDemands } from './opening-demands.js';
+import { edgeDrifts, levelDemands } from './level-demands.js';
+import { buildModel } from './model.js';
 import type { Analysis, Diagram, Finding } from './result.js';
-import { diaphragmDiagram, spanDemands, spansOf, type SpanRange } from './span-demands.js';
+import { descendAll, runCase, type CaseRun } from './run.js';
 import { unitNames, type Table } from './table.js';
 import { lineDemands, pierEndDemands, supportDemands, type LateralComponent } from './wall-demands.js';
 
@@ -67,16 +61,7 @@ function analysisOf(building: Building): Analysis {
     addHorizontal(graph, model, run.outcomes, subCase.id);
   }
 
-  const size = GRAVITY.length + cases.length;
-  const descent = descendPosts(
-    model,
-    (line, level) => {
-      const shear: Components = new Float64Array(size);
-      runs.forEach((run, c) => (shear[GRAVITY.length + c] = run.outcomes[level]?.below[line.index]?.[0] ?? 0));
-      return shear;
-    },
-    size,
-  );
+  const descent = descendAll(model, runs);
   const combinations = combinationsOf(building);
   const lateral = cases.map(({ id, loadCase }, c): LateralComponent => ({
     id,
@@ -155,151 +140,4 @@ function refuseUnavailable(building: Building): void {
     ),
   ];
   if (faults.length > 0) throw new Refusal(faults);
-}
-
-/** One load sub-case carried down with the storey forces. */
-export type CaseRun = {
-  readonly subCase: SubCase;
-  readonly outcomes: readonly (LevelOutcome | undefined)[];
-  /** The level's inertia with its accidental eccentricity, for any set of forces. */
-  readonly inertias: (level: LevelModel) => readonly Inertia[];
-  /** Aₓ by level index. */
-  readonly amplification: (level: number) => number;
-};
-
-export function runCase(model: Model, bodies: RigidBodies, subCase: SubCase): CaseRun {
-  const once = (amplification: (level: number) => number): CaseRun => {
-    const made = new Map<LevelModel, Inertia[]>();
-    const inertias = (level: LevelModel): Inertia[] => {
-      let known = made.get(level);
-      if (known === undefined) {
-        known = spreadOver(level.diaphragms, subCase.frame, subCase.spread).map((inertia) =>
-          eccentric(inertia, subCase.eccentricity * amplification(level.index)),
-        );
-        made.set(level, known);
-      }
-      return known;
-    };
-    const push = (level: LevelModel): Pushed[] => pushedBy(inertias(level), subCase.storeyForce, level, subCase.sign);
-    return { subCase, outcomes: descend(model, bodies, push, 1), inertias, amplification };
-  };
-  const plain = once(() => 1);
-  if (!subCase.amplified) return plain;
-  const factors = plain.outcomes.map((outcome) =>
-    Math.max(
-      1,
-      ...(outcome?.diaphragms ?? []).map((diaphragm) => torsionalAmplification(edgeDrifts(diaphragm, subCase))),
-    ),
-  );
-  return once((level) => factors[level] ?? 1);
-}
-
-/** Accidental eccentricity is for diaphragms that can turn as one body. */
-function eccentric(inertia: Inertia, ratio: number): Inertia {
-  if (ratio === 0 || inertia.diaphragm.behaviour !== 'rigid') return inertia;
-  const profile = inertia.diaphragm.profiles[inertia.frame] as Profile;
-  return shiftedBy(inertia, ratio * (profile.to - profile.from));
-}
-
-export function pushedBy(
-  inertias: readonly Inertia[],
-  forces: readonly number[],
-  level: LevelModel,
-  sign: number,
-): Pushed[] {
-  const force = Float64Array.of((forces[level.index] as number) * sign);
-  return inertias.map((inertia) => ({ inertia, force }));
-}
-
-/** The diaphragm design set of a level: inner forces, chords and collectors. */
-function diaphragmDemands(
-  table: Table,
-  diagrams: Diagram[],
-  ledger: Ledger,
-  model: Model,
-  bodies: RigidBodies,
-  run: CaseRun,
-  storey: LevelOutcome,
-): void {
-  const { subCase } = run;
-  const { level } = storey;
-  const same = subCase.diaphragmForce[level.index] === subCase.storeyForce[level.index];
-  const outcome = same
-    ? storey
-    : throughLevel(
-        model,
-        bodies,
-        level,
-        storey.above,
-        pushedBy(run.inertias(level), subCase.diaphragmForce, level, subCase.sign),
-        1,
-      );
-  const inner = new Map<DiaphragmModel, Map<number, InnerForces>>();
-  for (const { diaphragm, pushed, given, taken, rigid } of outcome.diaphragms) {
-    const frames = new Set([subCase.frame]);
-    if (rigid === undefined) for (const [line, force] of taken) if (force[0] !== 0) frames.add(line.family);
-    const byFrame = new Map<number, InnerForces>();
-    inner.set(diaphragm, byFrame);
-    for (const frame of frames) {
-      const factor = frame === subCase.frame ? (pushed.force[0] as number) : 0;
-      const load = {
-        pieces: factor === 0 ? [] : pushed.inertia.load.pieces.map((p) => ({ ...p, w: p.w.map((w) => w * factor) })),
-        points: factor === 0 ? [] : pushed.inertia.load.points.map((p) => ({ s: p.s, force: p.force * factor })),
-      };
-      const lines = [...new Set([...given.keys(), ...taken.keys()])]
-        .filter((line) => rigid !== undefined || line.family === frame)
-        .map((line) => ({ line, given: given.get(line)?.[0] ?? 0, taken: taken.get(line)?.[0] ?? 0 }));
-      const forces = innerForces(diaphragm, frame, load, lines);
-      byFrame.set(frame, forces);
-      const scale = lines.reduce((sum, { given: g, taken: t }) => sum + Math.abs(g) + Math.abs(t), Math.abs(factor));
-      if (scale === 0) continue;
-      const where = `${diaphragm.key}, case ${subCase.id}`;
-      enter(ledger, 'diaphragm: shear closes', where, forces.closingShear, scale);
-      enter(ledger, 'diaphragm: moment closes', where, forces.closingMoment, scale * model.extent);
-      const supports = supportsOf(diaphragm, frame);
-      const spans = spansOf(forces, supports);
-      spanDemands(table, forces, spans, subCase.id, (span) => shearAtCollectors(forces, span, level.id));
-      openingDemands(table, forces, subCase.id);
-      diagrams.push(
-        diaphragmDiagram(
-          forces,
-          spans,
-          supports.flatMap((support) =>
-            support.lines.map(({ line }) => ({
-              line: line.line.id,
-              s: line.s,
-              reaction:
-                ((given.get(line)?.[0] ?? 0) - (rigid === undefined ? 0 : (taken.get(line)?.[0] ?? 0))) *
-                line.sign *
-                subCase.sign,
-            })),
-          ),
-          subCase.id,
-          level.id,
-          frame === subCase.frame ? subCase.sign : 1,
-        ),
-      );
-    }
-  }
-  for (const collector of collectorsOf(model, outcome, inner)) {
-    const where = `collector ${level.id}/${collector.lines.map((line) => line.line.id).join('+')}, case ${subCase.id}`;
-    enter(ledger, 'collector: closes', where, collector.axial.closing, collector.axial.scale);
-    diagrams.push(...collectorDemands(table, collector, level.id, subCase.id));
-  }
-}
-
-/** Unit shear along a stated collector that is shorter than the cut, at either end of a span. */
-function shearAtCollectors(inner: InnerForces, span: SpanRange, level: string): number {
-  let largest = 0;
-  for (const { line, cut } of inner.diaphragm.touches) {
-    if (line.family !== inner.frame || (line.line.collectors ?? []).every((collector) => collector.level !== level))
-      continue;
-    const { before, after } = shearAt(inner, line.s);
-    const tolerance = inner.profile.tolerance;
-    if (Math.abs(line.s - span.from) <= tolerance)
-      largest = Math.max(largest, Math.abs(after) / totalLength(clip(cut.right, [line], level)));
-    if (Math.abs(line.s - span.to) <= tolerance)
-      largest = Math.max(largest, Math.abs(before) / totalLength(clip(cut.left, [line], level)));
-  }
-  return largest;
 }

@@ -8,7 +8,7 @@ import { simpleSpans } from '../statics/beam.js';
 import type { SpanLoad } from '../statics/span-load.js';
 import { descendPosts, type PierFeet, type PostDescent } from '../walls/posts.js';
 import type { LineModel, PierModel } from '../walls/wall-line.js';
-import { runCase } from './analyse.js';
+import { runCase } from './run.js';
 import { subCases, type SubCase } from './cases.js';
 import { descend, rigidBodies, type Channels, type LevelOutcome, type Pushed, type RigidBodies } from './descent.js';
 import { buildModel, type LevelModel, type Model } from './model.js';

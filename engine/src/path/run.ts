@@ -1,0 +1,75 @@
+/** One load sub-case carried down the building with the storey forces. */
+import { shiftedBy, spreadOver, type Inertia } from '../diaphragms/inertia.js';
+import type { Profile } from '../geometry/profile.js';
+import { descendPosts, GRAVITY, type Components, type PostDescent } from '../walls/posts.js';
+import type { SubCase } from './cases.js';
+import { descend, type LevelOutcome, type Pushed, type RigidBodies } from './descent.js';
+import { edgeDrifts, torsionalAmplification } from './level-demands.js';
+import type { LevelModel, Model } from './model.js';
+
+export type CaseRun = {
+  readonly subCase: SubCase;
+  readonly outcomes: readonly (LevelOutcome | undefined)[];
+  /** The level's inertia with its accidental eccentricity, for any set of forces. */
+  readonly inertias: (level: LevelModel) => readonly Inertia[];
+  /** Aₓ by level index. */
+  readonly amplification: (level: number) => number;
+};
+
+export function runCase(model: Model, bodies: RigidBodies, subCase: SubCase): CaseRun {
+  const once = (amplification: (level: number) => number): CaseRun => {
+    const made = new Map<LevelModel, Inertia[]>();
+    const inertias = (level: LevelModel): Inertia[] => {
+      let known = made.get(level);
+      if (known === undefined) {
+        known = spreadOver(level.diaphragms, subCase.frame, subCase.spread).map((inertia) =>
+          eccentric(inertia, subCase.eccentricity * amplification(level.index)),
+        );
+        made.set(level, known);
+      }
+      return known;
+    };
+    const push = (level: LevelModel): Pushed[] => pushedBy(inertias(level), subCase.storeyForce, level, subCase.sign);
+    return { subCase, outcomes: descend(model, bodies, push, 1), inertias, amplification };
+  };
+  const plain = once(() => 1);
+  if (!subCase.amplified) return plain;
+  const factors = plain.outcomes.map((outcome) =>
+    Math.max(
+      1,
+      ...(outcome?.diaphragms ?? []).map((diaphragm) => torsionalAmplification(edgeDrifts(diaphragm, subCase))),
+    ),
+  );
+  return once((level) => factors[level] ?? 1);
+}
+
+/** Accidental eccentricity is for diaphragms that can turn as one body. */
+function eccentric(inertia: Inertia, ratio: number): Inertia {
+  if (ratio === 0 || inertia.diaphragm.behaviour !== 'rigid') return inertia;
+  const profile = inertia.diaphragm.profiles[inertia.frame] as Profile;
+  return shiftedBy(inertia, ratio * (profile.to - profile.from));
+}
+
+export function pushedBy(
+  inertias: readonly Inertia[],
+  forces: readonly number[],
+  level: LevelModel,
+  sign: number,
+): Pushed[] {
+  const force = Float64Array.of((forces[level.index] as number) * sign);
+  return inertias.map((inertia) => ({ inertia, force }));
+}
+
+/** The vertical way of all sub-cases at once: gravity first, then one component for each run. */
+export function descendAll(model: Model, runs: readonly CaseRun[]): PostDescent {
+  const size = GRAVITY.length + runs.length;
+  return descendPosts(
+    model,
+    (line, level) => {
+      const shear: Components = new Float64Array(size);
+      runs.forEach((run, c) => (shear[GRAVITY.length + c] = run.outcomes[level]?.below[line.index]?.[0] ?? 0));
+      return shear;
+    },
+    size,
+  );
+}
