@@ -15,7 +15,7 @@ export async function ensureInstalled({ progress }) {
   // Called through `npm start`, the same npm does the work, without a search along the PATH.
   const npm = process.env['npm_execpath'];
   await step('Installing packages (npm ci)', progress, () =>
-    npm?.endsWith('.js') === true
+    npm?.endsWith('npm-cli.js') === true
       ? runQuietly(process.execPath, [npm, ...args], { cwd: root })
       : runQuietly('npm', args, { cwd: root }),
   );

@@ -1,9 +1,12 @@
-import { constants } from 'node:fs';
-import { chmod, cp, mkdir, readdir, readFile, rename, rm, stat, symlink } from 'node:fs/promises';
+import { execFile } from 'node:child_process';
+import { mkdir, readdir, readFile, rename, rm, stat, symlink } from 'node:fs/promises';
 import { basename, dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
+import { promisify } from 'node:util';
 import { isAlive } from '../build/lock.mjs';
 import { Fault, hasCode } from '../fault.mjs';
+
+const run = promisify(execFile);
 
 /**
  * Puts the server's programs into the database's own folder, where the user who runs them can read them whatever
@@ -44,15 +47,9 @@ async function copyAside(native, target) {
   const aside = `${target}.new-${process.pid}`;
   await rm(aside, { recursive: true, force: true });
   await mkdir(aside);
-  for (const part of ['bin', 'lib', 'share']) {
-    await cp(join(native, part), join(aside, part), {
-      recursive: true,
-      mode: constants.COPYFILE_FICLONE,
-      verbatimSymlinks: true,
-      filter: (path) => !path.endsWith('.a'),
-    });
-  }
-  await makeReadable(aside);
+  await run('cp', ['-R', ...['bin', 'lib', 'share'].map((part) => join(native, part)), aside]);
+  // Everyone may read, whatever umask the packages were installed under.
+  await run('chmod', ['-R', 'u=rwX,go=rX', aside]);
   await makeLinks(native, aside);
   try {
     await rename(aside, target);
@@ -60,20 +57,6 @@ async function copyAside(native, target) {
     await rm(aside, { recursive: true, force: true });
     // Another process was quicker, with the same content.
     if (!hasCode(error, 'ENOTEMPTY', 'EEXIST')) throw error;
-  }
-}
-
-/**
- * Gives everyone the right to read, whatever umask the packages were installed and copied under.
- *
- * @param {string} folder
- */
-async function makeReadable(folder) {
-  await chmod(folder, 0o755);
-  for (const entry of await readdir(folder, { withFileTypes: true })) {
-    const path = join(folder, entry.name);
-    if (entry.isDirectory()) await makeReadable(path);
-    else if (entry.isFile()) await chmod(path, basename(folder) === 'bin' ? 0o755 : 0o644);
   }
 }
 

@@ -2,7 +2,7 @@ import { chmod, mkdir, mkdtemp, readdir, readFile, rm, stat, writeFile } from 'n
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import pg from 'pg';
-import { afterEach, beforeEach, describe, expect, onTestFinished, test } from 'vitest';
+import { afterEach, beforeEach, describe, expect, test } from 'vitest';
 import { isAlive } from '../../scripts/build/lock.mjs';
 import { startPostgres } from '../../scripts/database/postgres.mjs';
 import { type Holder, holdDatabase } from './holder.js';
@@ -11,14 +11,18 @@ const asRoot = process.getuid?.() === 0;
 
 let parent: string;
 let dataDir: string;
+/** What a test leaves running: ended before its folder is removed. */
+let running: (() => Promise<void>)[];
 
 beforeEach(async () => {
+  running = [];
   parent = await mkdtemp(join(tmpdir(), 'ground test '));
   if (asRoot) await chmod(parent, 0o711);
   dataDir = join(parent, 'data');
 });
 
 afterEach(async () => {
+  for (const end of running.reverse()) await end();
   await rm(parent, { recursive: true, force: true });
 });
 
@@ -34,8 +38,14 @@ async function query<Row extends pg.QueryResultRow>(url: string | null, sql: str
 
 async function hold(folder?: string): Promise<Holder> {
   const holder = await holdDatabase(folder);
-  onTestFinished(() => holder.end('SIGTERM'));
+  running.push(() => holder.end('SIGTERM'));
   return holder;
+}
+
+async function open(): Promise<string> {
+  const postgres = await startPostgres({ dataDir });
+  running.push(() => postgres.stop());
+  return postgres.url;
 }
 
 async function postmasterPid(): Promise<number> {
@@ -52,9 +62,7 @@ test('a database is kept from one start to the next, whatever port it gets', asy
   const first = await startPostgres({ dataDir });
   await query(first.url, 'create table kept as select 7 as value');
   await first.stop();
-  const second = await startPostgres({ dataDir });
-  onTestFinished(() => second.stop());
-  expect(await query(second.url, 'select value from kept')).toEqual([{ value: 7 }]);
+  expect(await query(await open(), 'select value from kept')).toEqual([{ value: 7 }]);
 });
 
 test('kill -9 loses nothing committed, and the server left behind is replaced', async () => {
@@ -113,16 +121,15 @@ test('a process id on record that another program has by now does not keep the s
 });
 
 test('the server listens on the loopback address alone, without a socket file, and asks for the password', async () => {
-  const postgres = await startPostgres({ dataDir });
-  onTestFinished(() => postgres.stop());
+  const url = await open();
   expect(
     await query(
-      postgres.url,
+      url,
       `select current_setting('listen_addresses') as address, current_setting('unix_socket_directories') as sockets,
         (select rolpassword like 'SCRAM-SHA-256$%' from pg_authid where rolname = current_user) as scram`,
     ),
   ).toEqual([{ address: '127.0.0.1', sockets: '', scram: true }]);
-  const wrong = new URL(postgres.url);
+  const wrong = new URL(url);
   wrong.password = 'wrong';
   await expect(query(wrong.href, 'select 1')).rejects.toMatchObject({ code: '28P01' });
   expect((await stat(join(dataDir, 'password'))).mode & 0o777).toBe(0o600);
@@ -211,17 +218,14 @@ test.runIf(asRoot)('root keeps the database where the user who runs it can reach
   await query(first.url, 'create table kept as select 7 as value');
   await first.stop();
   const elsewhere = (await readFile(join(dataDir, 'database-folder'), 'utf8')).trim();
-  onTestFinished(() => rm(elsewhere, { recursive: true, force: true }));
+  running.push(() => rm(elsewhere, { recursive: true, force: true }));
   expect(elsewhere).toMatch(/^\/var\/lib\/groundward\/[0-9a-f]{16}$/);
   expect(lines).toEqual([expect.stringContaining(`The database is kept in ${elsewhere}`)]);
 
-  const second = await startPostgres({ dataDir });
-  onTestFinished(() => second.stop());
-  expect(await query(second.url, 'select value from kept')).toEqual([{ value: 7 }]);
+  expect(await query(await open(), 'select value from kept')).toEqual([{ value: 7 }]);
 });
 
 test.runIf(asRoot)('as root the server runs as another user', async () => {
-  const postgres = await startPostgres({ dataDir });
-  onTestFinished(() => postgres.stop());
+  await open();
   expect((await stat(`/proc/${await postmasterPid()}`)).uid).not.toBe(0);
 });
