@@ -1,4 +1,5 @@
 import js from '@eslint/js';
+import reactHooks from 'eslint-plugin-react-hooks';
 import tseslint from 'typescript-eslint';
 
 const typed = ['engine/**/*.ts', 'api/**/*.ts', 'web/**/*.{ts,tsx}', 'test/**/*.ts', 'vitest.config.ts'];
@@ -43,6 +44,11 @@ export default tseslint.config(
     // Loops over arrays whose length was just read: an index that is in range by construction.
     files: ['engine/**/*.ts', 'test/**/*.ts', '**/*.test.ts'],
     rules: { '@typescript-eslint/no-non-null-assertion': 'off' },
+  },
+  {
+    files: ['web/**/*.{ts,tsx}'],
+    plugins: { 'react-hooks': reactHooks },
+    rules: { 'react-hooks/rules-of-hooks': 'error', 'react-hooks/exhaustive-deps': 'error' },
   },
   {
     // The benchmark's output is its purpose.
