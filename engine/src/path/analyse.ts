@@ -2,16 +2,16 @@
 import type { Building } from '../building/definition.js';
 import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
-import { combinationsOf } from '../loads/combinations.js';
-import { GRAVITY } from '../walls/posts.js';
+import { combinationsOf, type FactoredCombination } from '../loads/combinations.js';
+import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { subCases } from './cases.js';
 import { BOUND, certificateOf, checkBase, checkLevels, checkPosts, type Ledger } from './certificate.js';
-import { rigidBodies } from './descent.js';
+import { rigidBodies, type RigidBodies } from './descent.js';
 import { diaphragmDemands } from './diaphragm-demands.js';
 import { planFindings, postFindings, torsionFinding } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
 import { edgeDrifts, levelDemands } from './level-demands.js';
-import { buildModel } from './model.js';
+import { buildModel, type Model } from './model.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { descendAll, runCase, type CaseRun } from './run.js';
 import { unitNames, type Table } from './table.js';
@@ -30,20 +30,35 @@ export function analyse(building: Building): Result<Analysis> {
   }
 }
 
-function analysisOf(building: Building): Analysis {
+/** Everything that an analysis reads its demands off: also what a working goes back to. */
+export type Prepared = {
+  readonly building: Building;
+  readonly model: Model;
+  readonly bodies: RigidBodies;
+  readonly runs: readonly CaseRun[];
+  readonly descent: PostDescent;
+  readonly combinations: readonly FactoredCombination[];
+};
+
+/** @throws Refusal where no stable path is found */
+export function prepare(building: Building): Prepared {
   refuseUnavailable(building);
   const model = buildModel(building);
   const bodies = rigidBodies(model);
-  const cases = subCases(building, model);
+  const runs = subCases(building, model).map((subCase) => runCase(model, bodies, subCase));
+  return { building, model, bodies, runs, descent: descendAll(model, runs), combinations: combinationsOf(building) };
+}
+
+function analysisOf(building: Building): Analysis {
+  const { model, bodies, runs, descent, combinations } = prepare(building);
+  const cases = runs.map((run) => run.subCase);
   const table: Table = { rows: [], units: unitNames(building) };
   const diagrams: Diagram[] = [];
   const graph = emptyGraph();
   const ledger: Ledger = new Map();
   const findings: Finding[] = planFindings(model, bodies, new Set(cases.map((subCase) => subCase.frame)));
-  const runs: CaseRun[] = [];
-  for (const subCase of cases) {
-    const run = runCase(model, bodies, subCase);
-    runs.push(run);
+  for (const run of runs) {
+    const { subCase } = run;
     levelDemands(table, model, run.outcomes, subCase, run.amplification);
     for (let i = model.levels.length - 1; i > 0; i--) {
       const outcome = run.outcomes[i];
@@ -61,8 +76,6 @@ function analysisOf(building: Building): Analysis {
     addHorizontal(graph, model, run.outcomes, subCase.id);
   }
 
-  const descent = descendAll(model, runs);
-  const combinations = combinationsOf(building);
   const lateral = cases.map(({ id, loadCase }, c): LateralComponent => ({
     id,
     component: GRAVITY.length + c,

@@ -14,6 +14,8 @@ export type CaseRun = {
   readonly inertias: (level: LevelModel) => readonly Inertia[];
   /** Aₓ by level index. */
   readonly amplification: (level: number) => number;
+  /** The run with Aₓ = 1 from which the amplification was found; absent where nothing is amplified. */
+  readonly plain?: CaseRun;
 };
 
 export function runCase(model: Model, bodies: RigidBodies, subCase: SubCase): CaseRun {
@@ -40,7 +42,7 @@ export function runCase(model: Model, bodies: RigidBodies, subCase: SubCase): Ca
       ...(outcome?.diaphragms ?? []).map((diaphragm) => torsionalAmplification(edgeDrifts(diaphragm, subCase))),
     ),
   );
-  return once((level) => factors[level] ?? 1);
+  return { ...once((level) => factors[level] ?? 1), plain };
 }
 
 /** Accidental eccentricity is for diaphragms that can turn as one body. */
