@@ -25,7 +25,7 @@ export const Ring = z
   .describe('Simple polygon without a repeated last point, in either direction [length]');
 
 export const Units = z
-  .union([
+  .discriminatedUnion('length', [
     z.strictObject({ length: z.literal('ft'), force: z.literal('kip') }),
     z.strictObject({ length: z.literal('m'), force: z.literal('kN') }),
   ])
