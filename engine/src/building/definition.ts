@@ -66,6 +66,9 @@ export const Diaphragm = z.strictObject({
   openings: z.array(Opening).optional(),
   behaviour: Behaviour.optional().describe('Default flexible'),
   assembly: Id.optional().describe('A diaphragm assembly'),
+  meshSize: Positive.optional().describe(
+    'Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area',
+  ),
   weight: DiaphragmWeight.optional(),
 });
 
@@ -129,6 +132,12 @@ export const DiaphragmAssembly = z.strictObject({
   name: Name.optional(),
   nominalUnitShear: NominalUnitShear.optional().describe('[force/length]'),
   apparentShearStiffness: Positive.optional().describe('Gₐ [force/length]'),
+  chordStiffness: Positive.optional().describe(
+    'E·A of the chords along outline and openings of a semi-rigid diaphragm [force]; default none',
+  ),
+  axialStiffness: Positive.optional().describe(
+    'Axial stiffness of the floor per unit width of a semi-rigid diaphragm [force/length]; default 2 Gₐ with stated chords, else 1000 Gₐ: no bending',
+  ),
 });
 
 export const WallAssembly = z.strictObject({

@@ -23,6 +23,12 @@ export type Inertia = {
   readonly share: number;
   /** Place of the resultant along s [length] */
   readonly centre: number;
+  /** How the load lies on the floor: `weight` by area weights, zones and lines. */
+  readonly spread: Spread;
+  /** Load for a level force of 1 on a unit of weight, of area, or of width across the load. */
+  readonly perUnit: number;
+  /** Eccentricity across the load that `load` and `centre` hold [length] */
+  readonly offset: number;
 };
 
 /**
@@ -49,6 +55,9 @@ export function spreadOver(diaphragms: readonly DiaphragmModel[], frame: number,
       along: shape.along.map((load) => ({ ...load, force: load.force * factor })),
       share: total.force * factor,
       centre: total.force > 0 ? total.moment / total.force : (diaphragm.profiles[frame] as Profile).from,
+      spread: how,
+      perUnit: factor,
+      offset: 0,
     };
   });
 }
@@ -119,5 +128,6 @@ export function shiftedBy(inertia: Inertia, by: number): Inertia {
       points: inertia.load.points,
     },
     centre: inertia.centre + by,
+    offset: inertia.offset + by,
   };
 }

@@ -1,0 +1,224 @@
+/** The finite element mesh of a diaphragm: rectangles of nine nodes on the grid, triangles of six where edges run askew. */
+import Delaunator from 'delaunator';
+import type { Point, Ring } from '../../building/definition.js';
+import type { Segment } from './arrangement.js';
+import { cornersOf, inRing, type Corners } from './points.js';
+
+export type Mesh = {
+  /** Nodes in the diaphragm's axes [length] */
+  readonly x: Float64Array;
+  readonly y: Float64Array;
+  /** Nine nodes each: node (i, j) of the rectangle at i + 3·j, i along x, j along y. */
+  readonly rectangles: readonly Int32Array[];
+  /** Six nodes each: corners anticlockwise, then the middles of sides 0–1, 1–2, 2–0. */
+  readonly triangles: readonly Int32Array[];
+  /** Start, middle and end node of every stretch of a wall line, by the index of the line. */
+  readonly lines: readonly (readonly Int32Array[])[];
+  /** The same along outline and openings. */
+  readonly border: readonly Int32Array[];
+};
+
+export type Plan = {
+  readonly outline: Ring;
+  readonly openings: readonly Ring[];
+  readonly zones: readonly Ring[];
+  /** Stretches of each wall line. */
+  readonly lines: readonly (readonly Segment[])[];
+};
+
+/** How often a mesh may be made again with more points on edges that the triangulation missed. */
+const ROUNDS = 40;
+
+/**
+ * @param plan in the diaphragm's axes
+ * @param size largest side of a rectangle [length]
+ * @returns undefined where the edges cannot be kept
+ */
+export function meshOf(plan: Plan, extent: number, size: number): Mesh | undefined {
+  const rings = [plan.outline, ...plan.openings];
+  const floor = (x: number, y: number): boolean =>
+    inRing(plan.outline, x, y) && plan.openings.every((ring) => !inRing(ring, x, y));
+  const border = rings.flatMap(sidesOf);
+  const walls = plan.lines.flat();
+  const corners = cornersOf([...border, ...walls, ...plan.zones.flatMap(sidesOf)], extent, size, floor);
+  const triangulation = triangulate(corners);
+  if (triangulation === undefined) return undefined;
+  return numbered(corners, triangulation, floor, border.length, plan.lines);
+}
+
+function sidesOf(ring: Ring): Segment[] {
+  return ring.map((a, i) => ({ a, b: ring[(i + 1) % ring.length] as Point }));
+}
+
+/** Delaunay's triangulation, with further points on edges that it misses until it has them all. */
+function triangulate(corners: Corners): Delaunator<Float64Array> | undefined {
+  const { x, y, chains, snap } = corners;
+  for (let round = 0; round < ROUNDS; round++) {
+    const places = new Float64Array(2 * x.length);
+    for (let i = 0; i < x.length; i++) {
+      places[2 * i] = x[i] as number;
+      places[2 * i + 1] = y[i] as number;
+    }
+    const triangulation = new Delaunator(places);
+    const present = sidesPresent(triangulation, x.length);
+    const split = new Map<number, number>();
+    for (const chain of chains) {
+      for (let i = 0; i + 1 < chain.length; i++) {
+        const a = chain[i] as number;
+        const b = chain[i + 1] as number;
+        const key = sideKey(a, b, places.length);
+        if (present.has(key)) continue;
+        let middle = split.get(key);
+        if (middle === undefined) {
+          middle = x.length;
+          x.push(snap(((x[a] as number) + (x[b] as number)) / 2));
+          y.push(snap(((y[a] as number) + (y[b] as number)) / 2));
+          split.set(key, middle);
+        }
+        chain.splice(i + 1, 0, middle);
+        i += 1;
+      }
+    }
+    if (split.size === 0) return triangulation;
+  }
+  return undefined;
+}
+
+function sideKey(a: number, b: number, n: number): number {
+  return a < b ? a * n + b : b * n + a;
+}
+
+function sidesPresent({ triangles }: Delaunator<Float64Array>, n: number): Set<number> {
+  const present = new Set<number>();
+  for (let e = 0; e < triangles.length; e++) {
+    const next = e % 3 === 2 ? e - 2 : e + 1;
+    present.add(sideKey(triangles[e] as number, triangles[next] as number, 2 * n));
+  }
+  return present;
+}
+
+/** Triangles on the floor, pairs that make up a rectangle joined, middle nodes added. */
+function numbered(
+  { x, y, chains }: Corners,
+  { triangles, halfedges }: Delaunator<Float64Array>,
+  floor: (x: number, y: number) => boolean,
+  borderSegments: number,
+  lines: readonly (readonly Segment[])[],
+): Mesh {
+  const n = x.length;
+  const kept = new Set<number>();
+  for (const chain of chains)
+    for (let i = 0; i + 1 < chain.length; i++) kept.add(sideKey(chain[i] as number, chain[i + 1] as number, n));
+  const corner = (e: number): number => triangles[e] as number;
+  const count = triangles.length / 3;
+  const onFloor = new Uint8Array(count);
+  for (let t = 0; t < count; t++) {
+    const [a, b, c] = [corner(3 * t), corner(3 * t + 1), corner(3 * t + 2)];
+    const cx = ((x[a] as number) + (x[b] as number) + (x[c] as number)) / 3;
+    const cy = ((y[a] as number) + (y[b] as number) + (y[c] as number)) / 3;
+    if (floor(cx, cy)) onFloor[t] = 1;
+  }
+
+  const nodeX: number[] = [];
+  const nodeY: number[] = [];
+  const cornerNode = new Int32Array(n).fill(-1);
+  const nodeOf = (point: number): number => {
+    if ((cornerNode[point] as number) < 0) {
+      cornerNode[point] = nodeX.length;
+      nodeX.push(x[point] as number);
+      nodeY.push(y[point] as number);
+    }
+    return cornerNode[point] as number;
+  };
+  const middles = new Map<number, number>();
+  const middleOf = (a: number, b: number): number => {
+    const key = sideKey(a, b, n);
+    let node = middles.get(key);
+    if (node === undefined) {
+      node = nodeX.length;
+      middles.set(key, node);
+      nodeX.push(((x[a] as number) + (x[b] as number)) / 2);
+      nodeY.push(((y[a] as number) + (y[b] as number)) / 2);
+    }
+    return node;
+  };
+
+  const rectangles: Int32Array[] = [];
+  const sixNoded: Int32Array[] = [];
+  const joined = new Uint8Array(count);
+  for (let t = 0; t < count; t++) {
+    if (onFloor[t] === 0 || joined[t] === 1) continue;
+    const rectangle = partner(t);
+    if (rectangle !== undefined) {
+      const [a, b, c, d] = rectangle;
+      rectangles.push(
+        Int32Array.of(
+          nodeOf(a),
+          middleOf(a, b),
+          nodeOf(b),
+          middleOf(a, d),
+          middleOf(a, c),
+          middleOf(b, c),
+          nodeOf(d),
+          middleOf(d, c),
+          nodeOf(c),
+        ),
+      );
+    } else {
+      // The triangulation turns clockwise in these axes.
+      const [a, c, b] = [corner(3 * t), corner(3 * t + 1), corner(3 * t + 2)];
+      const turn =
+        ((x[b] as number) - (x[a] as number)) * ((y[c] as number) - (y[a] as number)) -
+        ((y[b] as number) - (y[a] as number)) * ((x[c] as number) - (x[a] as number));
+      const [p, q] = turn > 0 ? [b, c] : [c, b];
+      sixNoded.push(Int32Array.of(nodeOf(a), nodeOf(p), nodeOf(q), middleOf(a, p), middleOf(p, q), middleOf(q, a)));
+    }
+  }
+
+  /** Corners of the rectangle that a triangle makes up with its neighbour, anticlockwise from the lowest left; marks the neighbour. */
+  function partner(t: number): [number, number, number, number] | undefined {
+    for (let k = 0; k < 3; k++) {
+      const e = 3 * t + k;
+      const opposite = halfedges[e] as number;
+      if (opposite < 0) continue;
+      const other = Math.floor(opposite / 3);
+      if (onFloor[other] === 0 || joined[other] === 1) continue;
+      const from = corner(e);
+      const to = corner(3 * t + ((k + 1) % 3));
+      if (kept.has(sideKey(from, to, n)) || x[from] === x[to] || y[from] === y[to]) continue;
+      const apex = corner(3 * t + ((k + 2) % 3));
+      const far = corner(3 * other + ((opposite + 2) % 3));
+      const own = x[apex] === x[from] && y[apex] === y[to] && x[far] === x[to] && y[far] === y[from];
+      const mirrored = x[apex] === x[to] && y[apex] === y[from] && x[far] === x[from] && y[far] === y[to];
+      if (!own && !mirrored) continue;
+      joined[other] = 1;
+      const four = [from, to, apex, far];
+      const left = Math.min(x[from] as number, x[to] as number);
+      const low = Math.min(y[from] as number, y[to] as number);
+      const find = (isLeft: boolean, isLow: boolean): number =>
+        four.find((p) => (x[p] === left) === isLeft && (y[p] === low) === isLow) as number;
+      return [find(true, true), find(false, true), find(false, false), find(true, false)];
+    }
+    return undefined;
+  }
+
+  const triples = (chain: readonly number[]): Int32Array[] => {
+    const out: Int32Array[] = [];
+    for (let i = 0; i + 1 < chain.length; i++) {
+      const a = chain[i] as number;
+      const b = chain[i + 1] as number;
+      const middle = middles.get(sideKey(a, b, n));
+      if (middle !== undefined) out.push(Int32Array.of(nodeOf(a), middle, nodeOf(b)));
+    }
+    return out;
+  };
+  let next = borderSegments;
+  return {
+    border: chains.slice(0, borderSegments).flatMap(triples),
+    lines: lines.map((stretches) => stretches.flatMap(() => triples(chains[next++] as number[]))),
+    rectangles,
+    triangles: sixNoded,
+    x: Float64Array.from(nodeX),
+    y: Float64Array.from(nodeY),
+  };
+}

@@ -1,0 +1,87 @@
+/** What a semi-rigid diaphragm does under a load: displacements, and the force that it gives to each wall line. */
+import { cross } from '../../geometry/frame.js';
+import { solve, times } from '../../statics/frontal-cholesky.js';
+import type { Vector3 } from '../../statics/small-matrix.js';
+import type { LineModel } from '../../walls/wall-line.js';
+import { displacementOf } from '../rigid.js';
+import { toLocal } from './axes.js';
+import { lengthOf, type MembraneModel, type MeshLine } from './membrane-model.js';
+
+export type Response = {
+  /** u_x, u_y of every node in the diaphragm's axes [length] */
+  readonly displacement: Float64Array;
+  /** Force into each line of the model along its axis [force] */
+  readonly given: Float64Array;
+};
+
+/**
+ * Solves for one load, improves the solution by one step of iterative refinement, and takes what is left of its three rigid motions
+ * out by the walls' own stiffness, so that the walls carry the load to the last digits whatever the membrane's stiffness.
+ *
+ * @param load F_x, F_y of every node in the diaphragm's axes [force]
+ * @param resultant of the load: F_x, F_y on plan [force], moment about the rigid model's origin [force·length]
+ */
+export function responseTo(model: MembraneModel, load: Float64Array, resultant: Vector3): Response {
+  const u = solve(model.factor, load);
+  const rest = times(model.elements, u);
+  for (let i = 0; i < rest.length; i++) rest[i] = (load[i] as number) - (rest[i] as number);
+  const correction = solve(model.factor, rest);
+  for (let i = 0; i < u.length; i++) u[i] = (u[i] as number) + (correction[i] as number);
+  removeRigidResidual(model, u, resultant);
+  return { displacement: u, given: Float64Array.from(model.lines, (line) => forceInto(model, line, u)) };
+}
+
+function removeRigidResidual(model: MembraneModel, u: Float64Array, resultant: Vector3): void {
+  const { rigid, axes, mesh } = model;
+  let [fx, fy, moment] = resultant;
+  for (const line of model.lines) {
+    if (line.k === 0) continue;
+    const force = forceInto(model, line, u);
+    const a = rigid.springs.find((spring) => spring.line === line.line)?.a ?? [0, 0, 0];
+    fx -= force * a[0];
+    fy -= force * a[1];
+    moment -= force * a[2];
+  }
+  const [dx, dy, turn] = displacementOf(rigid, [fx, fy, moment]);
+  const ux = dx * axes.x[0] + dy * axes.x[1];
+  const uy = dx * axes.y[0] + dy * axes.y[1];
+  const origin = toLocal(axes, rigid.origin);
+  for (let n = 0; n < mesh.x.length; n++) {
+    u[2 * n] = (u[2 * n] as number) + ux - turn * ((mesh.y[n] as number) - origin[1]);
+    u[2 * n + 1] = (u[2 * n + 1] as number) + uy + turn * ((mesh.x[n] as number) - origin[0]);
+  }
+}
+
+/** Stiffness of the line times the mean of the displacement along it. */
+function forceInto({ mesh }: MembraneModel, { stretches, along, length, k }: MeshLine, u: Float64Array): number {
+  if (k === 0) return 0;
+  let sum = 0;
+  for (const stretch of stretches) {
+    const at = (i: number): number => {
+      const node = stretch[i] as number;
+      return (u[2 * node] as number) * along[0] + (u[2 * node + 1] as number) * along[1];
+    };
+    sum += ((at(0) + 4 * at(1) + at(2)) / 6) * lengthOf(mesh, stretch);
+  }
+  return (k * sum) / length;
+}
+
+/** A force of 1 along a line, evenly over its length: the load and its resultant. */
+export function alongLine(model: MembraneModel, of: LineModel): { load: Float64Array; resultant: Vector3 } {
+  const load = new Float64Array(2 * model.mesh.x.length);
+  const meshLine = model.lines.find(({ line }) => line === of);
+  if (meshLine === undefined) throw new RangeError(`wall line ${of.line.id} does not meet ${model.diaphragm.key}`);
+  const { stretches, along, length } = meshLine;
+  for (const stretch of stretches) {
+    const part = lengthOf(model.mesh, stretch) / length;
+    stretch.forEach((node, i) => {
+      const share = part * (i === 1 ? 4 / 6 : 1 / 6);
+      load[2 * node] = (load[2 * node] as number) + share * along[0];
+      load[2 * node + 1] = (load[2 * node + 1] as number) + share * along[1];
+    });
+  }
+  const [ax, ay] = of.along;
+  const [px, py] = of.line.axis[0];
+  const { origin } = model.rigid;
+  return { load, resultant: [ax, ay, cross([px - origin[0], py - origin[1]], [ax, ay])] };
+}

@@ -1,0 +1,130 @@
+/** One floor on wall lines, for the laws of semi-rigid diaphragms. */
+import { Building, type Point, type Ring } from '@groundward/engine/building/definition';
+import type { DiaphragmModel } from '@groundward/engine/diaphragms/diaphragm';
+import { cutOf } from '@groundward/engine/diaphragms/inner-forces';
+import { shiftedBy, spreadOver, type Inertia, type Spread } from '@groundward/engine/diaphragms/inertia';
+import { rigidModel } from '@groundward/engine/diaphragms/rigid';
+import { membraneModel, type Stiffnesses } from '@groundward/engine/diaphragms/semi-rigid/membrane-model';
+import { semiRigidBody, throughSemiRigid } from '@groundward/engine/diaphragms/semi-rigid/semi-rigid';
+import { unitVector } from '@groundward/engine/geometry/frame';
+import { buildModel } from '@groundward/engine/path/model';
+import type { LineModel } from '@groundward/engine/walls/wall-line';
+
+export type Wall = { readonly id: string; readonly axis: readonly [Point, Point]; readonly k: number };
+
+export type Floor = {
+  readonly outline: Ring;
+  readonly openings?: readonly Ring[];
+  readonly walls: readonly Wall[];
+  /** A wall of the storey above that stops at this floor. */
+  readonly above?: readonly [Point, Point];
+  readonly weight?: NonNullable<Building['levels'][number]['diaphragms']>[number]['weight'];
+  readonly direction: number;
+};
+
+export function buildingOf(floor: Floor): Building {
+  const wall = (id: string, axis: readonly [Point, Point], under: string, k: number) => ({
+    id,
+    axis,
+    storeys: [{ under, piers: [{ id: 'a', from: 0, to: lengthOf(axis), stiffness: k }] }],
+  });
+  return Building.parse({
+    schema: 'groundward.building/1',
+    name: 'One floor',
+    units: { length: 'm', force: 'kN' },
+    levels: [
+      { id: 'base', elevation: 0 },
+      {
+        id: 'floor',
+        elevation: 4,
+        diaphragms: [
+          {
+            id: 'd',
+            outline: floor.outline,
+            openings: (floor.openings ?? []).map((outline, i) => ({ id: `o${i}`, outline })),
+            behaviour: 'semi-rigid',
+            ...(floor.weight === undefined ? {} : { weight: floor.weight }),
+          },
+        ],
+      },
+      { id: 'roof', elevation: 8 },
+    ],
+    wallLines: [
+      ...floor.walls.map(({ id, axis, k }) => wall(id, axis, 'floor', k)),
+      ...(floor.above === undefined ? [] : [wall('above', floor.above, 'roof', 1)]),
+    ],
+    loadCases: [
+      { id: 'E', kind: 'seismic', direction: floor.direction, from: 'stated', forces: [{ level: 'floor', force: 1 }] },
+    ],
+  });
+}
+
+function lengthOf([a, b]: readonly [Point, Point]): number {
+  return Math.hypot(b[0] - a[0], b[1] - a[1]);
+}
+
+/** The floor under a level force of 1, with a spread and an eccentricity [length], and 1 from the wall above where there is one. */
+export function solveFloor(floor: Floor, stiffnesses: Stiffnesses, spread: Spread = 'area', eccentricity = 0) {
+  const model = buildModel(buildingOf(floor));
+  const diaphragm = model.levels[1]?.diaphragms[0] as DiaphragmModel;
+  const rigid = rigidModel(diaphragm, model.extent);
+  const membrane = membraneModel(diaphragm, rigid, stiffnesses, (line) => cutOf(diaphragm, line));
+  const frame = model.frameOf(unitVector(floor.direction));
+  const inertia = shiftedBy(spreadOver([diaphragm], frame, spread)[0] as Inertia, eccentricity);
+  const above = model.lines.find((line) => line.line.id === 'above');
+  const taken = new Map<LineModel, Float64Array>();
+  if (above !== undefined) taken.set(above, Float64Array.of(1));
+  const outcome = throughSemiRigid(semiRigidBody(membrane), inertia, Float64Array.of(1), taken);
+  const given = Object.fromEntries([...outcome.given].map(([line, force]) => [line.line.id, force[0] as number]));
+  return { model, diaphragm, frame, rigid, membrane, inertia, outcome, given };
+}
+
+/** The plan turned about the origin by an angle [degrees]. */
+export function turnedFloor(floor: Floor, degrees: number): Floor {
+  const angle = (degrees * Math.PI) / 180;
+  const turn = ([x, y]: Point): Point => [
+    x * Math.cos(angle) - y * Math.sin(angle),
+    x * Math.sin(angle) + y * Math.cos(angle),
+  ];
+  return {
+    ...floor,
+    outline: floor.outline.map(turn),
+    openings: (floor.openings ?? []).map((ring) => ring.map(turn)),
+    walls: floor.walls.map((wall) => ({ ...wall, axis: [turn(wall.axis[0]), turn(wall.axis[1])] })),
+    ...(floor.above === undefined ? {} : { above: [turn(floor.above[0]), turn(floor.above[1])] }),
+    direction: floor.direction + degrees,
+  };
+}
+
+export function rectangle(x0: number, y0: number, x1: number, y1: number): Ring {
+  return [
+    [x0, y0],
+    [x1, y0],
+    [x1, y1],
+    [x0, y1],
+  ];
+}
+
+/** A wall across a rectangle of the given depth at x, along y. */
+export function across(id: string, x: number, depth: number, k: number): Wall {
+  return {
+    id,
+    axis: [
+      [x, 0],
+      [x, depth],
+    ],
+    k,
+  };
+}
+
+/** A wall along x at y. */
+export function lengthwise(id: string, y: number, x0: number, x1: number, k: number): Wall {
+  return {
+    id,
+    axis: [
+      [x0, y],
+      [x1, y],
+    ],
+    k,
+  };
+}
