@@ -8,6 +8,7 @@ import { everything, ensureBuilt } from '../build/steps.mjs';
 import { sentenceOf } from '../fault.mjs';
 import { addressFault, checkAddress } from './address.mjs';
 import { openDatabase } from './database.mjs';
+import { watchParent } from './parent.mjs';
 import { readSettings } from './settings.mjs';
 
 /** How long requests under way are waited for when the service stops [ms]. */
@@ -33,6 +34,7 @@ export async function start() {
     return (stopping ??= stopAll(starting, code));
   };
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => void stop(0));
+  if (process.env['npm_lifecycle_event'] !== undefined) watchParent(() => void stop(0));
   process.on('uncaughtException', (error) => {
     console.error(error);
     void stop(1);
