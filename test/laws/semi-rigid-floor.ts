@@ -63,8 +63,14 @@ function lengthOf([a, b]: readonly [Point, Point]): number {
   return Math.hypot(b[0] - a[0], b[1] - a[1]);
 }
 
-/** The floor under a level force of 1, with a spread and an eccentricity [length], and 1 from the wall above where there is one. */
-export function solveFloor(floor: Floor, stiffnesses: Stiffnesses, spread: Spread = 'area', eccentricity = 0) {
+/** The floor under a level force, with a spread and an eccentricity [length], and 1 from the wall above where there is one. */
+export function solveFloor(
+  floor: Floor,
+  stiffnesses: Stiffnesses,
+  spread: Spread = 'area',
+  eccentricity = 0,
+  levelForce = 1,
+) {
   const model = buildModel(buildingOf(floor));
   const diaphragm = model.levels[1]?.diaphragms[0] as DiaphragmModel;
   const rigid = rigidModel(diaphragm, model.extent);
@@ -74,7 +80,7 @@ export function solveFloor(floor: Floor, stiffnesses: Stiffnesses, spread: Sprea
   const above = model.lines.find((line) => line.line.id === 'above');
   const taken = new Map<LineModel, Float64Array>();
   if (above !== undefined) taken.set(above, Float64Array.of(1));
-  const outcome = throughSemiRigid(semiRigidBody(membrane), inertia, Float64Array.of(1), taken);
+  const outcome = throughSemiRigid(semiRigidBody(membrane), inertia, Float64Array.of(levelForce), taken);
   const given = Object.fromEntries([...outcome.given].map(([line, force]) => [line.line.id, force[0] as number]));
   return { model, diaphragm, frame, rigid, membrane, inertia, outcome, given };
 }
@@ -128,3 +134,80 @@ export function lengthwise(id: string, y: number, x0: number, x1: number, k: num
     k,
   };
 }
+
+/** Plain elimination with row exchanges. The matrix is spent. */
+export function gauss(matrix: Float64Array[], load: Float64Array): Float64Array {
+  const n = load.length;
+  const u = Float64Array.from(load);
+  for (let k = 0; k < n; k++) {
+    let pivot = k;
+    for (let i = k + 1; i < n; i++)
+      if (Math.abs(matrix[i]?.[k] as number) > Math.abs(matrix[pivot]?.[k] as number)) pivot = i;
+    [matrix[k], matrix[pivot]] = [matrix[pivot] as Float64Array, matrix[k] as Float64Array];
+    [u[k], u[pivot]] = [u[pivot] as number, u[k] as number];
+    const row = matrix[k] as Float64Array;
+    for (let i = k + 1; i < n; i++) {
+      const other = matrix[i] as Float64Array;
+      const factor = (other[k] as number) / (row[k] as number);
+      if (factor === 0) continue;
+      for (let j = k; j < n; j++) other[j] = (other[j] as number) - factor * (row[j] as number);
+      u[i] = (u[i] as number) - factor * (u[k] as number);
+    }
+  }
+  for (let i = n - 1; i >= 0; i--) {
+    const row = matrix[i] as Float64Array;
+    let sum = u[i] as number;
+    for (let j = i + 1; j < n; j++) sum -= (row[j] as number) * (u[j] as number);
+    u[i] = sum / (row[i] as number);
+  }
+  return u;
+}
+
+/** An L-shaped plan with a stair, a cut-off corner, a wall askew and a wall above that stops. */
+export const skewFloor: Floor = {
+  outline: [
+    [0, 0],
+    [24, 0],
+    [30, 6],
+    [30, 12],
+    [12, 12],
+    [12, 25],
+    [0, 25],
+  ],
+  openings: [rectangle(4, 4, 8, 9)],
+  walls: [
+    across('1', 0, 25, 3000),
+    {
+      id: '2',
+      axis: [
+        [12, 12],
+        [12, 25],
+      ],
+      k: 1500,
+    },
+    {
+      id: '3',
+      axis: [
+        [30, 6],
+        [30, 12],
+      ],
+      k: 4000,
+    },
+    lengthwise('A', 0, 0, 24, 2500),
+    lengthwise('B', 25, 0, 12, 2000),
+    lengthwise('C', 12, 14, 26, 1000),
+    {
+      id: 'S',
+      axis: [
+        [18, 0],
+        [25, 12],
+      ],
+      k: 800,
+    },
+  ],
+  above: [
+    [16, 5],
+    [24, 5],
+  ],
+  direction: 90,
+};

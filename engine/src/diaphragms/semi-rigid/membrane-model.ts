@@ -7,6 +7,7 @@ import { factorise, type ElementStiffness, type Factor } from '../../statics/fro
 import type { LineModel, StoreyModel } from '../../walls/wall-line.js';
 import type { DiaphragmModel } from '../diaphragm.js';
 import type { RigidModel } from '../rigid.js';
+import type { Segment } from './arrangement.js';
 import { axesOf, toLocal, turned, type Axes } from './axes.js';
 import { membraneElements, stretchElements, type Sheet } from './membrane.js';
 import { meshOf, type Mesh } from './mesh.js';
@@ -103,12 +104,7 @@ export function membraneModel(
     outline: local(outline),
     openings: openings.map((opening) => local(opening.outline)),
     zones: (weight?.zones ?? []).map((zone) => local(zone.outline)),
-    lines: touching.map((line, i) =>
-      (intervals[i] as readonly Interval[]).map(([a, b]) => ({
-        a: toLocal(axes, toPlan(line.frame, line.s, a)),
-        b: toLocal(axes, toPlan(line.frame, line.s, b)),
-      })),
-    ),
+    lines: touching.map((line, i) => stretchesOf(axes, line, intervals[i] as readonly Interval[])),
   };
   const extent = extentOf(plan.outline);
   const area = Math.abs(diaphragm.mass.area);
@@ -154,6 +150,15 @@ export function membraneModel(
     size,
     assumed: { axial: stiffnesses.axial === undefined, size: stiffnesses.size === undefined },
   };
+}
+
+/** Along the axis from its first point on, whichever way the family runs, so that a turned plan is meshed alike. */
+function stretchesOf(axes: Axes, line: LineModel, intervals: readonly Interval[]): Segment[] {
+  const place = (t: number): Point => toLocal(axes, toPlan(line.frame, line.s, t));
+  const along = intervals.map(([a, b]) =>
+    line.sign > 0 ? { a: place(a), b: place(b) } : { a: place(b), b: place(a) },
+  );
+  return line.sign > 0 ? along : along.reverse();
 }
 
 export function lengthOf({ x, y }: Mesh, stretch: Int32Array): number {
