@@ -14,7 +14,10 @@ export class PointSet {
 
   add(x: number, y: number): number {
     let column = this.known.get(x);
-    if (column === undefined) this.known.set(x, (column = new Map()));
+    if (column === undefined) {
+      column = new Map<number, number>();
+      this.known.set(x, column);
+    }
     let index = column.get(y);
     if (index === undefined) {
       index = this.x.length;

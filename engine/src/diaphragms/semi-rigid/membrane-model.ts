@@ -122,7 +122,7 @@ export function membraneModel(
     if (stretches.length === 0) throw new Refusal([noMesh(diaphragm)]);
     return {
       line,
-      along: turned(axes, line.along) as readonly [number, number],
+      along: turned(axes, line.along),
       stretches,
       length: stretches.reduce((sum, stretch) => sum + lengthOf(mesh, stretch), 0),
       k: storey?.stiffness ?? 0,

@@ -22,7 +22,10 @@ export function membraneElements(mesh: Mesh, sheet: Sheet): ElementStiffness[] {
     const a = (x[last] as number) - (x[first] as number);
     const b = (y[last] as number) - (y[first] as number);
     let row = known.get(a);
-    if (row === undefined) known.set(a, (row = new Map()));
+    if (row === undefined) {
+      row = new Map<number, Float64Array>();
+      known.set(a, row);
+    }
     let matrix = row.get(b);
     if (matrix === undefined) row.set(b, (matrix = rectangleStiffness(a, b, sheet)));
     const centre = nodes[4] as number;
