@@ -1,4 +1,3 @@
-import { createHash } from 'node:crypto';
 import { chmod, mkdir, mkdtemp, readFile, realpath, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
@@ -33,18 +32,24 @@ export async function findHome(dataDir, progress) {
   const user = await serverUser(join(folder, 'cluster'));
   if (canReach(user, folder)) return { folder, user };
 
-  const other = join(ELSEWHERE, createHash('sha256').update(wanted).digest('hex').slice(0, 16));
-  await makeFolder(ELSEWHERE);
-  await makeFolder(other);
+  const other = await makeElsewhere();
   if (!canReach(user, other)) {
+    await rm(other, { recursive: true });
     throw new Fault(
       `The user ${user?.name}, who runs the database because PostgreSQL refuses root, can reach neither ${folder} nor ` +
-        `${other}: name a folder within its reach in GROUNDWARD_DATA.`,
+        `${ELSEWHERE}: name a folder within its reach in GROUNDWARD_DATA.`,
     );
   }
-  progress(`The database is kept in ${other}: the user ${user?.name}, who runs it, cannot reach ${wanted}.`);
   await writeFile(pointer, `${other}\n`);
+  progress(`The database is kept in ${other}: the user ${user?.name}, who runs it, cannot reach ${wanted}.`);
   return { folder: other, user };
+}
+
+async function makeElsewhere() {
+  const parent = await makeFolder(ELSEWHERE);
+  const folder = await mkdtemp(join(parent, 'data-'));
+  await chmod(folder, 0o711);
+  return folder;
 }
 
 /**
