@@ -4,9 +4,17 @@ import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
 import { combinationsOf, type FactoredCombination } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
+import { bodiesOf, type Bodies } from './bodies.js';
 import { subCases } from './cases.js';
-import { BOUND, certificateOf, checkBase, checkLevels, checkPosts, type Ledger } from './certificate.js';
-import { rigidBodies, type RigidBodies } from './descent.js';
+import {
+  BOUND,
+  MEMBRANE_BOUND,
+  certificateOf,
+  checkBase,
+  checkLevels,
+  checkPosts,
+  type Ledger,
+} from './certificate.js';
 import { diaphragmDemands } from './diaphragm-demands.js';
 import { planFindings, postFindings, torsionFinding } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
@@ -14,6 +22,7 @@ import { edgeDrifts, levelDemands } from './level-demands.js';
 import { buildModel, type Model } from './model.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { descendAll, runCase, type CaseRun } from './run.js';
+import { checkMembranes, semiRigidFindings } from './semi-rigid-findings.js';
 import { unitNames, type Table } from './table.js';
 import { lineDemands, pierEndDemands, supportDemands, type LateralComponent } from './wall-demands.js';
 
@@ -34,7 +43,7 @@ export function analyse(building: Building): Result<Analysis> {
 export type Prepared = {
   readonly building: Building;
   readonly model: Model;
-  readonly bodies: RigidBodies;
+  readonly bodies: Bodies;
   readonly runs: readonly CaseRun[];
   readonly descent: PostDescent;
   readonly combinations: readonly FactoredCombination[];
@@ -44,7 +53,7 @@ export type Prepared = {
 export function prepare(building: Building): Prepared {
   refuseUnavailable(building);
   const model = buildModel(building);
-  const bodies = rigidBodies(model);
+  const bodies = bodiesOf(model);
   const runs = subCases(building, model).map((subCase) => runCase(model, bodies, subCase));
   return { building, model, bodies, runs, descent: descendAll(model, runs), combinations: combinationsOf(building) };
 }
@@ -93,21 +102,22 @@ function analysisOf(building: Building): Analysis {
     combinations.filter((combination) => combination.applies === 'gravity'),
   );
   addVertical(graph, model, descent, lateral);
-  findings.push(...postFindings(model, descent));
+  findings.push(...semiRigidFindings(bodies, runs), ...postFindings(model, descent));
   checkPosts(
     ledger,
     model,
     descent,
     cases.map((subCase, c) => ({ subCase, component: GRAVITY.length + c })),
   );
-  const certificate = certificateOf(ledger);
-  if (!(certificate.worstResidual <= BOUND)) {
+  const membranes = checkMembranes(ledger, bodies);
+  const certificate = certificateOf(ledger, membranes ? MEMBRANE_BOUND : BOUND);
+  if (!(certificate.worstResidual <= certificate.bound)) {
     throw new Refusal([
       {
         code: 'certificate',
         path: '',
         found: `an equilibrium residual of ${certificate.worstResidual.toExponential(2)} (${certificate.worst})`,
-        expected: `at most ${BOUND.toExponential(0)} of the forces involved`,
+        expected: `at most ${certificate.bound.toExponential(0)} of the forces involved`,
       },
     ]);
   }
@@ -127,13 +137,13 @@ function refuseUnavailable(building: Building): void {
   const faults = [
     ...building.levels.flatMap((level, l) =>
       (level.diaphragms ?? []).flatMap((diaphragm, d) =>
-        diaphragm.behaviour === 'semi-rigid' || diaphragm.behaviour === 'envelope'
+        diaphragm.behaviour === 'envelope'
           ? [
               {
                 code: 'behaviour-not-available',
                 path: `levels[${l}].diaphragms[${d}].behaviour`,
                 found: diaphragm.behaviour,
-                expected: 'flexible or rigid',
+                expected: 'flexible, rigid or semi-rigid',
               },
             ]
           : [],

@@ -10,6 +10,8 @@ import type { Certificate } from './result.js';
 
 /** Above this an analysis is refused. */
 export const BOUND = 1e-9;
+/** Where finite elements took part. */
+export const MEMBRANE_BOUND = 1e-6;
 
 export type Ledger = Map<string, { residual: number; where: string }>;
 
@@ -22,13 +24,13 @@ export function enter(ledger: Ledger, what: string, where: string, difference: n
   }
 }
 
-export function certificateOf(ledger: Ledger): Certificate {
+export function certificateOf(ledger: Ledger, bound: number): Certificate {
   let worst = { residual: 0, where: 'none' };
   const checks = [...ledger].map(([what, entry]) => {
     if (entry.residual > worst.residual) worst = entry;
     return { what, residual: entry.residual };
   });
-  return { worstResidual: worst.residual, bound: BOUND, worst: worst.where, checks };
+  return { worstResidual: worst.residual, bound, worst: worst.where, checks };
 }
 
 /** Each level: what comes from above plus its own inertia is what goes into the walls below, along x, along y and in torsion. */

@@ -6,12 +6,14 @@ import { Refusal } from '../building/refusal.js';
 import { flexibleSpans, supportsOf } from '../diaphragms/flexible.js';
 import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
 import type { Inertia } from '../diaphragms/inertia.js';
-import { displacementOf, rigidModel, springForce, type RigidModel } from '../diaphragms/rigid.js';
+import { displacementOf, springForce, type RigidModel } from '../diaphragms/rigid.js';
+import { throughSemiRigid } from '../diaphragms/semi-rigid/semi-rigid.js';
 import { cross, dot } from '../geometry/frame.js';
 import { totalLength } from '../geometry/profile.js';
 import { reactionsOf } from '../statics/beam.js';
 import type { Vector3 } from '../statics/small-matrix.js';
 import { pointOn, type LineModel } from '../walls/wall-line.js';
+import { isBody, type Bodies, type Body } from './bodies.js';
 import type { LevelModel, Model } from './model.js';
 
 /** Force by channel [force]. */
@@ -28,9 +30,11 @@ export type DiaphragmOutcome = {
   /** What lines that stop here, or that end in a rigid body, hand to it, along their axis. */
   readonly taken: ReadonlyMap<LineModel, Channels>;
   readonly rigid?: {
-    readonly model: RigidModel;
-    /** Displacement by channel about the model's origin. */
+    readonly model: Body;
+    /** Displacement by channel about the model's origin; of a semi-rigid diaphragm as if it were rigid. */
     readonly motion: readonly Vector3[];
+    /** Of a semi-rigid diaphragm: u_x, u_y of every node in the diaphragm's axes, by channel [length] */
+    readonly displacement?: readonly Float64Array[];
   };
 };
 
@@ -41,37 +45,6 @@ export type LevelOutcome = {
   readonly below: readonly Channels[];
   readonly diaphragms: readonly DiaphragmOutcome[];
 };
-
-/** Rigid bodies by diaphragm, made once for a building. */
-export type RigidBodies = ReadonlyMap<DiaphragmModel, RigidModel>;
-
-export function rigidBodies(model: Model): RigidBodies {
-  const bodies = new Map<DiaphragmModel, RigidModel>();
-  const holder = new Map<string, DiaphragmModel>();
-  for (const level of model.levels) {
-    for (const diaphragm of level.diaphragms) {
-      if (diaphragm.behaviour !== 'rigid') continue;
-      for (const { line } of diaphragm.touches) {
-        const key = `${line.line.id}/${level.id}`;
-        const other = holder.get(key);
-        if (other !== undefined) throw new Refusal([sharedLine(line, other, diaphragm)]);
-        holder.set(key, diaphragm);
-      }
-      bodies.set(diaphragm, rigidModel(diaphragm, model.extent));
-    }
-  }
-  return bodies;
-}
-
-function sharedLine(line: LineModel, first: DiaphragmModel, second: DiaphragmModel) {
-  return {
-    code: 'line-shared-by-rigid-diaphragms',
-    path: second.path,
-    found: `wall line ${line.line.id} held by two rigid diaphragms, ${first.key} and ${second.key}`,
-    expected: 'a wall line with at most one rigid diaphragm at a level',
-    hint: 'draw the two as one diaphragm, or as two wall lines',
-  };
-}
 
 /**
  * From the top level down to the base.
@@ -84,7 +57,7 @@ function sharedLine(line: LineModel, first: DiaphragmModel, second: DiaphragmMod
  */
 export function descend(
   model: Model,
-  bodies: RigidBodies,
+  bodies: Bodies,
   push: (level: LevelModel) => readonly Pushed[],
   channels: number,
   start?: { readonly level: number; readonly above: readonly Channels[] },
@@ -105,7 +78,7 @@ export function descend(
  */
 export function throughLevel(
   model: Model,
-  bodies: RigidBodies,
+  bodies: Bodies,
   level: LevelModel,
   above: readonly Channels[],
   pushed: readonly Pushed[],
@@ -115,7 +88,7 @@ export function throughLevel(
   // Which rigid body, if any, a line is held by at this level.
   const body = new Map<LineModel, DiaphragmModel>();
   for (const diaphragm of level.diaphragms) {
-    if (diaphragm.behaviour === 'rigid') for (const { line } of diaphragm.touches) body.set(line, diaphragm);
+    if (isBody(diaphragm)) for (const { line } of diaphragm.touches) body.set(line, diaphragm);
   }
   const takers = new Map<DiaphragmModel, Map<LineModel, Channels>>(level.diaphragms.map((d) => [d, new Map()]));
   for (const line of model.lines) {
@@ -142,12 +115,15 @@ export function throughLevel(
   }
   for (const push of pushed) {
     const { diaphragm } = push.inertia;
-    if (diaphragm.behaviour !== 'rigid') continue;
+    if (!isBody(diaphragm)) continue;
     const taken = takers.get(diaphragm) as Map<LineModel, Channels>;
-    const rigid = bodies.get(diaphragm) as RigidModel;
-    const { given, motion } = throughRigid(rigid, push, taken, channels);
+    const rigid = bodies.get(diaphragm) as Body;
+    const { given, ...moved } =
+      rigid.semiRigid === undefined
+        ? throughRigid(rigid, push, taken, channels)
+        : throughSemiRigid(rigid.semiRigid, push.inertia, push.force, taken);
     for (const [line, force] of given) accumulate(below[line.index] as Channels, force, 1);
-    outcomes.set(diaphragm, { diaphragm, pushed: push, given, taken, rigid: { model: rigid, motion } });
+    outcomes.set(diaphragm, { diaphragm, pushed: push, given, taken, rigid: { model: rigid, ...moved } });
   }
   return {
     level,

@@ -3,9 +3,10 @@ import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
 import { supportsOf } from '../diaphragms/flexible.js';
 import { innerForces, shearAt, type InnerForces } from '../diaphragms/inner-forces.js';
 import { totalLength } from '../geometry/profile.js';
+import type { Bodies } from './bodies.js';
 import { enter, type Ledger } from './certificate.js';
 import { clip, collectorDemands, collectorsOf } from './collectors.js';
-import { throughLevel, type LevelOutcome, type RigidBodies } from './descent.js';
+import { throughLevel, type LevelOutcome } from './descent.js';
 import type { Model } from './model.js';
 import { openingDemands } from './opening-demands.js';
 import type { Diagram } from './result.js';
@@ -18,7 +19,7 @@ export function diaphragmDemands(
   diagrams: Diagram[],
   ledger: Ledger,
   model: Model,
-  bodies: RigidBodies,
+  bodies: Bodies,
   run: CaseRun,
   storey: LevelOutcome,
 ): void {

@@ -1,6 +1,6 @@
 /** Findings: the engineer's work list. Each has a code, a severity, a member, a sentence and the numbers that decided it. */
 import type { Point } from '../building/definition.js';
-import type { RigidBodies } from './descent.js';
+import type { Bodies } from './bodies.js';
 import type { Model } from './model.js';
 import type { Finding } from './result.js';
 import { cross, dot, frameAlong } from '../geometry/frame.js';
@@ -9,7 +9,7 @@ import type { Landing, PostDescent } from '../walls/posts.js';
 import { distanceAt } from '../walls/wall-line.js';
 
 /** What the plan and the path alone show, whatever the loads. */
-export function planFindings(model: Model, bodies: RigidBodies, loadFrames: ReadonlySet<number>): Finding[] {
+export function planFindings(model: Model, bodies: Bodies, loadFrames: ReadonlySet<number>): Finding[] {
   const findings: Finding[] = [];
   for (const level of model.levels) {
     for (const diaphragm of level.diaphragms) {

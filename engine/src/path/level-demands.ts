@@ -6,6 +6,7 @@ import { pointOn } from '../walls/wall-line.js';
 import type { SubCase } from './cases.js';
 import type { DiaphragmOutcome, LevelOutcome } from './descent.js';
 import type { Model } from './model.js';
+import { largestBow, semiRigidMotion } from './semi-rigid-motion.js';
 import { addBoth, type Table } from './table.js';
 
 export function levelDemands(
@@ -61,13 +62,33 @@ function rigidDemands(
   addBoth(table, { ...head, quantity: 'centre-of-rigidity-y', value: centre[1], unit: units.length });
   addBoth(table, { ...head, quantity: 'torsion', value: Math.abs(torsionOf(outcome)), unit: units.moment });
   const drift = edgeDrifts(outcome, subCase);
+  if (rigid.displacement !== undefined) bowDemands(table, head, outcome, subCase);
   if (drift.average > 0) {
     addBoth(table, { ...head, quantity: 'torsional-ratio', value: drift.largest / drift.average, unit: units.none });
   }
   if (subCase.eccentricity !== 0) {
     addBoth(table, { ...head, quantity: 'torsional-amplification', value: amplification, unit: units.none });
   }
-  if (rigid.model.absolute) addBoth(table, { ...head, quantity: 'drift', value: drift.largest, unit: units.length });
+  const motion = semiRigidMotion(outcome, subCase.frame);
+  const largest = motion?.largest ?? drift.largest;
+  if (rigid.model.absolute)
+    addBoth(table, { ...head, quantity: 'drift', value: largest, unit: units.length, at: motion?.at });
+}
+
+/** How far a semi-rigid diaphragm bows out between its wall lines, and the largest ratio of that to their average drift. */
+function bowDemands(
+  table: Table,
+  head: { readonly member: string; readonly kind: 'level'; readonly case: string },
+  outcome: DiaphragmOutcome,
+  subCase: SubCase,
+): void {
+  const bow = largestBow(semiRigidMotion(outcome, subCase.frame));
+  if (bow === undefined) return;
+  const { units } = table;
+  addBoth(table, { ...head, quantity: 'deflection', value: bow.deflection, unit: units.length, at: bow.at });
+  if (bow.drift > 0) {
+    addBoth(table, { ...head, quantity: 'deflection-ratio', value: bow.deflection / bow.drift, unit: units.none });
+  }
 }
 
 /** Moment about the centre of rigidity of all that acts on a rigid diaphragm [force·length] */
@@ -86,7 +107,7 @@ export function torsionOf(outcome: DiaphragmOutcome): number {
 }
 
 /**
- * Displacements of the two edges of a rigid diaphragm along the load, against the storey below: the largest and the average of both.
+ * Displacements of the two edges of a rigid or semi-rigid diaphragm along the load, against the storey below: the largest and the average of both.
  * Of relative size where the stiffnesses are.
  *
  * Source: ASCE 7-16 12.3.2.1, Table 12.3-1 type 1: the largest against the average of the storey drifts at the two ends.
@@ -96,6 +117,11 @@ export function edgeDrifts(outcome: DiaphragmOutcome, subCase: SubCase): { large
   if (rigid === undefined) return { largest: 0, average: 0 };
   const profile = outcome.diaphragm.profiles[subCase.frame] as Profile;
   const { s, t } = profile.frame;
+  const bowed = semiRigidMotion(outcome, subCase.frame);
+  if (bowed !== undefined) {
+    const [a, b] = [bowed.near, bowed.far];
+    return { largest: Math.max(Math.abs(a), Math.abs(b)), average: Math.abs(a + b) / 2 };
+  }
   const motion = rigid.motion[0] as Vector3;
   const turn = cross(s, t);
   const at = (edge: number): number =>

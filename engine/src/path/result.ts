@@ -32,6 +32,7 @@ export const Quantity = z.enum([
   'end-tension',
   'end-compression',
   'deflection',
+  'deflection-ratio',
   'ratio',
   'uplift',
   'bearing',

@@ -3,7 +3,8 @@ import { shiftedBy, spreadOver, type Inertia } from '../diaphragms/inertia.js';
 import type { Profile } from '../geometry/profile.js';
 import { descendPosts, GRAVITY, type Components, type PostDescent } from '../walls/posts.js';
 import type { SubCase } from './cases.js';
-import { descend, type LevelOutcome, type Pushed, type RigidBodies } from './descent.js';
+import { isBody, type Bodies } from './bodies.js';
+import { descend, type LevelOutcome, type Pushed } from './descent.js';
 import { edgeDrifts, torsionalAmplification } from './level-demands.js';
 import type { LevelModel, Model } from './model.js';
 
@@ -18,7 +19,7 @@ export type CaseRun = {
   readonly plain?: CaseRun;
 };
 
-export function runCase(model: Model, bodies: RigidBodies, subCase: SubCase): CaseRun {
+export function runCase(model: Model, bodies: Bodies, subCase: SubCase): CaseRun {
   const once = (amplification: (level: number) => number): CaseRun => {
     const made = new Map<LevelModel, Inertia[]>();
     const inertias = (level: LevelModel): Inertia[] => {
@@ -47,7 +48,7 @@ export function runCase(model: Model, bodies: RigidBodies, subCase: SubCase): Ca
 
 /** Accidental eccentricity is for diaphragms that can turn as one body. */
 function eccentric(inertia: Inertia, ratio: number): Inertia {
-  if (ratio === 0 || inertia.diaphragm.behaviour !== 'rigid') return inertia;
+  if (ratio === 0 || !isBody(inertia.diaphragm)) return inertia;
   const profile = inertia.diaphragm.profiles[inertia.frame] as Profile;
   return shiftedBy(inertia, ratio * (profile.to - profile.from));
 }

@@ -10,7 +10,8 @@ import { descendPosts, type PierFeet, type PostDescent } from '../walls/posts.js
 import type { LineModel, PierModel } from '../walls/wall-line.js';
 import { runCase } from './run.js';
 import { subCases, type SubCase } from './cases.js';
-import { descend, rigidBodies, type Channels, type LevelOutcome, type Pushed, type RigidBodies } from './descent.js';
+import { bodiesOf, type Bodies } from './bodies.js';
+import { descend, type Channels, type LevelOutcome, type Pushed } from './descent.js';
 import { buildModel, type LevelModel, type Model } from './model.js';
 import type { Part, Trace } from './trace-result.js';
 
@@ -32,7 +33,7 @@ export function trace(building: Building, member: string, caseId: string): Resul
 /** Everything that is carried down once, by source. */
 type Sources = {
   readonly model: Model;
-  readonly bodies: RigidBodies;
+  readonly bodies: Bodies;
   readonly subCase: SubCase;
   /** The masses, from the top down. */
   readonly masses: readonly { readonly key: string; readonly level: string }[];
@@ -42,7 +43,7 @@ type Sources = {
 
 function traceOf(building: Building, member: string, caseId: string): Trace {
   const model = buildModel(building);
-  const bodies = rigidBodies(model);
+  const bodies = bodiesOf(model);
   const subCase = subCases(building, model).find((candidate) => candidate.id === caseId);
   if (subCase === undefined)
     throw new Refusal([unknown('unknown-case', caseId, 'a load case or sub-case of the building')]);

@@ -12,6 +12,8 @@ export type Response = {
   readonly displacement: Float64Array;
   /** Force into each line of the model along its axis [force] */
   readonly given: Float64Array;
+  /** Largest force that is left on a node, relative to the sum of the load's forces. */
+  readonly residual: number;
 };
 
 /**
@@ -23,12 +25,23 @@ export type Response = {
  */
 export function responseTo(model: MembraneModel, load: Float64Array, resultant: Vector3): Response {
   const u = solve(model.factor, load);
-  const rest = times(model.elements, u);
-  for (let i = 0; i < rest.length; i++) rest[i] = (load[i] as number) - (rest[i] as number);
-  const correction = solve(model.factor, rest);
+  const correction = solve(model.factor, left(model, load, u));
   for (let i = 0; i < u.length; i++) u[i] = (u[i] as number) + (correction[i] as number);
   removeRigidResidual(model, u, resultant);
-  return { displacement: u, given: Float64Array.from(model.lines, (line) => forceInto(model, line, u)) };
+  const most = (of: Float64Array): number => of.reduce((size, value) => Math.max(size, Math.abs(value)), 0);
+  const whole = load.reduce((sum, value) => sum + Math.abs(value), 0);
+  return {
+    displacement: u,
+    given: Float64Array.from(model.lines, (line) => forceInto(model, line, u)),
+    residual: whole === 0 ? 0 : most(left(model, load, u)) / whole,
+  };
+}
+
+/** f − K·u */
+function left({ elements }: MembraneModel, load: Float64Array, u: Float64Array): Float64Array {
+  const rest = times(elements, u);
+  for (let i = 0; i < rest.length; i++) rest[i] = (load[i] as number) - (rest[i] as number);
+  return rest;
 }
 
 function removeRigidResidual(model: MembraneModel, u: Float64Array, resultant: Vector3): void {
