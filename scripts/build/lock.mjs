@@ -1,6 +1,7 @@
 import { mkdir, readFile, rm, writeFile } from 'node:fs/promises';
 import { dirname } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
+import { isAlive } from './alive.mjs';
 
 /**
  * Does a piece of work while no other process does it; waits for its turn. A lock whose process has died is void.
@@ -32,18 +33,5 @@ async function taken(file) {
   } catch (error) {
     if (error instanceof Error && 'code' in error && error.code === 'EEXIST') return false;
     throw error;
-  }
-}
-
-/**
- * @param {number} pid
- * @returns {boolean} whether a process of this id runs, of whatever user
- */
-export function isAlive(pid) {
-  try {
-    process.kill(pid, 0);
-    return true;
-  } catch (error) {
-    return error instanceof Error && 'code' in error && error.code === 'EPERM';
   }
 }

@@ -3,7 +3,7 @@ import { mkdir, readdir, readFile, rename, rm, stat, symlink } from 'node:fs/pro
 import { basename, dirname, join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import { promisify } from 'node:util';
-import { isAlive } from '../build/lock.mjs';
+import { isAlive } from '../build/alive.mjs';
 import { Fault, hasCode } from '../fault.mjs';
 
 const run = promisify(execFile);

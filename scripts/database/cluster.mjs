@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { randomBytes } from 'node:crypto';
 import { chown, link, mkdir, readdir, readFile, rename, rm, stat, writeFile } from 'node:fs/promises';
 import { basename, join } from 'node:path';
-import { isAlive } from '../build/lock.mjs';
+import { isAlive } from '../build/alive.mjs';
 import { Fault, hasCode } from '../fault.mjs';
 
 /**

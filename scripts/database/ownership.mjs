@@ -1,5 +1,5 @@
 import { setTimeout as pause } from 'node:timers/promises';
-import { isAlive } from '../build/lock.mjs';
+import { isAlive } from '../build/alive.mjs';
 import { connect } from './client.mjs';
 import { Fault, hasCode } from '../fault.mjs';
 

@@ -2,7 +2,7 @@ import { execFileSync } from 'node:child_process';
 import { readFileSync } from 'node:fs';
 import { readFile, writeFile } from 'node:fs/promises';
 import { join } from 'node:path';
-import { isAlive } from '../build/lock.mjs';
+import { isAlive } from '../build/alive.mjs';
 import { hasCode } from '../fault.mjs';
 
 /**

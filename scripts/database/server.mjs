@@ -2,7 +2,7 @@ import { spawn } from 'node:child_process';
 import { chown, open, readFile, stat } from 'node:fs/promises';
 import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
-import { isAlive } from '../build/lock.mjs';
+import { isAlive } from '../build/alive.mjs';
 import { serverEnvironment } from './cluster.mjs';
 import { Fault, hasCode } from '../fault.mjs';
 import { postmasterOf } from './postmaster.mjs';

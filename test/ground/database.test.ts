@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import pg from 'pg';
 import { afterEach, beforeEach, describe, expect, test } from 'vitest';
-import { isAlive } from '../../scripts/build/lock.mjs';
+import { isAlive } from '../../scripts/build/alive.mjs';
 import { startPostgres } from '../../scripts/database/postgres.mjs';
 import { type Holder, holdDatabase } from './holder.js';
 
