@@ -10,7 +10,7 @@ import type { RigidModel } from '../rigid.js';
 import type { Segment } from './arrangement.js';
 import { axesOf, toLocal, turned, type Axes } from './axes.js';
 import { membraneElements, stretchElements, type Sheet } from './membrane.js';
-import { meshOf, type Mesh } from './mesh.js';
+import { areaOf, meshOf, type Mesh } from './mesh.js';
 
 /** A wall line where it meets the mesh. */
 export type MeshLine = {
@@ -48,6 +48,8 @@ export const AXIAL_WITH_CHORDS = 2;
 /** The default mesh has this many rectangles on a square floor. */
 const DEFAULT_RECTANGLES = 256;
 const MOST_NODES = 100_000;
+/** A mesh covers the floor to within this part of its area. */
+const COVERED = 1e-6;
 
 export type Stiffnesses = {
   /** G·t [force/length] */
@@ -107,13 +109,13 @@ export function membraneModel(
     lines: touching.map((line, i) => stretchesOf(axes, line, intervals[i] as readonly Interval[])),
   };
   const extent = extentOf(plan.outline);
-  const area = Math.abs(diaphragm.mass.area);
+  const { area } = diaphragm.mass;
   const size = stiffnesses.size ?? Math.sqrt(area / DEFAULT_RECTANGLES);
   // Four nodes for each rectangle of the grid.
   const nodes = (4 * area) / (size * size);
   if (!(nodes <= MOST_NODES)) throw new Refusal([tooFine(diaphragm, nodes)]);
   const mesh = meshOf(plan, extent, size);
-  if (mesh === undefined) throw new Refusal([noMesh(diaphragm)]);
+  if (mesh === undefined || Math.abs(areaOf(mesh) - area) > COVERED * area) throw new Refusal([noMesh(diaphragm)]);
   if (mesh.x.length > MOST_NODES) throw new Refusal([tooFine(diaphragm, mesh.x.length)]);
 
   const lines = touching.map((line, i): MeshLine => {

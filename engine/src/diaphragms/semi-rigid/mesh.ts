@@ -28,6 +28,23 @@ export type Plan = {
 
 /** How often a mesh may be made again with more points on edges that the triangulation missed. */
 const ROUNDS = 40;
+/** Triangles flatter than this have no area. */
+const FLAT = 1e-7;
+
+/** Floor that the mesh covers [length²] */
+export function areaOf({ x, y, rectangles, triangles }: Mesh): number {
+  let double = 0;
+  const add = (a: number, b: number, c: number): void => {
+    const [ax, ay] = [x[a] as number, y[a] as number];
+    double += ((x[b] as number) - ax) * ((y[c] as number) - ay) - ((x[c] as number) - ax) * ((y[b] as number) - ay);
+  };
+  for (const nodes of rectangles) {
+    add(nodes[0] as number, nodes[2] as number, nodes[8] as number);
+    add(nodes[0] as number, nodes[8] as number, nodes[6] as number);
+  }
+  for (const nodes of triangles) add(nodes[0] as number, nodes[1] as number, nodes[2] as number);
+  return double / 2;
+}
 
 /**
  * @param plan in the diaphragm's axes
@@ -114,8 +131,14 @@ function numbered(
   const onFloor = new Uint8Array(count);
   for (let t = 0; t < count; t++) {
     const [a, b, c] = [corner(3 * t), corner(3 * t + 1), corner(3 * t + 2)];
-    const cx = ((x[a] as number) + (x[b] as number) + (x[c] as number)) / 3;
-    const cy = ((y[a] as number) + (y[b] as number) + (y[c] as number)) / 3;
+    const [ax, ay] = [x[a] as number, y[a] as number];
+    const [bx, by, ex, ey] = [x[b] as number, y[b] as number, x[c] as number, y[c] as number];
+    const double = Math.abs((bx - ax) * (ey - ay) - (ex - ax) * (by - ay));
+    const longest = Math.max((bx - ax) ** 2 + (by - ay) ** 2, (ex - ax) ** 2 + (ey - ay) ** 2);
+    // Between points that rounding moved off an outer edge lie triangles without area.
+    if (double <= FLAT * longest) continue;
+    const cx = (ax + bx + ex) / 3;
+    const cy = (ay + by + ey) / 3;
     if (floor(cx, cy)) onFloor[t] = 1;
   }
 

@@ -28,19 +28,20 @@ export function integrationPoints(mesh: Mesh): IntegrationPoint[] {
   const { x, y } = mesh;
   const out: IntegrationPoint[] = [];
   const values = STATIONS.map(quadratic);
+  const products = values.flatMap((vy) => values.map((vx) => vy.flatMap((wy) => vx.map((wx) => wx * wy))));
+  const inTriangle = TRIANGLE.map(({ l: [l0 = 0, l1 = 0, l2 = 0] }) => triangleShapes(l0, l1, l2));
   for (const nodes of mesh.rectangles) {
     const [first, last] = [nodes[0] as number, nodes[8] as number];
     const a = (x[last] as number) - (x[first] as number);
     const b = (y[last] as number) - (y[first] as number);
     for (let j = 0; j < 3; j++) {
       for (let i = 0; i < 3; i++) {
-        const [vx, vy] = [values[i] as number[], values[j] as number[]];
         out.push({
           x: (x[first] as number) + a * (STATIONS[i] as number),
           y: (y[first] as number) + b * (STATIONS[j] as number),
           weight: a * b * (WEIGHTS[i] as number) * (WEIGHTS[j] as number),
           nodes,
-          shapes: vy.flatMap((wy) => vx.map((wx) => wx * wy)),
+          shapes: products[3 * j + i] as number[],
         });
       }
     }
@@ -48,14 +49,14 @@ export function integrationPoints(mesh: Mesh): IntegrationPoint[] {
   for (const nodes of mesh.triangles) {
     const c = cornersOf(mesh, nodes);
     const area = ((c.x1 - c.x0) * (c.y2 - c.y0) - (c.x2 - c.x0) * (c.y1 - c.y0)) / 2;
-    for (const { l, weight } of TRIANGLE) {
+    for (const [p, { l, weight }] of TRIANGLE.entries()) {
       const [l0 = 0, l1 = 0, l2 = 0] = l;
       out.push({
         x: l0 * c.x0 + l1 * c.x1 + l2 * c.x2,
         y: l0 * c.y0 + l1 * c.y1 + l2 * c.y2,
         weight: area * weight,
         nodes,
-        shapes: triangleShapes(l0, l1, l2),
+        shapes: inTriangle[p] as number[],
       });
     }
   }
