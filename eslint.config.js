@@ -36,6 +36,8 @@ export default tseslint.config(
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true, allowBoolean: true }],
       '@typescript-eslint/switch-exhaustiveness-check': ['error', { considerDefaultExhaustiveForUnions: true }],
+      // Nest names the options of an application by a class, to be given as a literal.
+      '@typescript-eslint/no-unsafe-class-instance-assignment': 'off',
       eqeqeq: 'error',
       'no-console': 'error',
     },

@@ -1,0 +1,89 @@
+import { Inject, Injectable } from '@nestjs/common';
+import { trace } from '@groundward/engine/path/trace';
+import type { Analysis, Demand } from '@groundward/engine/path/result';
+import type { Trace } from '@groundward/engine/path/trace-result';
+import type { Demand as DemandRow } from '../generated/client.js';
+import { DatabaseService } from '../database/database.service.js';
+import { notFound, Problem } from '../faults/problem.js';
+import { RevisionsService } from '../revisions/revisions.service.js';
+import type { DemandQuery, DemandPage } from './schemas.js';
+
+@Injectable()
+export class AnalysesService {
+  constructor(
+    @Inject(DatabaseService) private readonly database: DatabaseService,
+    @Inject(RevisionsService) private readonly revisions: RevisionsService,
+  ) {}
+
+  /** The analysis as it was stored when its building was saved. */
+  async analysis(userId: string, projectId: string, revisionId: string): Promise<Analysis> {
+    await this.revisions.one(userId, projectId, revisionId);
+    const [stored, rows] = await Promise.all([
+      this.database.prisma.analysis.findUnique({ where: { revisionId } }),
+      this.database.prisma.demand.findMany({ where: { revisionId }, orderBy: { position: 'asc' } }),
+    ]);
+    if (stored === null) throw notFound('analysis');
+    const document = stored.document as unknown as Omit<Analysis, 'demands'>;
+    return { schema: document.schema, units: document.units, demands: rows.map(demandOf), ...rest(document) };
+  }
+
+  /** Demand rows by any of their columns, page by page. */
+  async demands(userId: string, projectId: string, revisionId: string, query: DemandQuery): Promise<DemandPage> {
+    await this.revisions.one(userId, projectId, revisionId);
+    const limit = query.limit ?? 1000;
+    const rows = await this.database.prisma.demand.findMany({
+      where: {
+        revisionId,
+        position: { gt: query.after ?? -1 },
+        ...(query.member === undefined ? {} : { member: query.member }),
+        ...(query.kind === undefined ? {} : { kind: query.kind }),
+        ...(query.quantity === undefined ? {} : { quantity: query.quantity }),
+        ...(query.level === undefined ? {} : { level: query.level }),
+        ...(query.case === undefined ? {} : { case: query.case }),
+        ...(query.sense === undefined ? {} : { sense: Number(query.sense) }),
+        ...(query.combination === undefined
+          ? {}
+          : { combination: query.combination === '' ? null : query.combination }),
+      },
+      orderBy: { position: 'asc' },
+      take: limit + 1,
+    });
+    const page = rows.slice(0, limit);
+    return {
+      demands: page.map(demandOf),
+      next: rows.length > limit ? (page[page.length - 1]?.position ?? null) : null,
+    };
+  }
+
+  /** Up and down from a member, computed on request. */
+  async trace(userId: string, projectId: string, revisionId: string, member: string, caseId: string): Promise<Trace> {
+    const { building } = await this.revisions.building(userId, projectId, revisionId);
+    const result = trace(building, member, caseId);
+    if (result.ok) return result.value;
+    const fault = result.faults[0];
+    throw new Problem(
+      404,
+      fault?.code ?? 'not-found',
+      `Found ${fault?.found ?? member}, expected ${fault?.expected ?? 'a member'}.`,
+    );
+  }
+}
+
+export function demandOf(row: DemandRow): Demand {
+  const demand = {
+    member: row.member,
+    kind: row.kind,
+    quantity: row.quantity,
+    case: row.case,
+    sense: row.sense,
+    value: row.value,
+    unit: row.unit,
+    ...(row.combination === null ? {} : { combination: row.combination }),
+    ...(row.atX === null || row.atY === null ? {} : { at: [row.atX, row.atY] }),
+  };
+  return demand as Demand;
+}
+
+function rest({ diagrams, path, findings, certificate }: Omit<Analysis, 'demands'>) {
+  return { diagrams, path, findings, certificate };
+}

@@ -1,0 +1,2 @@
+/** Names by which the service's parts ask for accounts. */
+export const ACCOUNTS = Symbol('accounts');

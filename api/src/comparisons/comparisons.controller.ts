@@ -1,0 +1,66 @@
+import { Controller, Get, Inject, Param, Query } from '@nestjs/common';
+import { ApiTags } from '@nestjs/swagger';
+import { compare } from '@groundward/engine/compare/compare';
+import type { Comparison } from '@groundward/engine/compare/result';
+import { DemandKind, Quantity, Sense } from '@groundward/engine/path/result';
+import { z } from 'zod';
+import { AnalysesService } from '../analyses/analyses.service.js';
+import { User, type SignedIn } from '../auth/session.guard.js';
+import { Answers, Asks } from '../openapi/decorators.js';
+import { RevisionsService } from '../revisions/revisions.service.js';
+
+const CompareQuery = z.object({ before: z.uuid(), after: z.uuid() });
+
+const ComparisonView = z.object({
+  schema: z.literal('groundward.comparison/1'),
+  edits: z.array(z.object({ id: z.string(), what: z.string(), patch: z.array(z.record(z.string(), z.unknown())) })),
+  changes: z.array(
+    z.object({
+      member: z.string(),
+      kind: DemandKind,
+      quantity: Quantity,
+      case: z.string(),
+      sense: Sense,
+      combination: z.string().optional(),
+      before: z.number().nullable(),
+      after: z.number().nullable(),
+      unit: z.string(),
+      class: z.enum(['added', 'removed', 'moved', 'raised', 'lowered', 'unchanged']),
+      causes: z.array(z.object({ edit: z.string(), share: z.number() })),
+    }),
+  ),
+});
+
+@ApiTags('revisions')
+@Controller('api/projects/:projectId')
+export class ComparisonsController {
+  constructor(
+    @Inject(RevisionsService) private readonly revisions: RevisionsService,
+    @Inject(AnalysesService) private readonly analyses: AnalysesService,
+  ) {}
+
+  @Get('compare')
+  @Asks(CompareQuery)
+  @Answers(200, ComparisonView, [400, 401, 404])
+  async compare(
+    @User() user: SignedIn,
+    @Param('projectId') projectId: string,
+    @Query({ schema: CompareQuery }) query: z.infer<typeof CompareQuery>,
+  ): Promise<Comparison> {
+    const [before, after] = await Promise.all(
+      [query.before, query.after].map((id) => this.revision(user.id, projectId, id)),
+    );
+    return compare(
+      before as Awaited<ReturnType<typeof this.revision>>,
+      after as Awaited<ReturnType<typeof this.revision>>,
+    );
+  }
+
+  private async revision(userId: string, projectId: string, revisionId: string) {
+    const [{ building }, analysis] = await Promise.all([
+      this.revisions.building(userId, projectId, revisionId),
+      this.analyses.analysis(userId, projectId, revisionId),
+    ]);
+    return { building, analysis };
+  }
+}

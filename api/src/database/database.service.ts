@@ -1,0 +1,26 @@
+/** The database: Prisma for the service's tables, the pool beneath it for sign-in and bulk rows. */
+import { Injectable, type OnModuleDestroy } from '@nestjs/common';
+import { PrismaPg } from '@prisma/adapter-pg';
+import pg from 'pg';
+import { PrismaClient } from '../generated/client.js';
+
+@Injectable()
+export class DatabaseService implements OnModuleDestroy {
+  readonly pool: pg.Pool;
+  readonly prisma: PrismaClient;
+
+  constructor(url: string) {
+    this.pool = new pg.Pool({ connectionString: url, max: 10, connectionTimeoutMillis: 5000 });
+    // An idle connection that the server closes is not an error of a request; the pool opens another.
+    this.pool.on('error', () => undefined);
+    this.prisma = new PrismaClient({ adapter: new PrismaPg(this.pool) });
+  }
+
+  async onModuleDestroy(): Promise<void> {
+    await this.prisma.$disconnect();
+    if (!this.pool.ended) await this.pool.end();
+  }
+}
+
+/** What a transaction offers. */
+export type Transaction = Parameters<Parameters<PrismaClient['$transaction']>[0]>[0];
