@@ -4,7 +4,7 @@ import type * as Next from 'next';
 import type { FastifyInstance, FastifyReply, FastifyRequest } from 'fastify';
 
 // Next is a CommonJS module whose types speak of a default export that it has only there.
-const next = createRequire(import.meta.url)('next') as typeof Next.default;
+const next = createRequire(import.meta.url)('next') as typeof Next.default.default;
 
 /** @returns closes it */
 export async function mountDashboard(fastify: FastifyInstance, dir: string): Promise<() => Promise<void>> {
