@@ -18,6 +18,9 @@ const PATIENCE = 60_000;
 /**
  * `ended` resolves when the session ends, for whatever reason.
  * @typedef {{ ended: Promise<void>, release: () => Promise<void> }} Ownership
+ *
+ * What came of a claim: the server is owned now, or another living process owns it, or it ended meanwhile.
+ * @typedef {{ state: 'owned', ownership: Ownership } | { state: 'taken', owner: string } | { state: 'ended' }} Claim
  */
 
 /**
@@ -25,12 +28,12 @@ const PATIENCE = 60_000;
  *
  * @param {import('./postmaster.mjs').Server} server
  * @param {string} password
- * @returns {Promise<Ownership | null>} null when the server ended before it could be owned
- * @throws Fault when another living process owns it, or when it doesn't know the password
+ * @returns {Promise<Claim>}
+ * @throws Fault when the server doesn't accept the password
  */
 export async function claim(server, password) {
   const client = await connectWhenReady(server, password);
-  if (client === null) return null;
+  if (client === null) return { state: 'ended' };
   /** @type {Promise<void>} */
   const ended = new Promise((resolve) => client.once('end', () => resolve()));
   // The end of the session is told by `ended`; its cause stands in the server's log.
@@ -39,13 +42,13 @@ export async function claim(server, password) {
   const deadline = Date.now() + GRACE;
   for (;;) {
     const { rows } = await client.query('select pg_try_advisory_lock($1) as owned', [KEY]);
-    if (rows[0].owned === true) return { ended, release };
+    if (rows[0].owned === true) return { state: 'owned', ownership: { ended, release } };
     if (Date.now() > deadline) break;
     await pause(50);
   }
   const owner = await ownerOf(client);
   await release();
-  throw new Fault(`Another Groundward${owner} is already using the database in this folder.`);
+  return { state: 'taken', owner };
 }
 
 /**
@@ -69,7 +72,10 @@ async function connectWhenReady(server, password) {
   }
 }
 
-/** @param {import('pg').Client} client */
+/**
+ * @param {import('pg').Client} client
+ * @returns {Promise<string>} in words, with its process id where it is known
+ */
 async function ownerOf(client) {
   const { rows } = await client.query(
     `select a.application_name as name from pg_locks l join pg_stat_activity a using (pid)
@@ -77,5 +83,5 @@ async function ownerOf(client) {
     [KEY],
   );
   const pid = /^groundward (\d+)$/.exec(rows[0]?.name ?? '')?.[1];
-  return pid === undefined ? '' : ` (process ${pid})`;
+  return pid === undefined ? 'Another Groundward' : `Another Groundward (process ${pid})`;
 }

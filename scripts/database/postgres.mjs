@@ -92,15 +92,16 @@ async function startOwned({ home, binaries, cluster, ephemeral }) {
     let reason = 'a server of an earlier run neither answers nor ends';
     if (running === null) {
       const launched = await launch({ home, binaries, cluster, ephemeral, port: await freePort() });
-      const ownership = launched.server === null ? null : await claim(launched.server, cluster.password);
+      const ownership = launched.server === null ? null : await own(launched.server, cluster.password);
       if (launched.server !== null && ownership !== null) return { server: launched.server, ownership };
       reason = launched.reason;
     } else {
-      const ownership = await claim(running, cluster.password);
-      if (ownership !== null) {
+      const claimed = await claim(running, cluster.password);
+      refuseTaken(claimed);
+      if (claimed.state === 'owned') {
         // Nobody owned it: left behind by a process that was killed.
         await stopServer(running.pid);
-        await ownership.release();
+        await claimed.ownership.release();
       }
     }
     if (Date.now() > deadline) {
@@ -108,4 +109,26 @@ async function startOwned({ home, binaries, cluster, ephemeral }) {
     }
     await pause(100);
   }
+}
+
+/**
+ * Claims a server that this process has just launched, and ends it where that can't be done.
+ *
+ * @param {import('./postmaster.mjs').Server} server
+ * @param {string} password
+ * @returns {Promise<import('./ownership.mjs').Ownership | null>} null when it ended meanwhile
+ */
+async function own(server, password) {
+  const claimed = await claim(server, password).catch(async (error) => {
+    await stopServer(server.pid);
+    throw error;
+  });
+  refuseTaken(claimed);
+  return claimed.state === 'owned' ? claimed.ownership : null;
+}
+
+/** @param {import('./ownership.mjs').Claim} claimed */
+function refuseTaken(claimed) {
+  if (claimed.state !== 'taken') return;
+  throw new Fault(`${claimed.owner} is already using the database in this folder.`);
 }

@@ -178,6 +178,7 @@ describe('a broken database is told in one sentence', () => {
     await makeDatabase();
     await writeFile(join(dataDir, 'password'), 'another');
     await expect(startPostgres({ dataDir })).rejects.toThrow('does not accept the password');
+    await expect(postmasterPid()).rejects.toThrow('ENOENT');
   });
 });
 
