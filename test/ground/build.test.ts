@@ -1,10 +1,11 @@
-import { mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
+import { chmod, mkdir, mkdtemp, rm, writeFile } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { dirname, join } from 'node:path';
 import { afterEach, beforeEach, describe, expect, test } from 'vitest';
 import { fingerprint } from '../../scripts/build/fingerprint.mjs';
 import { isInstalled } from '../../scripts/build/install.mjs';
 import { alone } from '../../scripts/build/lock.mjs';
+import { findChromium } from '../../scripts/test/chromium.mjs';
 import { tallyOf } from '../../scripts/test/vitest.mjs';
 
 let folder: string;
@@ -110,6 +111,31 @@ describe('the lock of a build', () => {
     const lock = join(folder, 'lock');
     await expect(alone(lock, () => Promise.reject(new Error('no')))).rejects.toThrow('no');
     expect(await alone(lock, () => Promise.resolve('done'))).toBe('done');
+  });
+});
+
+describe('the browser for the tests', () => {
+  async function program(path: string, exitCode: number): Promise<string> {
+    await write(path, `#!/bin/sh\nexit ${exitCode}\n`);
+    await chmod(join(folder, path), 0o755);
+    return join(folder, path);
+  }
+
+  test('is the one that CHROMIUM_PATH names, and no other', async () => {
+    const named = await program('mine', 0);
+    expect(findChromium({ CHROMIUM_PATH: named }).path).toBe(named);
+    const missing = join(folder, 'missing');
+    expect(findChromium({ CHROMIUM_PATH: missing, PATH: process.env['PATH'] })).toEqual({
+      path: null,
+      looked: [missing],
+    });
+  });
+
+  test('is the first along the PATH that starts: a stub does not', async () => {
+    await program('stubs/chromium', 1);
+    const real = await program('real/google-chrome', 0);
+    const path = ['stubs', 'real'].map((name) => join(folder, name)).join(':');
+    expect(findChromium({ PATH: path }).path).toBe(real);
   });
 });
 
