@@ -2,7 +2,7 @@ import { setTimeout as pause } from 'node:timers/promises';
 import { placeBinaries } from './binaries.mjs';
 import { ensureCluster } from './cluster.mjs';
 import { ensureDatabase } from './client.mjs';
-import { Fault } from '../fault.mjs';
+import { Fault, hasCode } from '../fault.mjs';
 import { ephemeralHome, findHome } from './home.mjs';
 import { freePort } from './port.mjs';
 import { postmasterOf } from './postmaster.mjs';
@@ -46,7 +46,8 @@ export async function startPostgres({ dataDir, ephemeral = false, progress = () 
     return await serve(server, ownership, cluster, watchdog);
   } catch (error) {
     await watchdog?.finish();
-    throw error;
+    if (!(error instanceof Error) || !hasCode(error, 'EACCES', 'EPERM', 'EROFS', 'ENOSPC')) throw error;
+    throw new Fault(`The database in ${home.folder} cannot be started: ${error.message}.`);
   }
 }
 

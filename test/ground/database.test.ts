@@ -9,6 +9,10 @@ import { type Holder, holdDatabase } from './holder.js';
 
 const asRoot = process.getuid?.() === 0;
 
+/** What differs for root and for other users: each run tests its own part. */
+const rootTest = (name: string, body: () => Promise<void>) => (asRoot ? test(name, body) : undefined);
+const userTest = (name: string, body: () => Promise<void>) => (asRoot ? undefined : test(name, body));
+
 let parent: string;
 let dataDir: string;
 /** What a test leaves running: ended before its folder is removed. */
@@ -168,6 +172,13 @@ describe('a broken database is told in one sentence', () => {
     );
   });
 
+  userTest('a folder that may not be written to', async () => {
+    await mkdir(dataDir, { mode: 0o500 });
+    await expect(startPostgres({ dataDir })).rejects.toThrow(
+      /^The database in .+ cannot be started: EACCES: permission denied.+\.$/,
+    );
+  });
+
   test('a lost password', async () => {
     await makeDatabase();
     await rm(join(dataDir, 'password'));
@@ -212,7 +223,7 @@ describe('an ephemeral database', () => {
   });
 });
 
-test.runIf(asRoot)('root keeps the database where the user who runs it can reach it', async () => {
+rootTest('root keeps the database where the user who runs it can reach it', async () => {
   await chmod(parent, 0o700);
   const lines: string[] = [];
   const first = await startPostgres({ dataDir, progress: (line) => lines.push(line) });
@@ -226,7 +237,7 @@ test.runIf(asRoot)('root keeps the database where the user who runs it can reach
   expect(await query(await open(), 'select value from kept')).toEqual([{ value: 7 }]);
 });
 
-test.runIf(asRoot)('as root the server runs as another user', async () => {
+rootTest('as root the server runs as another user', async () => {
   await open();
   expect((await stat(`/proc/${await postmasterPid()}`)).uid).not.toBe(0);
 });
