@@ -163,7 +163,12 @@ describe('a building with semi-rigid floors', () => {
     expect(certificate.worstResidual).toBeLessThan(1e-9);
     expect(certificate.checks.map((check) => check.what)).toContain('membrane: forces on nodes');
     const codes = new Set(findings.map((finding) => finding.code));
-    for (const code of ['axial-stiffness-assumed', 'mesh-size-assumed', 'diaphragm-classification'])
+    for (const code of [
+      'axial-stiffness-assumed',
+      'mesh-size-assumed',
+      'diaphragm-deflection',
+      'diaphragm-against-rigid',
+    ])
       expect(codes).toContain(code);
     for (const quantity of ['drift', 'deflection', 'deflection-ratio', 'torsional-ratio'])
       expect(demands.some((d) => d.member === 'L3' && d.quantity === quantity)).toBe(true);
@@ -192,6 +197,8 @@ describe('a building with semi-rigid floors', () => {
     }
     expect(valueOf(stiff, 'L3', 'drift')).toBeCloseTo(valueOf(rigid, 'L3', 'drift'), 6);
     expect(valueOf(stiff, 'L3', 'deflection-ratio')).toBeLessThan(1e-4);
+    for (const finding of stiff.findings.filter((each) => each.code === 'diaphragm-against-rigid'))
+      expect(finding.numbers?.['over']).toBeLessThan(1e-4);
   });
 
   test('a softer floor bows out more and takes more to the walls beside the load', () => {

@@ -1,4 +1,5 @@
 /** One floor on wall lines, for the laws of semi-rigid diaphragms. */
+import { expect } from 'vitest';
 import { Building, type Point, type Ring } from '@groundward/engine/building/definition';
 import type { DiaphragmModel } from '@groundward/engine/diaphragms/diaphragm';
 import { cutOf } from '@groundward/engine/diaphragms/inner-forces';
@@ -80,9 +81,10 @@ export function solveFloor(
   const above = model.lines.find((line) => line.line.id === 'above');
   const taken = new Map<LineModel, Float64Array>();
   if (above !== undefined) taken.set(above, Float64Array.of(1));
-  const outcome = throughSemiRigid(semiRigidBody(membrane), inertia, Float64Array.of(levelForce), taken);
+  const body = semiRigidBody(membrane);
+  const outcome = throughSemiRigid(body, inertia, Float64Array.of(levelForce), taken);
   const given = Object.fromEntries([...outcome.given].map(([line, force]) => [line.line.id, force[0] as number]));
-  return { model, diaphragm, frame, rigid, membrane, inertia, outcome, given };
+  return { model, diaphragm, frame, rigid, membrane, body, inertia, outcome, given };
 }
 
 /** The plan turned about the origin by an angle [degrees]. */
@@ -211,3 +213,26 @@ export const skewFloor: Floor = {
   ],
   direction: 90,
 };
+
+/** All forces on the floor along x and y, and their moment about the origin, add up to nothing. */
+export function expectEquilibrium(solved: ReturnType<typeof solveFloor>): void {
+  const { membrane, outcome, inertia, model, frame } = solved;
+  const t = model.frames[frame]?.t as Point;
+  const s = model.frames[frame]?.s as Point;
+  const moment = ([x, y]: Point, [fx, fy]: Point): number => x * fy - y * fx;
+  let [fx, fy, m] = [t[0], t[1], moment([s[0] * inertia.centre, s[1] * inertia.centre], t)];
+  const above = membrane.lines.find(({ line }) => line.line.id === 'above')?.line;
+  if (above !== undefined) {
+    fx += above.along[0];
+    fy += above.along[1];
+    m += moment(above.line.axis[0], above.along);
+  }
+  for (const [line, force] of outcome.given) {
+    fx -= (force[0] as number) * line.along[0];
+    fy -= (force[0] as number) * line.along[1];
+    m -= (force[0] as number) * moment(line.line.axis[0], line.along);
+  }
+  expect(Math.abs(fx)).toBeLessThan(1e-11);
+  expect(Math.abs(fy)).toBeLessThan(1e-11);
+  expect(Math.abs(m)).toBeLessThan(1e-11 * model.extent);
+}

@@ -3,6 +3,7 @@ import type { Point } from '@groundward/engine/building/definition';
 import { springForce } from '@groundward/engine/diaphragms/rigid';
 import {
   across,
+  expectEquilibrium,
   gauss,
   lengthwise,
   rectangle,
@@ -24,28 +25,6 @@ const threeWalls = (k: number): Floor => ({
   ],
   direction: 90,
 });
-
-function expectEquilibrium(solved: ReturnType<typeof solveFloor>): void {
-  const { membrane, outcome, inertia, model, frame } = solved;
-  const t = model.frames[frame]?.t as Point;
-  const s = model.frames[frame]?.s as Point;
-  const moment = ([x, y]: Point, [fx, fy]: Point): number => x * fy - y * fx;
-  let [fx, fy, m] = [t[0], t[1], moment([s[0] * inertia.centre, s[1] * inertia.centre], t)];
-  const above = membrane.lines.find(({ line }) => line.line.id === 'above')?.line;
-  if (above !== undefined) {
-    fx += above.along[0];
-    fy += above.along[1];
-    m += moment(above.line.axis[0], above.along);
-  }
-  for (const [line, force] of outcome.given) {
-    fx -= (force[0] as number) * line.along[0];
-    fy -= (force[0] as number) * line.along[1];
-    m -= (force[0] as number) * moment(line.line.axis[0], line.along);
-  }
-  expect(Math.abs(fx)).toBeLessThan(1e-11);
-  expect(Math.abs(fy)).toBeLessThan(1e-11);
-  expect(Math.abs(m)).toBeLessThan(1e-11 * model.extent);
-}
 
 describe('limits of a semi-rigid diaphragm', () => {
   test('G·t → ∞ gives the rigid answer', () => {

@@ -46,7 +46,7 @@ export function meetingFaults(building: Building): Fault[] {
           path: diaphragm.path,
           found: `diaphragm ${diaphragm.key} without a wall line along ${loadCase.direction}° in the storey under it, for load case ${loadCase.id} (loadCases[${c}])`,
           expected:
-            diaphragm.behaviour === 'rigid'
+            diaphragm.behaviour === 'rigid' || diaphragm.behaviour === 'semi-rigid'
               ? 'wall lines with resistance along the load'
               : 'two or more wall lines parallel to the load',
         });

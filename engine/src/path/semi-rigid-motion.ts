@@ -16,7 +16,7 @@ export function semiRigidMotion(outcome: DiaphragmOutcome, frame: number): Motio
     }, 0);
     return { ...support, moves };
   });
-  return motionOf(membrane, displacement, frame, supports);
+  return motionOf(membrane, displacement, frame, supports, outcome.rigid?.motion[0] ?? [0, 0, 0]);
 }
 
 /** The span that bows out most against the drift of its walls. */

@@ -30,7 +30,10 @@ export type MembraneModel = {
   readonly axes: Axes;
   readonly mesh: Mesh;
   readonly lines: readonly MeshLine[];
+  /** Membrane, chords and walls. */
   readonly elements: readonly ElementStiffness[];
+  /** The walls alone. */
+  readonly springs: readonly ElementStiffness[];
   readonly factor: Factor;
   readonly sheet: Sheet;
   /** E·A of the chords along outline and openings [force]; 0 without. */
@@ -48,7 +51,7 @@ export const AXIAL_WITH_CHORDS = 2;
 /** The default mesh has this many rectangles on a square floor. */
 const DEFAULT_RECTANGLES = 256;
 const MOST_NODES = 100_000;
-/** A mesh covers the floor to within this part of its area. */
+/** A mesh covers the floor, and each wall line its cut, to within this part. */
 const COVERED = 1e-6;
 
 export type Stiffnesses = {
@@ -121,22 +124,20 @@ export function membraneModel(
   const lines = touching.map((line, i): MeshLine => {
     const stretches = mesh.lines[i] as readonly Int32Array[];
     const storey: StoreyModel | undefined = line.storeys[diaphragm.level];
-    if (stretches.length === 0) throw new Refusal([noMesh(diaphragm)]);
-    return {
-      line,
-      along: turned(axes, line.along),
-      stretches,
-      length: stretches.reduce((sum, stretch) => sum + lengthOf(mesh, stretch), 0),
-      k: storey?.stiffness ?? 0,
-    };
+    const length = stretches.reduce((sum, stretch) => sum + lengthOf(mesh, stretch), 0);
+    const cut = totalLength(intervals[i] as readonly Interval[]);
+    if (Math.abs(length - cut) > COVERED * cut) throw new Refusal([noMesh(diaphragm)]);
+    return { line, along: turned(axes, line.along), stretches, length, k: storey?.stiffness ?? 0 };
   });
   const chord = stiffnesses.chord ?? 0;
   const axial = stiffnesses.axial ?? stiffnesses.shear * (chord > 0 ? AXIAL_WITH_CHORDS : AXIAL_OVER_SHEAR);
   const sheet = { axial, shear: stiffnesses.shear };
   const elements = membraneElements(mesh, sheet);
   if (chord > 0) elements.push(...stretchElements(mesh, mesh.border, 'bar', chord));
-  for (const { stretches, k, length, along } of lines)
-    if (k > 0) elements.push(...stretchElements(mesh, stretches, 'spring', k / length, along));
+  const springs = lines.flatMap(({ stretches, k, length, along }) =>
+    k > 0 ? stretchElements(mesh, stretches, 'spring', k / length, along) : [],
+  );
+  elements.push(...springs);
   const factor = factorise(elements, mesh.x.length);
   if (factor === undefined) throw new Refusal([singular(diaphragm)]);
   return {
@@ -146,6 +147,7 @@ export function membraneModel(
     mesh,
     lines,
     elements,
+    springs,
     factor,
     sheet,
     chord,

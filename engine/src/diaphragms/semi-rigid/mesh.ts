@@ -1,7 +1,7 @@
 /** The finite element mesh of a diaphragm: rectangles of nine nodes on the grid, triangles of six where edges run askew. */
-import Delaunator from 'delaunator';
 import type { Point, Ring } from '../../building/definition.js';
 import type { Segment } from './arrangement.js';
+import { constrainedTriangulation, type Triangulation } from './constrain.js';
 import { cornersOf, inRing, type Corners } from './points.js';
 
 export type Mesh = {
@@ -26,8 +26,6 @@ export type Plan = {
   readonly lines: readonly (readonly Segment[])[];
 };
 
-/** How often a mesh may be made again with more points on edges that the triangulation missed. */
-const ROUNDS = 40;
 /** Triangles flatter than this have no area. */
 const FLAT = 1e-7;
 
@@ -58,74 +56,36 @@ export function meshOf(plan: Plan, extent: number, size: number): Mesh | undefin
   const border = rings.flatMap(sidesOf);
   const walls = plan.lines.flat();
   const corners = cornersOf([...border, ...walls, ...plan.zones.flatMap(sidesOf)], extent, size, floor);
-  const triangulation = triangulate(corners);
+  const edges = new Map<number, [number, number]>();
+  for (const chain of corners.chains) {
+    for (let i = 0; i + 1 < chain.length; i++) {
+      const [a, b] = [chain[i] as number, chain[i + 1] as number];
+      edges.set(sideKey(a, b, corners.x.length), [a, b]);
+    }
+  }
+  const triangulation = constrainedTriangulation(corners.x, corners.y, [...edges.values()]);
   if (triangulation === undefined) return undefined;
-  return numbered(corners, triangulation, floor, border.length, plan.lines);
+  return numbered(corners, triangulation, new Set(edges.keys()), floor, border.length, plan.lines);
 }
 
 function sidesOf(ring: Ring): Segment[] {
   return ring.map((a, i) => ({ a, b: ring[(i + 1) % ring.length] as Point }));
 }
 
-/** Delaunay's triangulation, with further points on edges that it misses until it has them all. */
-function triangulate(corners: Corners): Delaunator<Float64Array> | undefined {
-  const { x, y, chains, snap } = corners;
-  for (let round = 0; round < ROUNDS; round++) {
-    const places = new Float64Array(2 * x.length);
-    for (let i = 0; i < x.length; i++) {
-      places[2 * i] = x[i] as number;
-      places[2 * i + 1] = y[i] as number;
-    }
-    const triangulation = new Delaunator(places);
-    const present = sidesPresent(triangulation, x.length);
-    const split = new Map<number, number>();
-    for (const chain of chains) {
-      for (let i = 0; i + 1 < chain.length; i++) {
-        const a = chain[i] as number;
-        const b = chain[i + 1] as number;
-        const key = sideKey(a, b, places.length);
-        if (present.has(key)) continue;
-        let middle = split.get(key);
-        if (middle === undefined) {
-          middle = x.length;
-          x.push(snap(((x[a] as number) + (x[b] as number)) / 2));
-          y.push(snap(((y[a] as number) + (y[b] as number)) / 2));
-          split.set(key, middle);
-        }
-        chain.splice(i + 1, 0, middle);
-        i += 1;
-      }
-    }
-    if (split.size === 0) return triangulation;
-  }
-  return undefined;
-}
-
 function sideKey(a: number, b: number, n: number): number {
   return a < b ? a * n + b : b * n + a;
-}
-
-function sidesPresent({ triangles }: Delaunator<Float64Array>, n: number): Set<number> {
-  const present = new Set<number>();
-  for (let e = 0; e < triangles.length; e++) {
-    const next = e % 3 === 2 ? e - 2 : e + 1;
-    present.add(sideKey(triangles[e] as number, triangles[next] as number, 2 * n));
-  }
-  return present;
 }
 
 /** Triangles on the floor, pairs that make up a rectangle joined, middle nodes added. */
 function numbered(
   { x, y, chains }: Corners,
-  { triangles, halfedges }: Delaunator<Float64Array>,
+  { triangles, halfedges }: Triangulation,
+  kept: ReadonlySet<number>,
   floor: (x: number, y: number) => boolean,
   borderSegments: number,
   lines: readonly (readonly Segment[])[],
 ): Mesh {
   const n = x.length;
-  const kept = new Set<number>();
-  for (const chain of chains)
-    for (let i = 0; i + 1 < chain.length; i++) kept.add(sideKey(chain[i] as number, chain[i + 1] as number, n));
   const corner = (e: number): number => triangles[e] as number;
   const count = triangles.length / 3;
   const onFloor = new Uint8Array(count);

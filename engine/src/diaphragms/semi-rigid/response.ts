@@ -17,52 +17,61 @@ export type Response = {
 };
 
 /**
- * Solves for one load, improves the solution by one step of iterative refinement, and takes what is left of its three rigid motions
- * out by the walls' own stiffness, so that the walls carry the load to the last digits whatever the membrane's stiffness.
+ * Solves for one load as the motion of a rigid floor and what the membrane's deformation adds, so that a stiff membrane costs no digits.
+ * The deformation is improved by one step of iterative refinement, and what is left of its three rigid motions is taken out by the
+ * walls' own stiffness: the walls carry the load to the last digits.
  *
  * @param load F_x, F_y of every node in the diaphragm's axes [force]
  * @param resultant of the load: F_x, F_y on plan [force], moment about the rigid model's origin [force·length]
  */
 export function responseTo(model: MembraneModel, load: Float64Array, resultant: Vector3): Response {
-  const u = solve(model.factor, load);
-  const correction = solve(model.factor, left(model, load, u));
-  for (let i = 0; i < u.length; i++) u[i] = (u[i] as number) + (correction[i] as number);
-  removeRigidResidual(model, u, resultant);
-  const most = (of: Float64Array): number => of.reduce((size, value) => Math.max(size, Math.abs(value)), 0);
+  const asRigid = rigidMotion(model, displacementOf(model.rigid, resultant));
+  const rest = difference(load, times(model.springs, asRigid));
+  const u = solve(model.factor, rest);
+  add(u, solve(model.factor, difference(rest, times(model.elements, u))));
+  removeRigidResidual(model, asRigid, u, resultant);
+  const left = difference(rest, times(model.elements, u));
   const whole = load.reduce((sum, value) => sum + Math.abs(value), 0);
-  return {
-    displacement: u,
-    given: Float64Array.from(model.lines, (line) => forceInto(model, line, u)),
-    residual: whole === 0 ? 0 : most(left(model, load, u)) / whole,
-  };
+  const given = Float64Array.from(model.lines, (line) => forceInto(model, line, asRigid) + forceInto(model, line, u));
+  add(u, asRigid);
+  const most = left.reduce((size, value) => Math.max(size, Math.abs(value)), 0);
+  return { displacement: u, given, residual: whole === 0 ? 0 : most / whole };
 }
 
-/** f − K·u */
-function left({ elements }: MembraneModel, load: Float64Array, u: Float64Array): Float64Array {
-  const rest = times(elements, u);
-  for (let i = 0; i < rest.length; i++) rest[i] = (load[i] as number) - (rest[i] as number);
-  return rest;
+function difference(a: Float64Array, b: Float64Array): Float64Array {
+  return a.map((value, i) => value - (b[i] as number));
 }
 
-function removeRigidResidual(model: MembraneModel, u: Float64Array, resultant: Vector3): void {
-  const { rigid, axes, mesh } = model;
+function add(to: Float64Array, other: Float64Array): void {
+  for (let i = 0; i < to.length; i++) to[i] = (to[i] as number) + (other[i] as number);
+}
+
+/** Displacements of the nodes under a motion on plan about the rigid model's origin. */
+function rigidMotion({ rigid, axes, mesh }: MembraneModel, [dx, dy, turn]: Vector3): Float64Array {
+  const ux = dx * axes.x[0] + dy * axes.x[1];
+  const uy = dx * axes.y[0] + dy * axes.y[1];
+  const origin = toLocal(axes, rigid.origin);
+  const u = new Float64Array(2 * mesh.x.length);
+  for (let n = 0; n < mesh.x.length; n++) {
+    u[2 * n] = ux - turn * ((mesh.y[n] as number) - origin[1]);
+    u[2 * n + 1] = uy + turn * ((mesh.x[n] as number) - origin[0]);
+  }
+  return u;
+}
+
+/** Moves the floor as a body until the walls carry the whole load. */
+function removeRigidResidual(model: MembraneModel, asRigid: Float64Array, u: Float64Array, resultant: Vector3): void {
+  const { rigid } = model;
   let [fx, fy, moment] = resultant;
-  for (const line of model.lines) {
-    if (line.k === 0) continue;
-    const force = forceInto(model, line, u);
-    const a = rigid.springs.find((spring) => spring.line === line.line)?.a ?? [0, 0, 0];
+  for (const { a, line } of rigid.springs) {
+    const meshLine = model.lines.find((candidate) => candidate.line === line);
+    if (meshLine === undefined) continue;
+    const force = forceInto(model, meshLine, asRigid) + forceInto(model, meshLine, u);
     fx -= force * a[0];
     fy -= force * a[1];
     moment -= force * a[2];
   }
-  const [dx, dy, turn] = displacementOf(rigid, [fx, fy, moment]);
-  const ux = dx * axes.x[0] + dy * axes.x[1];
-  const uy = dx * axes.y[0] + dy * axes.y[1];
-  const origin = toLocal(axes, rigid.origin);
-  for (let n = 0; n < mesh.x.length; n++) {
-    u[2 * n] = (u[2 * n] as number) + ux - turn * ((mesh.y[n] as number) - origin[1]);
-    u[2 * n + 1] = (u[2 * n + 1] as number) + uy + turn * ((mesh.x[n] as number) - origin[0]);
-  }
+  add(u, rigidMotion(model, displacementOf(rigid, [fx, fy, moment])));
 }
 
 /** Stiffness of the line times the mean of the displacement along it. */
