@@ -224,28 +224,37 @@ function factorFront(a: Float64Array, size: number, eliminated: number): boolean
 export function solve({ unknowns, fronts }: Factor, f: Float64Array): Float64Array {
   const u = Float64Array.from(f);
   if (u.length !== unknowns) throw new RangeError(`a load of ${u.length} numbers on ${unknowns} unknowns`);
+  const own = new Float64Array(fronts.reduce((most, front) => Math.max(most, front.eliminated), 0));
   for (const { unknowns: of, eliminated, rows } of fronts) {
-    for (let i = 0; i < of.length; i++) {
+    for (let i = 0; i < eliminated; i++) {
       const row = i * eliminated;
-      const last = i < eliminated ? i : eliminated;
       let sum = u[of[i] as number] as number;
-      for (let k = 0; k < last; k++) sum -= (rows[row + k] as number) * (u[of[k] as number] as number);
-      u[of[i] as number] = i < eliminated ? sum / (rows[row + i] as number) : sum;
+      for (let k = 0; k < i; k++) sum -= (rows[row + k] as number) * (own[k] as number);
+      own[i] = sum / (rows[row + i] as number);
+      u[of[i] as number] = own[i] as number;
+    }
+    for (let i = eliminated; i < of.length; i++) {
+      const row = i * eliminated;
+      let sum = 0;
+      for (let k = 0; k < eliminated; k++) sum += (rows[row + k] as number) * (own[k] as number);
+      u[of[i] as number] = (u[of[i] as number] as number) - sum;
     }
   }
   for (let f = fronts.length - 1; f >= 0; f--) {
     const { unknowns: of, eliminated, rows } = fronts[f] as Front;
-    for (let i = of.length - 1; i >= 0; i--) {
+    for (let k = 0; k < eliminated; k++) own[k] = u[of[k] as number] as number;
+    for (let i = of.length - 1; i >= eliminated; i--) {
       const row = i * eliminated;
-      const at = of[i] as number;
-      if (i < eliminated) u[at] = (u[at] as number) / (rows[row + i] as number);
-      const value = u[at] as number;
-      const last = i < eliminated ? i : eliminated;
-      for (let k = 0; k < last; k++) {
-        const to = of[k] as number;
-        u[to] = (u[to] as number) - (rows[row + k] as number) * value;
-      }
+      const value = u[of[i] as number] as number;
+      for (let k = 0; k < eliminated; k++) own[k] = (own[k] as number) - (rows[row + k] as number) * value;
     }
+    for (let i = eliminated - 1; i >= 0; i--) {
+      const row = i * eliminated;
+      const value = (own[i] as number) / (rows[row + i] as number);
+      own[i] = value;
+      for (let k = 0; k < i; k++) own[k] = (own[k] as number) - (rows[row + k] as number) * value;
+    }
+    for (let k = 0; k < eliminated; k++) u[of[k] as number] = own[k] as number;
   }
   return u;
 }

@@ -1,4 +1,5 @@
 /** One semi-rigid level: what arrives from the walls above and the level's inertia, through the membrane, into the walls below. */
+import type { Profile } from '../../geometry/profile.js';
 import type { Vector3 } from '../../statics/small-matrix.js';
 import type { LineModel } from '../../walls/wall-line.js';
 import type { Inertia } from '../inertia.js';
@@ -44,7 +45,8 @@ export function throughSemiRigid(
     .filter(([, values]) => values.some((value) => value !== 0))
     .map(([line, values]) => ({ unit: ofLine(body, line), values }));
   if (inertia.share > 0 && force.some((value) => value !== 0)) {
-    sources.push({ unit: ofInertia(body, inertia), values: force });
+    for (const { unit, part } of ofInertia(body, inertia))
+      sources.push({ unit, values: force.map((value) => value * part) });
   }
   const held = model.lines.filter((line) => line.k > 0);
   const given = new Map(held.map(({ line }) => [line, new Float64Array(channels)]));
@@ -73,9 +75,22 @@ function ofLine(body: SemiRigidBody, line: LineModel): UnitResponse {
   return solvedOnce(body, line, () => alongLine(body.model, line));
 }
 
-function ofInertia(body: SemiRigidBody, inertia: Inertia): UnitResponse {
-  const key = `${inertia.frame} ${inertia.spread} ${inertia.perUnit} ${inertia.offset}`;
-  return solvedOnce(body, key, () => inertiaLoad(body.model, inertia));
+/** Linear in the eccentricity: that without and that with one of the whole width, in parts that add up to 1. */
+function ofInertia(body: SemiRigidBody, inertia: Inertia): { unit: UnitResponse; part: number }[] {
+  const profile = inertia.diaphragm.profiles[inertia.frame] as Profile;
+  const width = profile.to - profile.from;
+  const centre = inertia.centre - inertia.offset;
+  const key = `${inertia.frame} ${inertia.spread} ${inertia.perUnit}`;
+  const at = (offset: number): UnitResponse =>
+    solvedOnce(body, `${key} ${offset === 0 ? 'centred' : 'shifted'}`, () =>
+      inertiaLoad(body.model, { ...inertia, offset, centre: centre + offset }),
+    );
+  if (inertia.offset === 0) return [{ unit: at(0), part: 1 }];
+  const part = inertia.offset / width;
+  return [
+    { unit: at(0), part: 1 - part },
+    { unit: at(width), part },
+  ];
 }
 
 function solvedOnce(
