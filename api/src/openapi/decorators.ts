@@ -1,18 +1,16 @@
 /** OpenAPI from the same zod schemas that check requests and describe answers. */
 import { applyDecorators } from '@nestjs/common';
 import { ApiBody, ApiHeader, ApiQuery, ApiResponse, type OpenAPIObject } from '@nestjs/swagger';
-import { z } from 'zod';
+import { jsonSchemaOf } from '@groundward/engine/building/json-schema';
+import type { z } from 'zod';
 import { ProblemDocument } from '../faults/problem.js';
 
 type SchemaObject = Exclude<NonNullable<NonNullable<OpenAPIObject['components']>['schemas']>[string], { $ref: string }>;
 
 export function jsonSchema(schema: z.ZodType): SchemaObject {
-  const made: Record<string, unknown> = { ...z.toJSONSchema(schema, { unrepresentable: 'any', io: 'input' }) };
-  // Not in place inside an OpenAPI document: it has its own dialect, and ids would be taken for addresses.
-  delete made['$schema'];
-  delete made['$id'];
-  delete made['id'];
-  return made;
+  // An OpenAPI document has its own dialect, and addresses of its own.
+  const { $schema: _dialect, $id: _address, id: _id, ...body } = jsonSchemaOf(schema);
+  return body;
 }
 
 /** What a route answers when it is done, and the statuses of its problems. */

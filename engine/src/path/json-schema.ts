@@ -1,7 +1,7 @@
 /** The published JSON Schema of an analysis, made from its definition. */
-import { z } from 'zod';
+import { jsonSchemaOf } from '../building/json-schema.js';
 import { Analysis } from './result.js';
 
 export function analysisSchema(): Record<string, unknown> {
-  return { ...z.toJSONSchema(Analysis) };
+  return jsonSchemaOf(Analysis);
 }

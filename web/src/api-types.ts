@@ -1,0 +1,4297 @@
+export interface paths {
+    "/api/me": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["AuthController_me"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/owner": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["AuthController_owner"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/invitations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["AuthController_invitation"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/health": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["HealthController_health"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["ProjectsController_list"];
+        put?: never;
+        post: operations["ProjectsController_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["ProjectsController_detail"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch: operations["ProjectsController_rename"];
+        trace?: never;
+    };
+    "/api/projects/{projectId}/members": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["ProjectsController_addMember"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/members/{userId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete: operations["ProjectsController_removeMember"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["RevisionsController_list"];
+        put?: never;
+        post: operations["RevisionsController_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["RevisionsController_one"];
+        put?: never;
+        post?: never;
+        delete: operations["RevisionsController_remove"];
+        options?: never;
+        head?: never;
+        patch: operations["RevisionsController_rename"];
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/building": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["RevisionsController_building"];
+        put: operations["RevisionsController_save"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/issue": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post: operations["RevisionsController_issue"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/analysis": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["AnalysesController_analysis"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/demands": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["AnalysesController_demands"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/trace": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["AnalysesController_trace"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/foundation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["FoundationController_demands"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/revisions/{revisionId}/foundation.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["FoundationController_csv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/compare": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["ComparisonsController_compare"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/projects/{projectId}/history": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["HistoryController_of"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+}
+export type webhooks = Record<string, never>;
+export interface components {
+    schemas: never;
+    responses: never;
+    parameters: never;
+    requestBodies: never;
+    headers: never;
+    pathItems: never;
+}
+export type $defs = Record<string, never>;
+export interface operations {
+    AuthController_me: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        id: string;
+                        name: string;
+                        email: string;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AuthController_owner: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    token: string;
+                    name: string;
+                    /** Format: email */
+                    email: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        ok: true;
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            410: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AuthController_invitation: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    token: string;
+                    name: string;
+                    password: string;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        ok: true;
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            410: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    HealthController_health: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        status: "ok";
+                        /** @constant */
+                        database: "ok";
+                        version: string;
+                    };
+                };
+            };
+            /** @description Problem */
+            503: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ProjectsController_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        name: string;
+                        /** @enum {string} */
+                        role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        /** Format: date-time */
+                        updatedAt: string;
+                        latest: {
+                            /** Format: uuid */
+                            id: string;
+                            number: number;
+                            name: string;
+                            /** @enum {string} */
+                            state: "draft" | "issued";
+                        } | null;
+                    }[];
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ProjectsController_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    name: string;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        name: string;
+                        /** @enum {string} */
+                        role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        version: number;
+                        members: {
+                            userId: string;
+                            name: string;
+                            email: string;
+                            /** @enum {string} */
+                            role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ProjectsController_detail: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        name: string;
+                        /** @enum {string} */
+                        role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        version: number;
+                        members: {
+                            userId: string;
+                            name: string;
+                            email: string;
+                            /** @enum {string} */
+                            role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ProjectsController_rename: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description The ETag that the caller saw */
+                "If-Match": string;
+            };
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    name: string;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        name: string;
+                        /** @enum {string} */
+                        role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        version: number;
+                        members: {
+                            userId: string;
+                            name: string;
+                            email: string;
+                            /** @enum {string} */
+                            role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            412: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            428: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ProjectsController_addMember: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    /** Format: email */
+                    email: string;
+                    /** @enum {string} */
+                    role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        member: {
+                            userId: string;
+                            name: string;
+                            email: string;
+                            /** @enum {string} */
+                            role: "owner" | "engineer" | "checker" | "foundation-designer" | "reader";
+                        } | null;
+                        /** @description A one-time token for somebody without an account */
+                        invitation: string | null;
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ProjectsController_removeMember: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+                userId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: number;
+                        name: string;
+                        /** @enum {string} */
+                        state: "draft" | "issued";
+                        /** @description SHA-256 of the building’s canonical text, RFC 8785 */
+                        hash: string;
+                        version: number;
+                        basedOn: string | null;
+                        /** Format: date-time */
+                        createdAt: string;
+                        createdBy: string;
+                        /** Format: date-time */
+                        updatedAt: string;
+                        issuedAt: string | null;
+                        purpose: string | null;
+                        remarks: string | null;
+                        summary: {
+                            findings: {
+                                note: number;
+                                warning: number;
+                                openEnd: number;
+                            };
+                            worstResidual: number;
+                            levels: number;
+                            wallLines: number;
+                        };
+                    }[];
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_create: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    name: string;
+                    /** Format: uuid */
+                    from?: string;
+                    building?: unknown;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: number;
+                        name: string;
+                        /** @enum {string} */
+                        state: "draft" | "issued";
+                        /** @description SHA-256 of the building’s canonical text, RFC 8785 */
+                        hash: string;
+                        version: number;
+                        basedOn: string | null;
+                        /** Format: date-time */
+                        createdAt: string;
+                        createdBy: string;
+                        /** Format: date-time */
+                        updatedAt: string;
+                        issuedAt: string | null;
+                        purpose: string | null;
+                        remarks: string | null;
+                        summary: {
+                            findings: {
+                                note: number;
+                                warning: number;
+                                openEnd: number;
+                            };
+                            worstResidual: number;
+                            levels: number;
+                            wallLines: number;
+                        };
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_one: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: number;
+                        name: string;
+                        /** @enum {string} */
+                        state: "draft" | "issued";
+                        /** @description SHA-256 of the building’s canonical text, RFC 8785 */
+                        hash: string;
+                        version: number;
+                        basedOn: string | null;
+                        /** Format: date-time */
+                        createdAt: string;
+                        createdBy: string;
+                        /** Format: date-time */
+                        updatedAt: string;
+                        issuedAt: string | null;
+                        purpose: string | null;
+                        remarks: string | null;
+                        summary: {
+                            findings: {
+                                note: number;
+                                warning: number;
+                                openEnd: number;
+                            };
+                            worstResidual: number;
+                            levels: number;
+                            wallLines: number;
+                        };
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_remove: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description The ETag that the caller saw */
+                "If-Match": string;
+            };
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            412: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            428: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_rename: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description The ETag that the caller saw */
+                "If-Match": string;
+            };
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    name: string;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: number;
+                        name: string;
+                        /** @enum {string} */
+                        state: "draft" | "issued";
+                        /** @description SHA-256 of the building’s canonical text, RFC 8785 */
+                        hash: string;
+                        version: number;
+                        basedOn: string | null;
+                        /** Format: date-time */
+                        createdAt: string;
+                        createdBy: string;
+                        /** Format: date-time */
+                        updatedAt: string;
+                        issuedAt: string | null;
+                        purpose: string | null;
+                        remarks: string | null;
+                        summary: {
+                            findings: {
+                                note: number;
+                                warning: number;
+                                openEnd: number;
+                            };
+                            worstResidual: number;
+                            levels: number;
+                            wallLines: number;
+                        };
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            412: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            428: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_building: {
+        parameters: {
+            query?: {
+                download?: "1";
+            };
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        schema: "groundward.building/1";
+                        name: string;
+                        /** @description Every number in the file and in its results is in these units and their products. */
+                        units: {
+                            /** @constant */
+                            length: "ft";
+                            /** @constant */
+                            force: "kip";
+                        } | {
+                            /** @constant */
+                            length: "m";
+                            /** @constant */
+                            force: "kN";
+                        };
+                        levels: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @description [length]; the lowest level is the base */
+                            elevation: number;
+                            diaphragms?: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                id: string;
+                                name?: string;
+                                /** @description Simple polygon without a repeated last point, in either direction [length] */
+                                outline: [
+                                    number,
+                                    number
+                                ][];
+                                openings?: {
+                                    /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                    id: string;
+                                    name?: string;
+                                    /** @description Simple polygon without a repeated last point, in either direction [length] */
+                                    outline: [
+                                        number,
+                                        number
+                                    ][];
+                                }[];
+                                /**
+                                 * @description Default flexible
+                                 * @enum {string}
+                                 */
+                                behaviour?: "flexible" | "rigid" | "semi-rigid" | "envelope";
+                                /** @description A diaphragm assembly */
+                                assembly?: string;
+                                /** @description Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area */
+                                meshSize?: number;
+                                weight?: {
+                                    /** @description Seismic weight of floor or roof [force/length²]; default 0 */
+                                    area?: number;
+                                    zones?: {
+                                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                        id: string;
+                                        name?: string;
+                                        /** @description Simple polygon without a repeated last point, in either direction [length] */
+                                        outline: [
+                                            number,
+                                            number
+                                        ][];
+                                        /** @description Replaces the diaphragm’s own area weight inside the outline [force/length²] */
+                                        area: number;
+                                    }[];
+                                    /** @description Façades and partitions, added to area weights */
+                                    lines?: {
+                                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                        id: string;
+                                        name?: string;
+                                        /** @description Trace of a façade or partition on plan [length] */
+                                        along: [
+                                            number,
+                                            number
+                                        ][];
+                                        /** @description [force/length] */
+                                        perLength: number;
+                                    }[];
+                                };
+                            }[];
+                        }[];
+                        wallLines: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @description Trace of the wall line’s vertical plane on plan */
+                            axis: [
+                                [
+                                    number,
+                                    number
+                                ],
+                                [
+                                    number,
+                                    number
+                                ]
+                            ];
+                            /**
+                             * @description How the line’s force goes to its piers; default length
+                             * @enum {string}
+                             */
+                            shareBy?: "length" | "stiffness" | "deflection";
+                            /** @description Where a collector runs over less than the whole cut of the diaphragm at the line */
+                            collectors?: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                level: string;
+                                /** @description Distance along the axis [length] */
+                                from: number;
+                                to: number;
+                            }[];
+                            storeys: {
+                                /** @description The level which this storey of the wall line holds */
+                                under: string;
+                                piers: {
+                                    /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                    id: string;
+                                    name?: string;
+                                    /** @description Distance along the wall line’s axis to the near end [length] */
+                                    from: number;
+                                    /** @description Distance along the wall line’s axis to the far end [length] */
+                                    to: number;
+                                    /** @description A wall assembly */
+                                    assembly?: string;
+                                    /** @description A hold-down assembly, at both ends */
+                                    holdDown?: string;
+                                    /** @description Lateral stiffness along the line [force/length] */
+                                    stiffness?: number;
+                                    /** @description Distance of the end posts from the pier’s ends, one number or [near, far] [length]; default 0 */
+                                    endOffset?: number | [
+                                        number,
+                                        number
+                                    ];
+                                    gravity?: {
+                                        /**
+                                         * @description D dead, L live, Lr roof live, S snow: unfactored components of gravity load
+                                         * @enum {string}
+                                         */
+                                        case: "D" | "L" | "Lr" | "S";
+                                        /** @description Gravity load on top of the pier, evenly along it [force/length] */
+                                        perLength: number;
+                                    }[];
+                                }[];
+                            }[];
+                        }[];
+                        assemblies?: {
+                            diaphragms?: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                id: string;
+                                name?: string;
+                                /** @description [force/length] */
+                                nominalUnitShear?: {
+                                    seismic?: number;
+                                    wind?: number;
+                                };
+                                /** @description Gₐ [force/length] */
+                                apparentShearStiffness?: number;
+                                /** @description E·A of the chords along outline and openings of a semi-rigid diaphragm [force]; default none */
+                                chordStiffness?: number;
+                                /** @description Axial stiffness of the floor per unit width of a semi-rigid diaphragm [force/length]; default 2 Gₐ with stated chords, else 1000 Gₐ: no bending */
+                                axialStiffness?: number;
+                            }[];
+                            walls?: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                id: string;
+                                name?: string;
+                                /** @description [force/length] */
+                                nominalUnitShear?: {
+                                    seismic?: number;
+                                    wind?: number;
+                                };
+                                /** @description Gₐ [force/length] */
+                                apparentShearStiffness?: number;
+                            }[];
+                            holdDowns?: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                id: string;
+                                name?: string;
+                                /** @description [force] */
+                                allowableTension?: number;
+                                /** @description [length] */
+                                deflectionAtAllowable?: number;
+                            }[];
+                        };
+                        basis?: {
+                            /** @enum {string} */
+                            standard: "ASCE 7-16" | "ASCE 7-22";
+                            seismic?: {
+                                SDS: number;
+                                SD1: number;
+                                /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                                S1?: number;
+                                /** @description Long-period transition [s]; default 8 */
+                                TL?: number;
+                                R: number;
+                                /** @description Ω₀; default 1 */
+                                overstrength?: number;
+                                /** @description Default R */
+                                Cd?: number;
+                                /** @description Iₑ; default 1 */
+                                importance?: number;
+                                /** @description ρ; default 1 */
+                                redundancy?: number;
+                                /** @enum {string} */
+                                designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                                /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                                period?: number;
+                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                Ct?: number;
+                                /** @description Default 0.75 */
+                                x?: number;
+                            };
+                        };
+                        loadCases: ({
+                            id: string;
+                            name?: string;
+                            /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
+                            direction: number;
+                            accidental?: {
+                                /** @description Accidental eccentricity over the plan dimension across the load */
+                                ratio: number;
+                                /** @description Amplify by Aₓ where the diaphragm is torsionally irregular; default false */
+                                amplified?: boolean;
+                            };
+                            /**
+                             * @description How a level’s force lies on its diaphragms; default weight, and area where no weight is stated
+                             * @enum {string}
+                             */
+                            spread?: "weight" | "area" | "even";
+                            /** @enum {string} */
+                            kind: "seismic" | "wind";
+                            /** @constant */
+                            from: "stated";
+                            forces: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                level: string;
+                                /** @description Storey force set: for walls and all that they hand down [force] */
+                                force: number;
+                                /** @description Diaphragm design force; default the level’s force [force] */
+                                diaphragmForce?: number;
+                            }[];
+                        } | {
+                            id: string;
+                            name?: string;
+                            /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
+                            direction: number;
+                            accidental?: {
+                                /** @description Accidental eccentricity over the plan dimension across the load */
+                                ratio: number;
+                                /** @description Amplify by Aₓ where the diaphragm is torsionally irregular; default false */
+                                amplified?: boolean;
+                            };
+                            /**
+                             * @description How a level’s force lies on its diaphragms; default weight, and area where no weight is stated
+                             * @enum {string}
+                             */
+                            spread?: "weight" | "area" | "even";
+                            /** @constant */
+                            kind: "seismic";
+                            /** @constant */
+                            from: "basis";
+                        })[];
+                        /** @description A published set by name, or a list; default none, which leaves the unfactored components */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
+                        /** @description How far an end post may stand from the post below and still stand on it [length]; default 0.25 ft or 0.075 m */
+                        postTolerance?: number;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_save: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description The ETag that the caller saw */
+                "If-Match": string;
+            };
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    /** @constant */
+                    schema: "groundward.building/1";
+                    name: string;
+                    /** @description Every number in the file and in its results is in these units and their products. */
+                    units: {
+                        /** @constant */
+                        length: "ft";
+                        /** @constant */
+                        force: "kip";
+                    } | {
+                        /** @constant */
+                        length: "m";
+                        /** @constant */
+                        force: "kN";
+                    };
+                    levels: {
+                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                        id: string;
+                        name?: string;
+                        /** @description [length]; the lowest level is the base */
+                        elevation: number;
+                        diaphragms?: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @description Simple polygon without a repeated last point, in either direction [length] */
+                            outline: [
+                                number,
+                                number
+                            ][];
+                            openings?: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                id: string;
+                                name?: string;
+                                /** @description Simple polygon without a repeated last point, in either direction [length] */
+                                outline: [
+                                    number,
+                                    number
+                                ][];
+                            }[];
+                            /**
+                             * @description Default flexible
+                             * @enum {string}
+                             */
+                            behaviour?: "flexible" | "rigid" | "semi-rigid" | "envelope";
+                            /** @description A diaphragm assembly */
+                            assembly?: string;
+                            /** @description Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area */
+                            meshSize?: number;
+                            weight?: {
+                                /** @description Seismic weight of floor or roof [force/length²]; default 0 */
+                                area?: number;
+                                zones?: {
+                                    /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                    id: string;
+                                    name?: string;
+                                    /** @description Simple polygon without a repeated last point, in either direction [length] */
+                                    outline: [
+                                        number,
+                                        number
+                                    ][];
+                                    /** @description Replaces the diaphragm’s own area weight inside the outline [force/length²] */
+                                    area: number;
+                                }[];
+                                /** @description Façades and partitions, added to area weights */
+                                lines?: {
+                                    /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                    id: string;
+                                    name?: string;
+                                    /** @description Trace of a façade or partition on plan [length] */
+                                    along: [
+                                        number,
+                                        number
+                                    ][];
+                                    /** @description [force/length] */
+                                    perLength: number;
+                                }[];
+                            };
+                        }[];
+                    }[];
+                    wallLines: {
+                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                        id: string;
+                        name?: string;
+                        /** @description Trace of the wall line’s vertical plane on plan */
+                        axis: [
+                            [
+                                number,
+                                number
+                            ],
+                            [
+                                number,
+                                number
+                            ]
+                        ];
+                        /**
+                         * @description How the line’s force goes to its piers; default length
+                         * @enum {string}
+                         */
+                        shareBy?: "length" | "stiffness" | "deflection";
+                        /** @description Where a collector runs over less than the whole cut of the diaphragm at the line */
+                        collectors?: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            level: string;
+                            /** @description Distance along the axis [length] */
+                            from: number;
+                            to: number;
+                        }[];
+                        storeys: {
+                            /** @description The level which this storey of the wall line holds */
+                            under: string;
+                            piers: {
+                                /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                                id: string;
+                                name?: string;
+                                /** @description Distance along the wall line’s axis to the near end [length] */
+                                from: number;
+                                /** @description Distance along the wall line’s axis to the far end [length] */
+                                to: number;
+                                /** @description A wall assembly */
+                                assembly?: string;
+                                /** @description A hold-down assembly, at both ends */
+                                holdDown?: string;
+                                /** @description Lateral stiffness along the line [force/length] */
+                                stiffness?: number;
+                                /** @description Distance of the end posts from the pier’s ends, one number or [near, far] [length]; default 0 */
+                                endOffset?: number | [
+                                    number,
+                                    number
+                                ];
+                                gravity?: {
+                                    /**
+                                     * @description D dead, L live, Lr roof live, S snow: unfactored components of gravity load
+                                     * @enum {string}
+                                     */
+                                    case: "D" | "L" | "Lr" | "S";
+                                    /** @description Gravity load on top of the pier, evenly along it [force/length] */
+                                    perLength: number;
+                                }[];
+                            }[];
+                        }[];
+                    }[];
+                    assemblies?: {
+                        diaphragms?: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @description [force/length] */
+                            nominalUnitShear?: {
+                                seismic?: number;
+                                wind?: number;
+                            };
+                            /** @description Gₐ [force/length] */
+                            apparentShearStiffness?: number;
+                            /** @description E·A of the chords along outline and openings of a semi-rigid diaphragm [force]; default none */
+                            chordStiffness?: number;
+                            /** @description Axial stiffness of the floor per unit width of a semi-rigid diaphragm [force/length]; default 2 Gₐ with stated chords, else 1000 Gₐ: no bending */
+                            axialStiffness?: number;
+                        }[];
+                        walls?: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @description [force/length] */
+                            nominalUnitShear?: {
+                                seismic?: number;
+                                wind?: number;
+                            };
+                            /** @description Gₐ [force/length] */
+                            apparentShearStiffness?: number;
+                        }[];
+                        holdDowns?: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @description [force] */
+                            allowableTension?: number;
+                            /** @description [length] */
+                            deflectionAtAllowable?: number;
+                        }[];
+                    };
+                    basis?: {
+                        /** @enum {string} */
+                        standard: "ASCE 7-16" | "ASCE 7-22";
+                        seismic?: {
+                            SDS: number;
+                            SD1: number;
+                            /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                            S1?: number;
+                            /** @description Long-period transition [s]; default 8 */
+                            TL?: number;
+                            R: number;
+                            /** @description Ω₀; default 1 */
+                            overstrength?: number;
+                            /** @description Default R */
+                            Cd?: number;
+                            /** @description Iₑ; default 1 */
+                            importance?: number;
+                            /** @description ρ; default 1 */
+                            redundancy?: number;
+                            /** @enum {string} */
+                            designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                            /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                            period?: number;
+                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            Ct?: number;
+                            /** @description Default 0.75 */
+                            x?: number;
+                        };
+                    };
+                    loadCases: ({
+                        id: string;
+                        name?: string;
+                        /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
+                        direction: number;
+                        accidental?: {
+                            /** @description Accidental eccentricity over the plan dimension across the load */
+                            ratio: number;
+                            /** @description Amplify by Aₓ where the diaphragm is torsionally irregular; default false */
+                            amplified?: boolean;
+                        };
+                        /**
+                         * @description How a level’s force lies on its diaphragms; default weight, and area where no weight is stated
+                         * @enum {string}
+                         */
+                        spread?: "weight" | "area" | "even";
+                        /** @enum {string} */
+                        kind: "seismic" | "wind";
+                        /** @constant */
+                        from: "stated";
+                        forces: {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            level: string;
+                            /** @description Storey force set: for walls and all that they hand down [force] */
+                            force: number;
+                            /** @description Diaphragm design force; default the level’s force [force] */
+                            diaphragmForce?: number;
+                        }[];
+                    } | {
+                        id: string;
+                        name?: string;
+                        /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
+                        direction: number;
+                        accidental?: {
+                            /** @description Accidental eccentricity over the plan dimension across the load */
+                            ratio: number;
+                            /** @description Amplify by Aₓ where the diaphragm is torsionally irregular; default false */
+                            amplified?: boolean;
+                        };
+                        /**
+                         * @description How a level’s force lies on its diaphragms; default weight, and area where no weight is stated
+                         * @enum {string}
+                         */
+                        spread?: "weight" | "area" | "even";
+                        /** @constant */
+                        kind: "seismic";
+                        /** @constant */
+                        from: "basis";
+                    })[];
+                    /** @description A published set by name, or a list; default none, which leaves the unfactored components */
+                    combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength") | {
+                        id: string;
+                        /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                        factors: {
+                            D?: number;
+                            L?: number;
+                            Lr?: number;
+                            S?: number;
+                            E?: number;
+                            W?: number;
+                        };
+                    }[];
+                    /** @description How far an end post may stand from the post below and still stand on it [length]; default 0.25 ft or 0.075 m */
+                    postTolerance?: number;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: number;
+                        name: string;
+                        /** @enum {string} */
+                        state: "draft" | "issued";
+                        /** @description SHA-256 of the building’s canonical text, RFC 8785 */
+                        hash: string;
+                        version: number;
+                        basedOn: string | null;
+                        /** Format: date-time */
+                        createdAt: string;
+                        createdBy: string;
+                        /** Format: date-time */
+                        updatedAt: string;
+                        issuedAt: string | null;
+                        purpose: string | null;
+                        remarks: string | null;
+                        summary: {
+                            findings: {
+                                note: number;
+                                warning: number;
+                                openEnd: number;
+                            };
+                            worstResidual: number;
+                            levels: number;
+                            wallLines: number;
+                        };
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            412: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            413: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            422: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            428: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    RevisionsController_issue: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description The ETag that the caller saw */
+                "If-Match": string;
+            };
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": {
+                    purpose: string;
+                    remarks?: string;
+                };
+            };
+        };
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** Format: uuid */
+                        id: string;
+                        number: number;
+                        name: string;
+                        /** @enum {string} */
+                        state: "draft" | "issued";
+                        /** @description SHA-256 of the building’s canonical text, RFC 8785 */
+                        hash: string;
+                        version: number;
+                        basedOn: string | null;
+                        /** Format: date-time */
+                        createdAt: string;
+                        createdBy: string;
+                        /** Format: date-time */
+                        updatedAt: string;
+                        issuedAt: string | null;
+                        purpose: string | null;
+                        remarks: string | null;
+                        summary: {
+                            findings: {
+                                note: number;
+                                warning: number;
+                                openEnd: number;
+                            };
+                            worstResidual: number;
+                            levels: number;
+                            wallLines: number;
+                        };
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            409: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            412: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            428: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AnalysesController_analysis: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        schema: "groundward.analysis/1";
+                        /** @description Every number in the file and in its results is in these units and their products. */
+                        units: {
+                            /** @constant */
+                            length: "ft";
+                            /** @constant */
+                            force: "kip";
+                        } | {
+                            /** @constant */
+                            length: "m";
+                            /** @constant */
+                            force: "kN";
+                        };
+                        demands: {
+                            /** @description Key of the member, such as `1/L2/1a` */
+                            member: string;
+                            /** @enum {string} */
+                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            /** @enum {string} */
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
+                            case: string;
+                            /** @description 1 along the case’s direction, -1 against it */
+                            sense: 1 | -1;
+                            /** @description Absent for the unfactored component */
+                            combination?: string;
+                            value: number;
+                            unit: string;
+                            /** @description Place on plan where the value occurs [length] */
+                            at?: [
+                                number,
+                                number
+                            ];
+                        }[];
+                        diagrams: ({
+                            /** @constant */
+                            kind: "diaphragm";
+                            /** @description `level/diaphragm` */
+                            member: string;
+                            level: string;
+                            case: string;
+                            /** @description Unit vector t along the load */
+                            along: [
+                                number,
+                                number
+                            ];
+                            /** @description Unit vector s across the load */
+                            across: [
+                                number,
+                                number
+                            ];
+                            lines: {
+                                line: string;
+                                s: number;
+                                /** @description Into the wall line, along t [force] */
+                                reaction: number;
+                            }[];
+                            spans: {
+                                member: string;
+                                from: number;
+                                to: number;
+                            }[];
+                            pieces: {
+                                /** @description s at the start of the piece [length] */
+                                from: number;
+                                /** @description s at its end [length] */
+                                to: number;
+                                /** @description w [force/length]; coefficients of (s − from)⁰, (s − from)¹ …, as in all below */
+                                load: number[];
+                                /** @description V [force] */
+                                shear: number[];
+                                /** @description M [force·length] */
+                                moment: number[];
+                                /** @description Net depth d [length] */
+                                depth: number[];
+                                /** @description Chord depth D [length] */
+                                chordDepth: number[];
+                            }[];
+                        } | {
+                            /** @constant */
+                            kind: "collector";
+                            /** @description `level/line` */
+                            member: string;
+                            level: string;
+                            line: string;
+                            case: string;
+                            /** @description Axial force, tension positive, linear between points; `at` is the distance along the line’s axis */
+                            points: {
+                                at: number;
+                                axial: number;
+                            }[];
+                        })[];
+                        path: {
+                            nodes: {
+                                id: string;
+                                /** @enum {string} */
+                                kind: "mass" | "diaphragm-span" | "collector" | "wall-line" | "pier" | "end-post" | "support";
+                                member: string;
+                                /** @description The level, or the level above the storey, where the member stands */
+                                level: string;
+                            }[];
+                            edges: {
+                                from: string;
+                                to: string;
+                                case: string;
+                                /** @description For sense 1 [force]; horizontal along the receiving line’s axis, vertical downwards */
+                                force: number;
+                                /** @enum {string} */
+                                acts: "horizontal" | "vertical";
+                            }[];
+                        };
+                        findings: {
+                            code: string;
+                            /** @enum {string} */
+                            severity: "note" | "warning" | "open-end";
+                            member: string;
+                            sentence: string;
+                            case?: string;
+                            /** @description The numbers that decided it */
+                            numbers?: {
+                                [key: string]: number;
+                            };
+                        }[];
+                        certificate: {
+                            /** @description Largest equilibrium residual relative to the forces involved */
+                            worstResidual: number;
+                            bound: number;
+                            /** @description Where it occurs */
+                            worst: string;
+                            /** @description The largest residual of each kind of check */
+                            checks: {
+                                what: string;
+                                residual: number;
+                            }[];
+                        };
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AnalysesController_demands: {
+        parameters: {
+            query?: {
+                member?: string;
+                kind?: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                level?: string;
+                case?: string;
+                sense?: "1" | "-1";
+                /** @description Empty for unfactored components */
+                combination?: string;
+                limit?: number;
+                /** @description The `next` of the page before */
+                after?: number;
+            };
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        demands: {
+                            /** @description Key of the member, such as `1/L2/1a` */
+                            member: string;
+                            /** @enum {string} */
+                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            /** @enum {string} */
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
+                            case: string;
+                            /** @description 1 along the case’s direction, -1 against it */
+                            sense: 1 | -1;
+                            /** @description Absent for the unfactored component */
+                            combination?: string;
+                            value: number;
+                            unit: string;
+                            /** @description Place on plan where the value occurs [length] */
+                            at?: [
+                                number,
+                                number
+                            ];
+                        }[];
+                        next: number | null;
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AnalysesController_trace: {
+        parameters: {
+            query: {
+                member: string;
+                case: string;
+            };
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        schema: "groundward.trace/1";
+                        /** @description Every number in the file and in its results is in these units and their products. */
+                        units: {
+                            /** @constant */
+                            length: "ft";
+                            /** @constant */
+                            force: "kip";
+                        } | {
+                            /** @constant */
+                            length: "m";
+                            /** @constant */
+                            force: "kN";
+                        };
+                        member: string;
+                        case: string;
+                        force: number;
+                        up: {
+                            member: string;
+                            level: string;
+                            force: number;
+                            share: number;
+                        }[];
+                        down: {
+                            member: string;
+                            level: string;
+                            force: number;
+                            share: number;
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    FoundationController_demands: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        schema: "groundward.foundation/1";
+                        /** @description Every number in the file and in its results is in these units and their products. */
+                        units: {
+                            /** @constant */
+                            length: "ft";
+                            /** @constant */
+                            force: "kip";
+                        } | {
+                            /** @constant */
+                            length: "m";
+                            /** @constant */
+                            force: "kN";
+                        };
+                        building: string;
+                        supports: {
+                            member: string;
+                            label: string;
+                            line: string;
+                            /** @description [x, y] on plan [length] */
+                            at: [
+                                number,
+                                number
+                            ];
+                            demands: {
+                                /** @enum {string} */
+                                quantity: "shear" | "uplift" | "bearing" | "moment";
+                                case: string;
+                                sense: 1 | -1;
+                                combination?: string;
+                                value: number;
+                                unit: string;
+                                governing: boolean;
+                            }[];
+                        }[];
+                        totals: {
+                            case: string;
+                            sense: 1 | -1;
+                            fx: number;
+                            fy: number;
+                            fz: number;
+                            mx: number;
+                            my: number;
+                            mz: number;
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    FoundationController_csv: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    ComparisonsController_compare: {
+        parameters: {
+            query: {
+                before: string;
+                after: string;
+            };
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        schema: "groundward.comparison/1";
+                        edits: {
+                            id: string;
+                            what: string;
+                            patch: {
+                                [key: string]: unknown;
+                            }[];
+                        }[];
+                        changes: {
+                            member: string;
+                            /** @enum {string} */
+                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            /** @enum {string} */
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            case: string;
+                            sense: 1 | -1;
+                            combination?: string;
+                            before: number | null;
+                            after: number | null;
+                            unit: string;
+                            /** @enum {string} */
+                            class: "added" | "removed" | "moved" | "raised" | "lowered" | "unchanged";
+                            causes: {
+                                edit: string;
+                                share: number;
+                            }[];
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    HistoryController_of: {
+        parameters: {
+            query: {
+                member: string;
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                case: string;
+                sense: "1" | "-1";
+                combination?: string;
+            };
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        member: string;
+                        /** @enum {string} */
+                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                        case: string;
+                        /** @enum {string} */
+                        sense: "1" | "-1";
+                        combination?: string;
+                        unit: string | null;
+                        points: {
+                            /** Format: uuid */
+                            revisionId: string;
+                            number: number;
+                            name: string;
+                            /** @enum {string} */
+                            state: "draft" | "issued";
+                            value: number | null;
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+}
