@@ -155,9 +155,17 @@ function label(names: readonly string[]): string {
 
 function shown(value: Json): string {
   if (typeof value === 'string' || typeof value === 'number' || typeof value === 'boolean') return String(value);
-  if (Array.isArray(value) && value.length <= 4 && value.every((entry) => typeof entry === 'number'))
-    return `[${value.join(', ')}]`;
-  return Array.isArray(value) ? `a list of ${value.length}` : 'an entry';
+  if (!Array.isArray(value)) return 'an entry';
+  if (value.length <= 4 && value.every((entry) => typeof entry === 'number')) return `[${value.join(', ')}]`;
+  const points = value.filter(
+    (entry) => Array.isArray(entry) && entry.length === 2 && entry.every((part) => typeof part === 'number'),
+  );
+  if (points.length < value.length || points.length === 0) return `a list of ${value.length}`;
+  const range = (axis: 0 | 1): string => {
+    const along = (points as [number, number][]).map((point) => point[axis]);
+    return `${Math.min(...along)} to ${Math.max(...along)}`;
+  };
+  return `x ${range(0)}, y ${range(1)}${points.length === 4 ? '' : ` (${points.length} points)`}`;
 }
 
 /** Applies edits to a building file; used to check that they tell the whole difference. */

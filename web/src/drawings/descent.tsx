@@ -3,6 +3,7 @@ import type { Building } from '@groundward/engine/building/definition';
 import type { Sense } from '@groundward/engine/path/result';
 import { levelsAscending, type DemandIndex } from '@/lib/demands';
 import { figure } from '@/lib/format';
+import { useWidth } from './use-width';
 
 export type DescentView = {
   readonly building: Building;
@@ -13,7 +14,8 @@ export type DescentView = {
 };
 
 const LEFT = 120;
-const COLUMN = 74;
+const MOST_COLUMN = 96;
+const LEAST_COLUMN = 46;
 const STOREY = 92;
 const TOP = 30;
 
@@ -28,6 +30,7 @@ export function DescentDrawing({
   readonly view: DescentView;
   readonly onPick: (member: string) => void;
 }) {
+  const [ref, free] = useWidth<HTMLDivElement>();
   const { building, index, caseId, sense } = view;
   const levels = levelsAscending(building);
   const lines = building.wallLines.filter((line) =>
@@ -36,13 +39,14 @@ export function DescentDrawing({
   const shearOf = (line: string, level: string): number =>
     index.of(`${line}/${level}`, 'shear', caseId, sense)?.value ?? 0;
   const most = Math.max(1e-12, ...lines.flatMap((line) => levels.map((level) => Math.abs(shearOf(line.id, level.id)))));
-  const width = LEFT + COLUMN * lines.length + 20;
-  const height = TOP + STOREY * (levels.length - 1) + 60;
+  const column = Math.min(MOST_COLUMN, Math.max(LEAST_COLUMN, (free - LEFT - 20) / Math.max(1, lines.length)));
+  const width = LEFT + column * lines.length + 20;
+  const height = TOP + STOREY * (levels.length - 1) + 24;
   const y = (i: number): number => TOP + STOREY * (levels.length - 1 - i);
-  const x = (c: number): number => LEFT + COLUMN * (c + 0.5);
+  const x = (c: number): number => LEFT + column * (c + 0.5);
   const { force } = building.units;
   return (
-    <div className="scroll">
+    <div className="scroll" ref={ref}>
       <svg width={width} height={height} role="group" aria-label={`Forces down the building under ${caseId}`}>
         {levels.map((level, i) => {
           const own = index.of(level.id, 'force', caseId, sense);
@@ -96,7 +100,7 @@ export function DescentDrawing({
               const member = `${line.id}/${level.id}`;
               const shear = index.of(member, 'shear', caseId, sense);
               if (shear === undefined) return null;
-              const w = Math.max(1, (Math.abs(shear.value) / most) * (COLUMN - 22));
+              const w = Math.max(1, (Math.abs(shear.value) / most) * (column - 22));
               const reaction = index.of(member, 'reaction', caseId, sense);
               const on = view.shown === member;
               const against = shear.value < 0;
@@ -120,7 +124,7 @@ export function DescentDrawing({
                     stroke="var(--force)"
                     strokeDasharray={against ? '3 2' : undefined}
                   />
-                  <rect x={x(c) - COLUMN / 2} y={y(i + 1) + 6} width={COLUMN} height={STOREY - 12} fill="transparent" />
+                  <rect x={x(c) - column / 2} y={y(i + 1) + 6} width={column} height={STOREY - 12} fill="transparent" />
                   <text
                     x={x(c)}
                     y={y(i + 1) + STOREY / 2 + 16}

@@ -1,5 +1,5 @@
 'use client';
-import type { Building, Point } from '@groundward/engine/building/definition';
+import type { Building, Point, WallLine } from '@groundward/engine/building/definition';
 import { figure } from '@/lib/format';
 import { barLength, type Box, type Scale } from './scale';
 
@@ -82,7 +82,6 @@ export function PlanDrawing({
         const below = line.storeys.find((storey) => storey.under === level);
         const [ax, ay] = at(0);
         const [bx, by] = at(length);
-        const label = [ax - u[0] * 13, ay + u[1] * 13] as const;
         const on = plan.shown === line.id;
         return (
           <g
@@ -122,31 +121,68 @@ export function PlanDrawing({
                 </line>
               );
             })}
-            <circle
-              cx={label[0]}
-              cy={label[1]}
-              r={8.5}
-              fill="var(--sheet)"
-              stroke={below === undefined ? 'var(--hair-2)' : 'var(--ink-2)'}
-              strokeDasharray={below === undefined ? '2 2' : undefined}
-            />
-            <text x={label[0]} y={label[1] + 3.5} textAnchor="middle" fontSize={10} className="t-ink">
-              {line.id}
-            </text>
           </g>
         );
       })}
       {(plan.collectors ?? []).map((collector) => (
         <CollectorShape key={collector.line} collector={collector} building={building} scale={scale} most={most} />
       ))}
+      {building.wallLines.map((line) => (
+        <LineLabel
+          key={line.id}
+          line={line}
+          scale={scale}
+          box={box}
+          braced={line.storeys.some((storey) => storey.under === level)}
+        />
+      ))}
       {plan.load !== undefined && <LoadArrow load={plan.load} scale={scale} box={box} />}
-      <g transform={`translate(${scale.x(box.x0)},${scale.height - 9})`}>
+      <g transform={`translate(${scale.x(box.x0)},${scale.height - 7})`}>
         <line x1={0} x2={bar * scale.perUnit} y1={0} y2={0} stroke="var(--ink)" strokeWidth={2} />
         <text x={bar * scale.perUnit + 6} y={4} fontSize={11}>
           {`${figure(bar, 2)} ${building.units.length}`}
         </text>
       </g>
     </svg>
+  );
+}
+
+/** The line's name at its first end, outside whatever is drawn of any level. */
+function LineLabel({
+  line,
+  scale,
+  box,
+  braced,
+}: {
+  readonly line: WallLine;
+  readonly scale: Scale;
+  readonly box: Box;
+  readonly braced: boolean;
+}) {
+  const [a, b] = line.axis;
+  const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
+  const u = [(b[0] - a[0]) / length, (b[1] - a[1]) / length] as const;
+  const edge = (value: number, low: number, high: number): number =>
+    Math.min(Math.abs(value - low), Math.abs(value - high));
+  // How far the first end stands inside the box, along the line: at most a small overhang is skipped.
+  const inside = Math.abs(u[0]) > Math.abs(u[1]) ? edge(a[0], box.x0, box.x1) : edge(a[1], box.y0, box.y1);
+  const skip = inside * scale.perUnit < 40 ? inside * scale.perUnit : 0;
+  const x = scale.x(a[0]) - u[0] * (skip + 14);
+  const y = scale.y(a[1]) + u[1] * (skip + 14);
+  return (
+    <g pointerEvents="none">
+      <circle
+        cx={x}
+        cy={y}
+        r={8.5}
+        fill="var(--sheet)"
+        stroke={braced ? 'var(--ink-2)' : 'var(--hair-2)'}
+        strokeDasharray={braced ? undefined : '2 2'}
+      />
+      <text x={x} y={y + 3.5} textAnchor="middle" fontSize={10} className="t-ink">
+        {line.id}
+      </text>
+    </g>
   );
 }
 

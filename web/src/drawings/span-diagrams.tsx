@@ -13,6 +13,8 @@ export type SpanDiagramsView = {
 };
 
 export const AXIS = 56;
+/** Height of a caption over an upright diagram. */
+export const CAPTION = 40;
 
 type Diagram = {
   readonly key: 'w' | 'V' | 'v' | 'M' | 'T';
@@ -23,9 +25,9 @@ type Diagram = {
 const DIAGRAMS: readonly Diagram[] = [
   { key: 'w', name: 'Load w', unit: (f, l) => `${f}/${l}` },
   { key: 'V', name: 'Shear V', unit: (f) => f },
-  { key: 'v', name: 'Unit shear v = V/d', unit: (f, l) => `${f}/${l}` },
+  { key: 'v', name: 'Unit shear V/d', unit: (f, l) => `${f}/${l}` },
   { key: 'M', name: 'Moment M', unit: (f, l) => `${f}·${l}` },
-  { key: 'T', name: 'Chord force M/D', unit: (f) => f },
+  { key: 'T', name: 'Chord M/D', unit: (f) => f },
 ];
 
 /** Load, shear, unit shear, moment and chord force along the span; `upright` where s runs up the sheet. */
@@ -55,7 +57,11 @@ export function SpanDiagrams({
           >
             <figcaption
               className="chart-name"
-              style={upright ? { flexDirection: 'column', height: 40, gap: 0 } : { paddingLeft: AXIS }}
+              style={
+                upright
+                  ? { flexDirection: 'column', height: CAPTION, gap: 0, padding: 0, whiteSpace: 'nowrap' }
+                  : { paddingLeft: AXIS }
+              }
             >
               <span>{diagram.name}</span>
               <b>{quantity(largest, label)}</b>

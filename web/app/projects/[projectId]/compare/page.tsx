@@ -73,7 +73,7 @@ const COLOURS: Record<ChangeClass, string> = {
   unchanged: 'var(--hair-2)',
 };
 const SYMBOLS: Record<ChangeClass, string> = {
-  added: '＋',
+  added: '+',
   removed: '✕',
   raised: '▲',
   lowered: '▼',
@@ -276,7 +276,7 @@ function Marked({ comparison, building }: { readonly comparison: Comparison; rea
         />
         <span className="note">
           piers coloured by the change of their unit shear: <b style={{ color: 'var(--raised)' }}>▲ raised</b>,{' '}
-          <b style={{ color: 'var(--lowered)' }}>▼ lowered</b>, <b style={{ color: 'var(--added)' }}>＋ added</b>
+          <b style={{ color: 'var(--lowered)' }}>▼ lowered</b>, <b style={{ color: 'var(--added)' }}>+ added</b>
         </span>
       </div>
       {width > 0 && (

@@ -4,7 +4,7 @@ import type { Analysis, CollectorDiagram, Sense } from '@groundward/engine/path/
 import { useMemo } from 'react';
 import { boxOf, fitWidth } from '@/drawings/scale';
 import { PlanDrawing, planBox, type PlanView } from '@/drawings/plan';
-import { AXIS, SpanDiagrams, type SpanDiagramsView } from '@/drawings/span-diagrams';
+import { AXIS, CAPTION, SpanDiagrams, type SpanDiagramsView } from '@/drawings/span-diagrams';
 import { useWidth } from '@/drawings/use-width';
 import { casesOf, diagramsOf, levelsAscending, type DemandIndex } from '@/lib/demands';
 import { pointsOf } from '@/lib/polynomial';
@@ -135,8 +135,9 @@ function PlanWithDiagrams({
   const [ref, width] = useWidth<HTMLDivElement>();
   const box = boxOf(planBox(plan.building));
   const beside = upright && width > 700;
-  const margin = { left: AXIS, right: 20, top: 34, bottom: 34 };
-  const scale = fitWidth(box, beside ? width * 0.6 : width, margin);
+  const margin = { left: AXIS, right: 20, top: beside ? CAPTION + 4 : 34, bottom: 42 };
+  // Along y the plan is kept low enough for the diagrams under it to be seen with it.
+  const scale = fitWidth(box, beside ? width * 0.6 : width, margin, beside ? 560 : 330);
   const extent = upright ? { from: box.y0, to: box.y1 } : { from: box.x0, to: box.x1 };
   return (
     <div ref={ref}>
@@ -144,15 +145,15 @@ function PlanWithDiagrams({
         (beside ? (
           <div style={{ display: 'flex', gap: 12 }}>
             <PlanDrawing plan={plan} scale={scale} box={box} onPick={onPick} />
-            <div style={{ flex: 1, minWidth: 0, paddingTop: Math.max(0, margin.top - 40) }}>
+            <div style={{ flex: 1, minWidth: 0, marginTop: margin.top - CAPTION }}>
               <SpanDiagrams view={{ ...view, ...extent }} upright length={scale.height - margin.top - margin.bottom} />
             </div>
           </div>
         ) : (
-          <>
+          <div style={{ width: Math.min(scale.width, width) }}>
             <PlanDrawing plan={plan} scale={scale} box={box} onPick={onPick} />
             <SpanDiagrams view={{ ...view, ...extent }} upright={false} length={0} />
-          </>
+          </div>
         ))}
     </div>
   );
