@@ -60,16 +60,18 @@ async function startAll(asked) {
   await ensureBuilt(everything, { progress });
   asked.throwIfAborted();
 
+  // The service's modules are read while the database starts.
+  process.env['NODE_ENV'] = 'production';
+  const modules = Promise.all([load('api/dist/seed.js'), load('api/dist/main.js')]);
+  modules.catch(() => undefined);
   const database = await openDatabase(settings, progress);
   open.push(database.stop);
   asked.throwIfAborted();
 
-  process.env['NODE_ENV'] = 'production';
-  const { seed } = await load('api/dist/seed.js');
+  const [{ seed }, { serve }] = await step('Loading the service', progress, () => modules);
   await step('Filling in the demo', progress, () => seed({ databaseUrl: database.url }));
   asked.throwIfAborted();
   const service = await step('Starting the service', progress, async () => {
-    const { serve } = await load('api/dist/main.js');
     return serve({
       port: settings.port,
       host: settings.host,
