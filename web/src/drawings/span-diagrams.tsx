@@ -25,7 +25,7 @@ type Diagram = {
 const DIAGRAMS: readonly Diagram[] = [
   { key: 'w', name: 'Load w', unit: (f, l) => `${f}/${l}` },
   { key: 'V', name: 'Shear V', unit: (f) => f },
-  { key: 'v', name: 'Unit shear V/d', unit: (f, l) => `${f}/${l}` },
+  { key: 'v', name: 'Unit V/d', unit: (f, l) => `${f}/${l}` },
   { key: 'M', name: 'Moment M', unit: (f, l) => `${f}·${l}` },
   { key: 'T', name: 'Chord M/D', unit: (f) => f },
 ];
@@ -92,7 +92,7 @@ export function SpanDiagrams({
                   <YAxis
                     width={AXIS}
                     domain={bounds(largest)}
-                    tickCount={3}
+                    ticks={ticksOf(view.points.map((point) => point[diagram.key]))}
                     tickFormatter={(value: number) => figure(value, 2)}
                     tickLine={false}
                     axisLine={false}
@@ -119,6 +119,11 @@ export function SpanDiagrams({
       })}
     </div>
   );
+}
+
+/** The least and the largest value, and zero. */
+function ticksOf(values: readonly number[]): number[] {
+  return [...new Set([Math.min(0, ...values), 0, Math.max(0, ...values)])];
 }
 
 /** A range with zero in it, a little wider than the values. */

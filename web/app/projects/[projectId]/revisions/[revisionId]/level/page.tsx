@@ -137,7 +137,7 @@ function PlanWithDiagrams({
   const beside = upright && width > 700;
   const margin = { left: AXIS, right: 20, top: beside ? CAPTION + 4 : 34, bottom: 42 };
   // Along y the plan is kept low enough for the diagrams under it to be seen with it.
-  const scale = fitWidth(box, beside ? width * 0.6 : width, margin, beside ? 560 : 330);
+  const scale = fitWidth(box, beside ? width * 0.6 : width, margin, beside ? 560 : 420);
   const extent = upright ? { from: box.y0, to: box.y1 } : { from: box.x0, to: box.x1 };
   return (
     <div ref={ref}>
