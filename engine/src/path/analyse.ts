@@ -16,9 +16,9 @@ import {
   type Ledger,
 } from './certificate.js';
 import { diaphragmDemands } from './diaphragm-demands.js';
-import { planFindings, postFindings, torsionFinding } from './findings.js';
+import { planFindings, postFindings, torsionFindings } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
-import { edgeDrifts, levelDemands } from './level-demands.js';
+import { levelDemands } from './level-demands.js';
 import { buildModel, type Model } from './model.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { descendAll, runCase, type CaseRun } from './run.js';
@@ -68,17 +68,13 @@ function analysisOf(building: Building): Analysis {
   const findings: Finding[] = planFindings(model, bodies, new Set(cases.map((subCase) => subCase.frame)));
   for (const run of runs) {
     const { subCase } = run;
-    levelDemands(table, model, run.outcomes, subCase, run.amplification);
+    levelDemands(table, model, run);
     for (let i = model.levels.length - 1; i > 0; i--) {
       const outcome = run.outcomes[i];
       if (outcome === undefined) continue;
       diaphragmDemands(table, diagrams, ledger, model, bodies, run, outcome);
-      for (const diaphragm of outcome.diaphragms) {
-        const member = outcome.diaphragms.length === 1 ? outcome.level.id : diaphragm.diaphragm.key;
-        const finding = torsionFinding(member, subCase.id, edgeDrifts(diaphragm, subCase));
-        if (finding !== undefined) findings.push(finding);
-      }
     }
+    findings.push(...torsionFindings(run));
     lineDemands(table, model, run.outcomes, subCase.id);
     checkLevels(ledger, model, run.outcomes, subCase.id);
     checkBase(ledger, model, run.outcomes, subCase);

@@ -2,7 +2,9 @@
 import type { Point } from '../building/definition.js';
 import type { Bodies } from './bodies.js';
 import type { Model } from './model.js';
+import { edgeDrifts, torsionalRatio } from './level-demands.js';
 import type { Finding } from './result.js';
+import type { CaseRun } from './run.js';
 import { cross, dot, frameAlong } from '../geometry/frame.js';
 import type { Profile } from '../geometry/profile.js';
 import type { Landing, PostDescent } from '../walls/posts.js';
@@ -85,10 +87,10 @@ function outlineFindings(model: Model, member: string, outline: readonly Point[]
     const a: Point = [here[0] - before[0], here[1] - before[1]];
     const b: Point = [after[0] - here[0], after[1] - here[1]];
     if (cross(a, b) * turn >= 0) continue;
-    // The notch lies on the side that the two edges turn away from: its sides run on along a and back along b.
+    // The notch lies between the way back along the first edge and the way on along the second.
     const into: Point = [
-      a[0] / Math.hypot(...a) - b[0] / Math.hypot(...b),
-      a[1] / Math.hypot(...a) - b[1] / Math.hypot(...b),
+      b[0] / Math.hypot(...b) - a[0] / Math.hypot(...a),
+      b[1] / Math.hypot(...b) - a[1] / Math.hypot(...a),
     ];
     const hs = s[i] as number;
     const ht = t[i] as number;
@@ -195,24 +197,28 @@ function postFinding(model: Model, { on, column, level, foot }: Landing): Findin
       };
 }
 
-/** ASCE 7-16 Table 12.3-1 types 1a and 1b. */
-export function torsionFinding(
-  member: string,
-  caseId: string,
-  drift: { largest: number; average: number },
-): Finding | undefined {
-  if (drift.average === 0) return undefined;
-  const ratio = drift.largest / drift.average;
-  if (ratio <= 1.2) return undefined;
-  const extreme = ratio > 1.4;
-  return {
-    code: extreme ? 'extreme-torsional-irregularity' : 'torsional-irregularity',
-    severity: 'warning',
-    member,
-    case: caseId,
-    sentence: `Under ${caseId} the largest edge drift under ${member} is ${ratio.toPrecision(4)} times the average, more than ${extreme ? 1.4 : 1.2} (horizontal irregularity type 1${extreme ? 'b' : 'a'}).`,
-    numbers: { ratio, limit: extreme ? 1.4 : 1.2 },
-  };
+/** ASCE 7-16 Table 12.3-1 types 1a and 1b, for seismic cases, before any amplification. */
+export function torsionFindings({ subCase, outcomes, plain }: CaseRun): Finding[] {
+  if (subCase.loadCase.kind !== 'seismic') return [];
+  return (plain?.outcomes ?? outcomes).flatMap((outcome) =>
+    (outcome?.diaphragms ?? []).flatMap((diaphragm): Finding[] => {
+      const member = outcome?.diaphragms.length === 1 ? outcome.level.id : diaphragm.diaphragm.key;
+      const ratio = torsionalRatio(edgeDrifts(diaphragm, subCase));
+      if (ratio === undefined || ratio <= 1.2) return [];
+      const extreme = ratio > 1.4;
+      const limit = extreme ? 1.4 : 1.2;
+      return [
+        {
+          code: extreme ? 'extreme-torsional-irregularity' : 'torsional-irregularity',
+          severity: 'warning',
+          member,
+          case: subCase.id,
+          sentence: `Under ${subCase.id} the largest edge drift under ${member} is ${ratio.toPrecision(4)} times the average, more than ${limit} (horizontal irregularity type 1${extreme ? 'b' : 'a'}).`,
+          numbers: { ratio, limit },
+        },
+      ];
+    }),
+  );
 }
 
 function percent(value: number): string {

@@ -4,18 +4,13 @@ import type { Profile } from '../geometry/profile.js';
 import type { Vector3 } from '../statics/small-matrix.js';
 import { pointOn } from '../walls/wall-line.js';
 import type { SubCase } from './cases.js';
-import type { DiaphragmOutcome, LevelOutcome } from './descent.js';
+import type { DiaphragmOutcome } from './descent.js';
+import type { CaseRun } from './run.js';
 import type { Model } from './model.js';
 import { largestBow, semiRigidMotion } from './semi-rigid-motion.js';
 import { addBoth, type Table } from './table.js';
 
-export function levelDemands(
-  table: Table,
-  model: Model,
-  outcomes: readonly (LevelOutcome | undefined)[],
-  subCase: SubCase,
-  amplification: (level: number) => number,
-): void {
+export function levelDemands(table: Table, model: Model, { subCase, outcomes, amplification, plain }: CaseRun): void {
   const { units } = table;
   let shear = 0;
   let moment = 0;
@@ -39,7 +34,10 @@ export function levelDemands(
     const rigid = outcome.diaphragms.filter((diaphragm) => diaphragm.rigid !== undefined);
     for (const diaphragm of rigid) {
       const member = outcome.diaphragms.length === 1 ? level.id : diaphragm.diaphragm.key;
-      rigidDemands(table, member, diaphragm, subCase, amplification(i));
+      // The ratio that decides on an irregularity is the one before any amplification (ASCE 7-16 12.8.4.3).
+      const unamplified = plain?.outcomes[i]?.diaphragms.find((each) => each.diaphragm === diaphragm.diaphragm);
+      const ratio = torsionalRatio(edgeDrifts(unamplified ?? diaphragm, subCase));
+      rigidDemands(table, member, diaphragm, subCase, amplification(i), ratio);
     }
   }
 }
@@ -50,6 +48,7 @@ function rigidDemands(
   outcome: DiaphragmOutcome,
   subCase: SubCase,
   amplification: number,
+  ratio: number | undefined,
 ): void {
   const rigid = outcome.rigid;
   if (rigid === undefined) return;
@@ -63,9 +62,7 @@ function rigidDemands(
   addBoth(table, { ...head, quantity: 'torsion', value: Math.abs(torsionOf(outcome)), unit: units.moment });
   const drift = edgeDrifts(outcome, subCase);
   if (rigid.displacement !== undefined) bowDemands(table, head, outcome, subCase);
-  if (drift.average > 0) {
-    addBoth(table, { ...head, quantity: 'torsional-ratio', value: drift.largest / drift.average, unit: units.none });
-  }
+  if (ratio !== undefined) addBoth(table, { ...head, quantity: 'torsional-ratio', value: ratio, unit: units.none });
   if (subCase.eccentricity !== 0) {
     addBoth(table, { ...head, quantity: 'torsional-amplification', value: amplification, unit: units.none });
   }
@@ -129,6 +126,11 @@ export function edgeDrifts(outcome: DiaphragmOutcome, subCase: SubCase): { large
   const a = at(profile.from);
   const b = at(profile.to);
   return { largest: Math.max(Math.abs(a), Math.abs(b)), average: Math.abs(a + b) / 2 };
+}
+
+/** δmax over δavg; undefined where nothing moves on average. */
+export function torsionalRatio(drift: { largest: number; average: number }): number | undefined {
+  return drift.average > 0 ? drift.largest / drift.average : undefined;
 }
 
 /** Aₓ = (δmax / 1.2·δavg)², between 1 and 3. Source: ASCE 7-16 Eq. 12.8-14. */

@@ -20,13 +20,13 @@ export type CaseRun = {
 };
 
 export function runCase(model: Model, bodies: Bodies, subCase: SubCase): CaseRun {
-  const once = (amplification: (level: number) => number): CaseRun => {
+  const once = (amplification: (level: number) => number, eccentricity = subCase.eccentricity): CaseRun => {
     const made = new Map<LevelModel, Inertia[]>();
     const inertias = (level: LevelModel): Inertia[] => {
       let known = made.get(level);
       if (known === undefined) {
         known = spreadOver(level.diaphragms, subCase.frame, subCase.spread).map((inertia) =>
-          eccentric(inertia, subCase.eccentricity * amplification(level.index)),
+          eccentric(inertia, eccentricity * amplification(level.index)),
         );
         made.set(level, known);
       }
@@ -37,10 +37,14 @@ export function runCase(model: Model, bodies: Bodies, subCase: SubCase): CaseRun
   };
   const plain = once(() => 1);
   if (!subCase.amplified) return plain;
-  const factors = plain.outcomes.map((outcome) =>
+  // One Aₓ for a level: from whichever side the eccentricity is the more severe (ASCE 7-16 12.8.4.3).
+  const opposite = once(() => 1, -subCase.eccentricity);
+  const factors = plain.outcomes.map((outcome, level) =>
     Math.max(
       1,
-      ...(outcome?.diaphragms ?? []).map((diaphragm) => torsionalAmplification(edgeDrifts(diaphragm, subCase))),
+      ...[outcome, opposite.outcomes[level]]
+        .flatMap((each) => each?.diaphragms ?? [])
+        .map((diaphragm) => torsionalAmplification(edgeDrifts(diaphragm, subCase))),
     ),
   );
   return { ...once((level) => factors[level] ?? 1), plain };
