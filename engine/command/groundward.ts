@@ -60,12 +60,16 @@ export async function main(argv: readonly string[], io: Io): Promise<ExitCode> {
 async function run(argv: readonly string[], io: Io): Promise<void> {
   const [verb, ...rest] = argv;
   if (verb === undefined) throw new Stop(2, USAGE);
-  if (verb === '--help' || verb === '-h' || verb === 'help') { io.out(USAGE); return; }
+  if (verb === '--help' || verb === '-h' || verb === 'help') {
+    io.out(USAGE);
+    return;
+  }
   switch (verb) {
     case 'analyse': {
       const { files, options } = words(rest, 1, ['--json']);
       const { building, analysis } = await analysed(files[0] as string, io);
-      io.out(options.has('--json') ? json(analysis) : analysisText(building, analysis)); return;
+      io.out(options.has('--json') ? json(analysis) : analysisText(building, analysis));
+      return;
     }
     case 'foundation': {
       const { files, options } = words(rest, 1, ['--json', '--csv']);
@@ -74,7 +78,8 @@ async function run(argv: readonly string[], io: Io): Promise<void> {
       const demands = foundation(building, analysis);
       io.out(
         options.has('--json') ? json(demands) : options.has('--csv') ? foundationCsv(demands) : foundationText(demands),
-      ); return;
+      );
+      return;
     }
     case 'compare': {
       const { files, options } = words(rest, 2, ['--json']);
@@ -82,19 +87,25 @@ async function run(argv: readonly string[], io: Io): Promise<void> {
       const before = await analysed(files[0] as string, io);
       const after = await analysed(files[1] as string, io);
       const comparison = compare(before, after);
-      io.out(options.has('--json') ? json(comparison) : comparisonText(comparison)); return;
+      io.out(options.has('--json') ? json(comparison) : comparisonText(comparison));
+      return;
     }
     case 'check': {
       const { files, options } = words(rest, 1, ['--json']);
       const building = await read(files[0] as string, io);
-      io.out(
-        options.has('--json') ? json({ valid: true, name: building.name }) : `${building.name}: no fault\n`,
-      ); return;
+      io.out(options.has('--json') ? json({ valid: true, name: building.name }) : `${building.name}: no fault\n`);
+      return;
     }
     case 'schema': {
       const { files } = words(rest, 1, ['--json']);
-      if (files[0] === 'building') { io.out(json(buildingSchema())); return; }
-      if (files[0] === 'analysis') { io.out(json(analysisSchema())); return; }
+      if (files[0] === 'building') {
+        io.out(json(buildingSchema()));
+        return;
+      }
+      if (files[0] === 'analysis') {
+        io.out(json(analysisSchema()));
+        return;
+      }
       throw wrong(`no schema "${files[0] as string}"`);
     }
     default:

@@ -37,6 +37,7 @@ export function asProblem(error: unknown): Problem {
   if (error instanceof Problem) return error;
   if (error instanceof HttpException) {
     const status = error.getStatus();
+    if (status === 413) return tooLarge();
     return new Problem(
       status,
       status === 404 ? 'not-found' : status === 400 ? 'wrong-request' : 'refused',
@@ -49,11 +50,13 @@ export function asProblem(error: unknown): Problem {
     typeof error.statusCode === 'number' &&
     error.statusCode < 500
   ) {
-    return error.statusCode === 413
-      ? new Problem(413, 'too-large', 'The body is larger than 20 MB.')
-      : new Problem(error.statusCode, 'wrong-request', error.message);
+    return error.statusCode === 413 ? tooLarge() : new Problem(error.statusCode, 'wrong-request', error.message);
   }
   return new Problem(500, 'internal', 'The service failed; the failure is in its log. Nothing was saved.');
+}
+
+function tooLarge(): Problem {
+  return new Problem(413, 'too-large', 'The body is larger than 20 MB.');
 }
 
 function messageOf(error: HttpException): string {
