@@ -2,7 +2,7 @@ import { Ajv2020 } from 'ajv/dist/2020.js';
 import request from 'supertest';
 import type TestAgent from 'supertest/lib/agent.js';
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { AUTH_ROUTES } from '../../api/src/http/auth-routes.js';
+import { AUTH_ROUTES } from '../../api/dist/http/auth-routes.js';
 import { owner, startService, type RevisionBody, type Service } from './service.js';
 
 type Media = { schema: object };

@@ -1,12 +1,12 @@
 import { afterEach, beforeEach, describe, expect, test } from 'vitest';
-import { serve } from '../../api/src/main.js';
-import { firstOwner, PASSWORD, tokenIn, visitor } from './people.js';
-import { startService, type TestService } from './service.js';
+import { serve } from '../../api/dist/main.js';
+import { owner, PASSWORD, tokenIn, visitor } from './people.js';
+import { startService, type Service } from './service.js';
 
 const eve = { name: 'Eve', email: 'eve@example.org', password: PASSWORD };
 
 describe('the owner link of the first start', () => {
-  let service: TestService;
+  let service: Service;
   beforeEach(async () => {
     service = await startService({ demo: true });
   });
@@ -24,25 +24,26 @@ describe('the owner link of the first start', () => {
     expect(cookie).toMatch(/HttpOnly/);
     expect(cookie).toMatch(/SameSite=Lax/);
     expect((await person.get('/api/me').expect(200)).body).toMatchObject({ name: 'Eve', email: 'eve@example.org' });
-    const { body: projects } = await person.get('/api/projects').expect(200);
-    expect(projects).toMatchObject([{ role: 'owner', latest: { number: 3, state: 'draft' } }]);
+    expect((await person.get('/api/projects').expect(200)).body).toMatchObject([
+      { role: 'owner', latest: { number: 3, state: 'draft' } },
+    ]);
 
     const again = await visitor(service)
       .post('/api/owner')
       .send({ ...eve, email: 'mal@example.org', token })
       .expect(410);
     expect(again.body).toMatchObject({ code: 'link-gone' });
-    expect(await service.database.sql('SELECT email FROM "user"')).toEqual([{ email: 'eve@example.org' }]);
+    expect((await service.sql.query('SELECT email FROM "user"')).rows).toEqual([{ email: 'eve@example.org' }]);
   });
 
   test('is given back when the account is refused', async () => {
     const token = tokenIn(service.ownerLink);
     const person = visitor(service);
-    const { body } = await person
+    const refused = await person
       .post('/api/owner')
       .send({ ...eve, password: 'short', token })
       .expect(400);
-    expect(body).toMatchObject({ code: 'wrong-request', faults: [{ path: 'password' }] });
+    expect(refused.body).toMatchObject({ code: 'wrong-request', faults: [{ path: 'password' }] });
     await person
       .post('/api/owner')
       .send({ ...eve, token })
@@ -59,11 +60,11 @@ describe('the owner link of the first start', () => {
       ),
     );
     expect(answers.map(({ status }) => status).sort()).toEqual([200, 410, 410, 410]);
-    expect(await service.database.sql('SELECT 1 FROM "user"')).toHaveLength(1);
+    expect((await service.sql.query('SELECT 1 FROM "user"')).rows).toHaveLength(1);
   });
 
   test('is replaced at the next start while nobody has used it, and not made once somebody has', async () => {
-    const start = () => serve({ port: 0, host: '127.0.0.1', databaseUrl: service.database.url });
+    const start = () => serve({ port: 0, host: '127.0.0.1', databaseUrl: service.databaseUrl });
     const second = await start();
     try {
       expect(tokenIn(second.ownerLink)).not.toBe(tokenIn(service.ownerLink));
@@ -71,7 +72,7 @@ describe('the owner link of the first start', () => {
         .post('/api/owner')
         .send({ ...eve, token: tokenIn(service.ownerLink) })
         .expect(410);
-      await firstOwner({ ...service, ...second });
+      await owner({ ...service, ...second });
     } finally {
       await second.close();
     }
@@ -84,18 +85,18 @@ describe('the owner link of the first start', () => {
   });
 
   test('is not kept in the database, only its hash', async () => {
-    const rows = await service.database.sql('SELECT * FROM "link"');
+    const { rows } = await service.sql.query<object>('SELECT * FROM "link"');
     expect(rows).toHaveLength(1);
     expect(JSON.stringify(rows)).not.toContain(tokenIn(service.ownerLink));
   });
 
   test('is worth nothing once somebody has an account, whoever kept another one', async () => {
     // Two processes that start at the same moment may each have made a link.
-    await service.database.sql(
+    await service.sql.query(
       `INSERT INTO "link" ("token_hash", "role", "expires_at")
        VALUES (encode(sha256('another'), 'hex'), 'owner', now() + interval '1 day')`,
     );
-    await firstOwner(service);
+    await owner(service);
     await visitor(service)
       .post('/api/owner')
       .send({ ...eve, email: 'mal@example.org', token: 'another' })
@@ -103,7 +104,7 @@ describe('the owner link of the first start', () => {
   });
 
   test('has an end', async () => {
-    await service.database.sql(`UPDATE "link" SET "expires_at" = now() - interval '1 second'`);
+    await service.sql.query(`UPDATE "link" SET "expires_at" = now() - interval '1 second'`);
     await visitor(service)
       .post('/api/owner')
       .send({ ...eve, token: tokenIn(service.ownerLink) })
