@@ -6,13 +6,17 @@ import { z } from 'zod';
 
 const LIMIT = 1e9;
 
+// Half a character pair and the zero character cannot be kept by every database and every program.
+const ID = /^[^\s/\p{Cc}\p{Cs}]+$/u;
+const TEXT = /^[^\p{Cc}\p{Cs}]*$/u;
+
 export const Id = z
   .string()
   .min(1)
   .max(64)
-  .regex(/^[^\s/]+$/, 'an id has no white space and no "/"')
+  .regex(ID, 'an id without white space, control characters and "/"')
   .describe('Identity for life: goes from revision to revision with its member; unique in its collection.');
-const Name = z.string().min(1).max(200);
+const Name = z.string().min(1).max(200).regex(TEXT, 'text without control characters');
 const Coordinate = z.number().min(-LIMIT).max(LIMIT);
 const Weight = z.number().nonnegative().max(LIMIT);
 const Positive = z.number().positive().max(LIMIT);
@@ -212,11 +216,7 @@ const Spread = z
   .describe('How a level’s force lies on its diaphragms; default weight, and area where no weight is stated');
 
 const caseHead = {
-  id: z
-    .string()
-    .min(1)
-    .max(32)
-    .regex(/^[^\s/]+$/, 'an id has no white space and no "/"'),
+  id: z.string().min(1).max(32).regex(ID, 'an id without white space, control characters and "/"'),
   name: Name.optional(),
   direction: Direction,
   accidental: Accidental.optional(),
@@ -239,7 +239,7 @@ export const BasisCase = z.strictObject({
 export const LoadCase = z.discriminatedUnion('from', [StatedCase, BasisCase]);
 
 export const Combination = z.strictObject({
-  id: z.string().min(1).max(64),
+  id: z.string().min(1).max(64).regex(TEXT, 'text without control characters'),
   factors: z
     .strictObject({
       D: z.number().optional(),
