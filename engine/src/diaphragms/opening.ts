@@ -2,7 +2,7 @@
 import type { Opening } from '../building/definition.js';
 import { dot } from '../geometry/frame.js';
 import type { Interval } from '../geometry/profile.js';
-import { cutAt } from '../geometry/profile.js';
+import { cutAt, totalLength } from '../geometry/profile.js';
 import { integral, valueAt } from '../statics/polynomial.js';
 import type { InnerForces } from './inner-forces.js';
 
@@ -34,19 +34,19 @@ export function openingForces(inner: InnerForces, opening: Opening): OpeningForc
   const to = Math.max(...s);
   const middle = (from + to) / 2;
   const cut = cutAt(inner.profile, middle);
-  const strips = cut.left.length > 0 ? cut.left : cut.right;
-  const beside = stripsBeside(strips, Math.min(...t), Math.max(...t), tolerance);
-  if (beside.length === 0) return undefined;
-  const depth = strips.reduce((sum, [a, b]) => sum + (b - a), 0);
+  // Each half shares by its own side of the middle: they differ where a step of the outline meets it.
   const halves = [
-    { shear: shearArea(inner, from, middle), chord: chordAt(inner, from, 'before') },
-    { shear: shearArea(inner, middle, to), chord: chordAt(inner, to, 'after') },
+    { strips: cut.left, shear: shearArea(inner, from, middle), chord: chordAt(inner, from, 'before') },
+    { strips: cut.right, shear: shearArea(inner, middle, to), chord: chordAt(inner, to, 'after') },
   ];
+  let bordered = false;
   let secondaryMoment = 0;
   let chordForce = 0;
   let cornerForce = 0;
-  for (const [a, b] of beside) {
-    for (const { shear, chord } of halves) {
+  for (const { strips, shear, chord } of halves) {
+    const depth = totalLength(strips);
+    for (const [a, b] of stripsBeside(strips, Math.min(...t), Math.max(...t), tolerance)) {
+      bordered = true;
       // The strip's shear at the inflection times half the opening, with what the strip's own load adds on the way.
       const moment = Math.abs(shear) * ((b - a) / depth);
       const local = moment / (b - a);
@@ -55,6 +55,7 @@ export function openingForces(inner: InnerForces, opening: Opening): OpeningForc
       chordForce = Math.max(chordForce, Math.abs(chord) + local);
     }
   }
+  if (!bordered) return undefined;
   return { from, to, secondaryMoment, chordForce, cornerForce };
 }
 

@@ -16,6 +16,9 @@ import { pointOn, type LineModel } from '../walls/wall-line.js';
 import { isBody, type Bodies, type Body } from './bodies.js';
 import type { LevelModel, Model } from './model.js';
 
+/** A force below this part of the largest beside it is rounding. */
+const ROUNDING = 1e-12;
+
 /** Force by channel [force]. */
 export type Channels = Float64Array;
 
@@ -214,10 +217,13 @@ function throughRigid(
     }
     const u: Vector3 = fx === 0 && fy === 0 && moment === 0 ? [0, 0, 0] : displacementOf(rigid, [fx, fy, moment]);
     motion.push(u);
-    for (const spring of rigid.springs) {
-      const into = given.get(spring.line) as Channels;
-      into[c] = springForce(spring, u);
-    }
+    const forces = rigid.springs.map((spring) => springForce(spring, u));
+    // What is only the rounding of larger forces is none: a wall across the load of a symmetric plan has no demand.
+    const negligible = ROUNDING * Math.max(...forces.map(Math.abs));
+    rigid.springs.forEach((spring, i) => {
+      const force = forces[i] as number;
+      (given.get(spring.line) as Channels)[c] = Math.abs(force) > negligible ? force : 0;
+    });
   }
   return { given, motion };
 }
