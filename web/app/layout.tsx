@@ -1,9 +1,12 @@
+import '@fontsource-variable/archivo/wdth.css';
 import type { Metadata, Viewport } from 'next';
 import type { ReactNode } from 'react';
+import { OriginTip } from '@/parts/origin-tip';
 import { Providers } from '@/parts/providers';
 import { TopBar } from '@/parts/top-bar';
 import './tokens.css';
 import './sheet.css';
+import './marks.css';
 
 export const metadata: Metadata = {
   title: 'Groundward',
@@ -12,9 +15,15 @@ export const metadata: Metadata = {
 
 export const viewport: Viewport = { width: 'device-width', initialScale: 1 };
 
+// Before the first paint, so that a dark sheet never flashes white.
+const THEME = `try{const t=localStorage.getItem('theme');if(t==='light'||t==='dark')document.documentElement.dataset.theme=t}catch{}`;
+
 export default function Layout({ children }: { readonly children: ReactNode }) {
   return (
-    <html lang="en">
+    <html lang="en" suppressHydrationWarning>
+      <head>
+        <script dangerouslySetInnerHTML={{ __html: THEME }} />
+      </head>
       <body>
         <Providers>
           <TopBar />
@@ -24,6 +33,7 @@ export default function Layout({ children }: { readonly children: ReactNode }) {
             govern. Senses: + along the load case’s direction, − against it; a wall’s shear is positive along its axis,
             first point to second.
           </footer>
+          <OriginTip />
         </Providers>
       </body>
     </html>

@@ -3,17 +3,27 @@
 import { usePathname, useRouter, useSearchParams } from 'next/navigation';
 import { useCallback } from 'react';
 
-export function useQueryState(name: string, fallback: string): [string, (value: string) => void] {
-  const search = useSearchParams();
+/** Sets several of the address's parameters at once; an empty value takes one away. */
+export function useQueryPatch(): (patch: Readonly<Record<string, string>>) => void {
   const router = useRouter();
   const pathname = usePathname();
-  const set = useCallback(
-    (value: string) => {
+  return useCallback(
+    (patch) => {
       const next = new URLSearchParams(window.location.search);
-      next.set(name, value);
-      router.replace(`${pathname}?${next.toString()}`, { scroll: false });
+      for (const [name, value] of Object.entries(patch)) {
+        if (value === '') next.delete(name);
+        else next.set(name, value);
+      }
+      const search = next.toString();
+      router.replace(search === '' ? pathname : `${pathname}?${search}`, { scroll: false });
     },
-    [name, pathname, router],
+    [pathname, router],
   );
+}
+
+export function useQueryState(name: string, fallback: string): [string, (value: string) => void] {
+  const search = useSearchParams();
+  const patch = useQueryPatch();
+  const set = useCallback((value: string) => patch({ [name]: value }), [name, patch]);
   return [search.get(name) ?? fallback, set];
 }

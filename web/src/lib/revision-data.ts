@@ -3,7 +3,7 @@ import { useQuery } from '@tanstack/react-query';
 import { useParams } from 'next/navigation';
 import { useMemo } from 'react';
 import { api } from './api';
-import { indexOf } from './demands';
+import { indexOf, type Facts } from './demands';
 
 /** A revision with its building and analysis, read once and shared by its pages. */
 export function useRevision() {
@@ -19,18 +19,30 @@ export function useRevision() {
   });
   const analysis = useQuery({
     queryKey: ['analysis', revisionId, version],
-    queryFn: () => api.analysis(projectId, revisionId),
+    queryFn: async () => {
+      const analysis = await api.analysis(projectId, revisionId);
+      return { analysis, index: indexOf(analysis) };
+    },
     enabled: version !== undefined,
     staleTime: Infinity,
+    structuralSharing: false,
   });
-  const index = useMemo(() => (analysis.data === undefined ? undefined : indexOf(analysis.data)), [analysis.data]);
+  const facts = useMemo<Facts | undefined>(
+    () =>
+      building.data === undefined || analysis.data === undefined
+        ? undefined
+        : { building: building.data, ...analysis.data },
+    [building.data, analysis.data],
+  );
   return {
     projectId,
     revisionId,
+    root: `/projects/${projectId}/revisions/${revisionId}`,
     revision: revision.data,
     building: building.data,
-    analysis: analysis.data,
-    index,
+    facts,
+    analysis: facts?.analysis,
+    index: facts?.index,
     error: revision.error ?? building.error ?? analysis.error,
   };
 }

@@ -1,8 +1,9 @@
+'use client';
 import type { Demand } from '@groundward/engine/path/result';
-import { originOf } from '@/lib/demands';
 import { quantity } from '@/lib/format';
+import { useOrigin } from './facts';
 
-/** A demand as a number with its unit; pointing at it, or tabbing to it, says where it comes from. */
+/** A demand as a number with its unit; pointing at it, or reaching it by keys, says where it comes from. */
 export function Figure({
   demand,
   significant = 3,
@@ -10,10 +11,10 @@ export function Figure({
   readonly demand: Demand | undefined;
   readonly significant?: number;
 }) {
+  const origin = useOrigin();
   if (demand === undefined) return <span className="note">–</span>;
-  const from = originOf(demand);
   return (
-    <span className="figure" tabIndex={0} data-from={from} aria-label={from}>
+    <span className="figure" tabIndex={-1} data-from={origin(demand)}>
       {quantity(demand.value, demand.unit, significant)}
     </span>
   );

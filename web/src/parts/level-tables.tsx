@@ -1,10 +1,14 @@
 'use client';
-import type { Building } from '@groundward/engine/building/definition';
-import type { Analysis, Demand, Quantity, Sense } from '@groundward/engine/path/result';
-import type { DemandIndex } from '@/lib/demands';
+import type { Analysis, Demand, DiaphragmDiagram, Quantity } from '@groundward/engine/path/result';
+import { CollectorSpark, largestAxial, type CollectorView } from '@/drawings/collector';
+import { ORDINATES } from '@/drawings/span-diagrams';
+import type { DemandIndex, Facts, Loading } from '@/lib/demands';
+import { dimension, figure } from '@/lib/format';
+import { breaksOf } from '@/lib/polynomial';
 import { Figure } from './figure';
+import { Table } from './table';
 
-type At = { readonly level: string; readonly caseId: string; readonly sense: Sense };
+type At = Loading & { readonly level: string };
 
 const LEVEL: readonly (readonly [Quantity, string])[] = [
   ['force', 'Storey force'],
@@ -13,119 +17,125 @@ const LEVEL: readonly (readonly [Quantity, string])[] = [
   ['overturning-moment', 'Overturning at the storey’s foot'],
   ['torsion', 'Torsion about the centre of rigidity'],
   ['torsional-ratio', 'Largest over average edge drift'],
-  ['torsional-amplification', 'Amplification of the accidental torsion'],
-  ['drift', 'Largest edge displacement in the storey'],
+  ['torsional-amplification', 'Amplification of accidental torsion'],
+  ['drift', 'Largest edge displacement'],
+  ['deflection', 'Largest in-plane deflection'],
+  ['deflection-ratio', 'Deflection over average drift of the walls'],
 ];
 
 export function LevelFigures({ index, level, caseId, sense }: At & { readonly index: DemandIndex }) {
-  const rows = LEVEL.flatMap(([quantity, name]) => {
-    const demand = index.of(level, quantity, caseId, sense);
+  const rows = LEVEL.flatMap(([what, name]) => {
+    const demand = index.of(level, what, caseId, sense);
     return demand === undefined ? [] : [{ name, demand }];
   });
   return (
     <section className="panel">
       <h2>Level</h2>
-      <table>
+      <Table label="Forces of the level">
         <tbody>
           {rows.map(({ name, demand }) => (
             <tr key={name}>
-              <td>{name}</td>
+              <th scope="row">{name}</th>
               <td className="n">
                 <Figure demand={demand} />
               </td>
             </tr>
           ))}
         </tbody>
-      </table>
+      </Table>
     </section>
   );
 }
 
+const SPAN = ['shear', 'unit-shear', 'moment', 'chord-force'] as const;
+const OPENING = ['secondary-moment', 'chord-force', 'corner-force'] as const;
+
 export function SpanTable({ analysis, level, caseId, sense }: At & { readonly analysis: Analysis }) {
-  const spans = new Map<string, Map<Quantity, Demand>>();
+  const members = new Map<string, Map<Quantity, Demand>>();
   for (const row of analysis.demands) {
     if ((row.kind !== 'diaphragm-span' && row.kind !== 'opening') || row.case !== caseId || row.sense !== sense)
       continue;
     if (!row.member.startsWith(`${level}/`)) continue;
-    const known = spans.get(row.member) ?? new Map<Quantity, Demand>();
+    const known = members.get(row.member) ?? new Map<Quantity, Demand>();
     known.set(row.quantity, row);
-    spans.set(row.member, known);
+    members.set(row.member, known);
   }
-  const of = (member: string): string => member.split('/').slice(2).join('/');
-  const diaphragms = [...spans].filter(([, rows]) => rows.has('unit-shear'));
-  const openings = [...spans].filter(([, rows]) => rows.has('secondary-moment'));
   return (
     <section className="panel">
-      <h2>Spans between wall lines</h2>
-      <div className="scroll">
-        <table>
-          <thead>
-            <tr>
-              <th>Span</th>
-              <th className="n">Shear</th>
-              <th className="n">Unit shear</th>
-              <th className="n">Moment</th>
-              <th className="n">Chord</th>
-            </tr>
-          </thead>
-          <tbody>
-            {diaphragms.map(([member, rows]) => (
-              <tr key={member}>
-                <td title={member}>{of(member)}</td>
-                {(['shear', 'unit-shear', 'moment', 'chord-force'] as const).map((quantity) => (
-                  <td key={quantity} className="n">
-                    <Figure demand={rows.get(quantity)} />
-                  </td>
-                ))}
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      </div>
-      {openings.length > 0 && (
-        <div className="scroll" style={{ marginTop: 8 }}>
-          <table>
-            <thead>
-              <tr>
-                <th>Opening</th>
-                <th className="n">Secondary moment</th>
-                <th className="n">Chord</th>
-                <th className="n">Corner tie</th>
-              </tr>
-            </thead>
-            <tbody>
-              {openings.map(([member, rows]) => (
-                <tr key={member}>
-                  <td title={member}>{of(member)}</td>
-                  {(['secondary-moment', 'chord-force', 'corner-force'] as const).map((quantity) => (
-                    <td key={quantity} className="n">
-                      <Figure demand={rows.get(quantity)} />
-                    </td>
-                  ))}
-                </tr>
-              ))}
-            </tbody>
-          </table>
-        </div>
-      )}
+      <h2>Diaphragm</h2>
+      <Quantities
+        label="Spans between wall lines"
+        heads={['Span', 'Shear V', 'Unit shear', 'Moment M', 'Chord']}
+        quantities={SPAN}
+        members={[...members].filter(([, rows]) => rows.has('unit-shear'))}
+      />
+      <Quantities
+        label="Openings"
+        heads={['Opening', 'Secondary M', 'Chord', 'Corner tie']}
+        quantities={OPENING}
+        members={[...members].filter(([, rows]) => rows.has('secondary-moment'))}
+      />
     </section>
   );
 }
 
+function Quantities({
+  label,
+  heads,
+  quantities,
+  members,
+}: {
+  readonly label: string;
+  readonly heads: readonly string[];
+  readonly quantities: readonly Quantity[];
+  readonly members: readonly (readonly [string, ReadonlyMap<Quantity, Demand>])[];
+}) {
+  if (members.length === 0) return null;
+  return (
+    <Table label={label}>
+      <thead>
+        <tr>
+          {heads.map((head, i) => (
+            <th key={head} className={i === 0 ? undefined : 'n'}>
+              {head}
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {members.map(([member, rows]) => (
+          <tr key={member}>
+            <th scope="row" title={member}>
+              {member.split('/').slice(2).join('/')}
+            </th>
+            {quantities.map((what) => (
+              <td key={what} className="n">
+                <Figure demand={rows.get(what)} />
+              </td>
+            ))}
+          </tr>
+        ))}
+      </tbody>
+    </Table>
+  );
+}
+
 export function CollectorTable({
-  building,
-  index,
+  facts,
+  collectors,
   level,
   caseId,
   sense,
   shown,
   onPick,
 }: At & {
-  readonly building: Building;
-  readonly index: DemandIndex;
+  readonly facts: Facts;
+  readonly collectors: readonly CollectorView[];
   readonly shown: string;
   readonly onPick: (line: string) => void;
 }) {
+  const { building, index } = facts;
+  const most = largestAxial(collectors);
   const rows = building.wallLines.flatMap((line) => {
     const tension = index.of(`${level}/${line.id}`, 'axial-tension', caseId, sense);
     const compression = index.of(`${level}/${line.id}`, 'axial-compression', caseId, sense);
@@ -135,26 +145,36 @@ export function CollectorTable({
   return (
     <section className="panel">
       <h2>Wall lines and their collectors</h2>
-      <div className="scroll">
-        <table>
-          <thead>
-            <tr>
-              <th>Line</th>
-              <th className="n">Reaction</th>
-              <th className="n">Collector tension</th>
-              <th className="n">compression</th>
-            </tr>
-          </thead>
-          <tbody>
-            {rows.map(({ line, tension, compression, reaction }) => (
+      <Table label="Wall lines and their collectors">
+        <thead>
+          <tr>
+            <th>Line</th>
+            <th className="n">Reaction</th>
+            <th>Axial force along it</th>
+            <th className="n">Tension +</th>
+            <th className="n">Compression −</th>
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map(({ line, tension, compression, reaction }) => {
+            const collector = collectors.find((candidate) => candidate.line.id === line.id);
+            return (
               <tr key={line.id} className={line.id === shown ? 'on' : undefined}>
-                <td>
-                  <button className="quiet" onClick={() => onPick(line.id === shown ? '' : line.id)} title={line.name}>
+                <th scope="row">
+                  <button
+                    className="quiet"
+                    aria-pressed={line.id === shown}
+                    onClick={() => onPick(line.id)}
+                    title={line.name}
+                  >
                     {line.id}
                   </button>
-                </td>
+                </th>
                 <td className="n">
                   <Figure demand={reaction} />
+                </td>
+                <td className="spark">
+                  {collector !== undefined && <CollectorSpark collector={collector} most={most} />}
                 </td>
                 <td className="n">
                   <Figure demand={tension} />
@@ -163,10 +183,50 @@ export function CollectorTable({
                   <Figure demand={compression} />
                 </td>
               </tr>
-            ))}
-          </tbody>
-        </table>
-      </div>
+            );
+          })}
+        </tbody>
+      </Table>
     </section>
+  );
+}
+
+/** The numbers behind the diagrams: both sides of every break. */
+export function BreakTable({
+  diagrams,
+  sense,
+  units,
+}: {
+  readonly diagrams: readonly DiaphragmDiagram[];
+  readonly sense: Loading['sense'];
+  readonly units: { readonly force: string; readonly length: string };
+}) {
+  const rows = diagrams.flatMap((diagram) => breaksOf(diagram, sense));
+  return (
+    <details className="panel">
+      <summary>The diagrams as a table: both sides of every break</summary>
+      <Table label="Values at every break of the diagrams">
+        <thead>
+          <tr>
+            <th className="n">{`s [${units.length}]`}</th>
+            {ORDINATES.map(({ key, name, unit }) => (
+              <th key={key} className="n">{`${name} [${unit(units.force, units.length)}]`}</th>
+            ))}
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map((row, i) => (
+            <tr key={i}>
+              <td className="n">{dimension(row.s)}</td>
+              {ORDINATES.map(({ key }) => (
+                <td key={key} className="n">
+                  {figure(row[key])}
+                </td>
+              ))}
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+    </details>
   );
 }

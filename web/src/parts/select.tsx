@@ -24,6 +24,11 @@ export function Select({
   );
 }
 
+const SENSES = [
+  { value: 1, sign: '+', name: 'along the case' },
+  { value: -1, sign: '\u2212', name: 'against the case' },
+] as const;
+
 /** Case and sense of the load, kept in the address by whoever calls. */
 export function CaseSense({
   cases,
@@ -46,15 +51,23 @@ export function CaseSense({
         options={cases.map((value) => ({ value, name: value }))}
         onChange={onCase}
       />
-      <Select
-        label="Sense"
-        value={String(sense)}
-        options={[
-          { value: '1', name: '+ along the case' },
-          { value: '-1', name: '\u2212 against it' },
-        ]}
-        onChange={onSense}
-      />
+      <div className="field" role="group" aria-label="Sense">
+        <span>Sense</span>
+        <div className="switch">
+          {SENSES.map(({ value, sign, name }) => (
+            <button
+              key={value}
+              type="button"
+              aria-pressed={sense === value}
+              aria-label={`${sign} ${name}`}
+              title={name}
+              onClick={() => onSense(String(value))}
+            >
+              {sign}
+            </button>
+          ))}
+        </div>
+      </div>
     </>
   );
 }

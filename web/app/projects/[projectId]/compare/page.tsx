@@ -254,7 +254,10 @@ function Marked({ comparison, building }: { readonly comparison: Comparison; rea
     return new Map(
       [...largest]
         .filter(([, change]) => change.class !== 'unchanged')
-        .map(([member, change]) => [member, COLOURS[change.class]]),
+        .map(([member, change]) => [
+          member,
+          { colour: COLOURS[change.class], sign: SYMBOLS[change.class], says: change.class },
+        ]),
     );
   }, [comparison]);
   const box = boxOf(planBox(building));

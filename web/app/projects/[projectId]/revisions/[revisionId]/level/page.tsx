@@ -1,35 +1,26 @@
 'use client';
-import type { Building } from '@groundward/engine/building/definition';
-import type { Analysis, CollectorDiagram, Sense } from '@groundward/engine/path/result';
+import type { Sense } from '@groundward/engine/path/result';
 import { useMemo } from 'react';
-import { boxOf, fitWidth } from '@/drawings/scale';
-import { PlanDrawing, planBox, type PlanView } from '@/drawings/plan';
-import { AXIS, CAPTION, SpanDiagrams, type SpanDiagramsView } from '@/drawings/span-diagrams';
+import type { CollectorView } from '@/drawings/collector';
+import type { PlanView } from '@/drawings/plan';
 import { useWidth } from '@/drawings/use-width';
-import { casesOf, diagramsOf, levelsAscending, type DemandIndex } from '@/lib/demands';
-import { pointsOf } from '@/lib/polynomial';
+import { casesOf, collectorsOf, diagramsOf, levelsAscending, type Facts } from '@/lib/demands';
 import { useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
-import { CollectorTable, LevelFigures, SpanTable } from '@/parts/level-tables';
+import { LevelSheet } from '@/parts/level-sheet';
+import { BreakTable, CollectorTable, LevelFigures, SpanTable } from '@/parts/level-tables';
 import { Pending } from '@/parts/problem';
 import { CaseSense, Select } from '@/parts/select';
 
 export default function LevelPage() {
-  const { building, analysis, index, error } = useRevision();
-  if (building === undefined || analysis === undefined || index === undefined)
-    return <Pending error={error} what="the analysis" />;
-  return <LevelView building={building} analysis={analysis} index={index} />;
+  const { facts, error } = useRevision();
+  return facts === undefined ? <Pending error={error} what="the analysis" /> : <LevelView facts={facts} />;
 }
 
-function LevelView({
-  building,
-  analysis,
-  index,
-}: {
-  readonly building: Building;
-  readonly analysis: Analysis;
-  readonly index: DemandIndex;
-}) {
+const TABLES = 430;
+
+function LevelView({ facts }: { readonly facts: Facts }) {
+  const { building, analysis, index } = facts;
   const cases = casesOf(analysis);
   const levels = levelsAscending(building).slice(1).reverse();
   const [level, setLevel] = useQueryState('level', levels[0]?.id ?? '');
@@ -38,35 +29,19 @@ function LevelView({
   const [shown, setShown] = useQueryState('line', '');
   const sense: Sense = senseText === '-1' ? -1 : 1;
   const diagrams = useMemo(() => diagramsOf(analysis, level, caseId), [analysis, level, caseId]);
-  const collectors = useMemo(
+  const collectors = useMemo<readonly CollectorView[]>(
     () =>
-      analysis.diagrams.filter(
-        (diagram): diagram is CollectorDiagram =>
-          diagram.kind === 'collector' && diagram.level === level && diagram.case === caseId,
-      ),
-    [analysis, level, caseId],
+      collectorsOf(analysis, level, caseId).flatMap((diagram) => {
+        const line = building.wallLines.find(({ id }) => id === diagram.line);
+        if (line === undefined) return [];
+        return [{ line, points: diagram.points.map(({ at, axial }) => ({ at, axial: axial * sense })) }];
+      }),
+    [analysis, building, level, caseId, sense],
   );
-  const along = diagrams[0]?.along;
-  const load: [number, number] | undefined = along === undefined ? undefined : [along[0] * sense, along[1] * sense];
-  const main = diagrams.filter(
-    (diagram) => along !== undefined && Math.abs(diagram.along[0] * along[0] + diagram.along[1] * along[1]) > 0.999,
-  );
-  const plan: PlanView = {
-    building,
-    level,
-    load,
-    shown,
-    collectors: collectors.map((collector) => ({
-      line: collector.line,
-      points: collector.points.map(({ at, axial }) => ({ at, axial: axial * sense })),
-    })),
-  };
-  const upright = along !== undefined && Math.abs(along[0]) > Math.abs(along[1]);
-  const view: Omit<SpanDiagramsView, 'from' | 'to'> = {
-    points: main.flatMap((diagram) => pointsOf(diagram, sense)).sort((a, b) => a.s - b.s),
-    lines: main.flatMap((diagram) => diagram.lines),
-    units: building.units,
-  };
+  const [ref, width] = useWidth<HTMLDivElement>();
+  const pick = (line: string): void => setShown(line === shown ? '' : line);
+  const plan: PlanView = { building, level, shown, collectors, ...signsOf(facts, level, caseId, sense) };
+  const beside = width > 1100;
   return (
     <>
       <div className="bar">
@@ -78,83 +53,79 @@ function LevelView({
         />
         <CaseSense cases={cases} caseId={caseId} sense={sense} onCase={setCase} onSense={setSense} />
       </div>
-      <div className="split">
+      <div ref={ref} className={beside ? 'beside' : 'stack'}>
         <div className="wide">
-          <PlanWithDiagrams
-            plan={plan}
-            view={view}
-            upright={upright}
-            onPick={(line) => setShown(line === shown ? '' : line)}
-          />
-          <ul className="legend">
-            <li>
-              <span className="swatch" style={{ color: 'var(--tension)' }} />
-              collector in tension
-            </li>
-            <li>
-              <span className="swatch dash" style={{ color: 'var(--compression)' }} />
-              collector in compression
-            </li>
-            <li>
-              <span className="swatch" style={{ color: 'var(--wall)', borderTopWidth: 5 }} />
-              pier under the level
-            </li>
-            <li>shear, chords and collectors are those of the diaphragm design forces</li>
-          </ul>
+          {width > 0 && (
+            <LevelSheet view={{ plan, diagrams, sense }} width={beside ? width - TABLES - 24 : width} onPick={pick} />
+          )}
+          <Legend rigid={plan.centres !== undefined && plan.centres.length > 0} />
         </div>
-        <div className="stack wide">
+        <div className="tables">
           <LevelFigures index={index} level={level} caseId={caseId} sense={sense} />
           <SpanTable analysis={analysis} level={level} caseId={caseId} sense={sense} />
           <CollectorTable
-            building={building}
-            index={index}
+            facts={facts}
+            collectors={collectors}
             level={level}
             caseId={caseId}
             sense={sense}
             shown={shown}
-            onPick={setShown}
+            onPick={pick}
           />
+          <BreakTable diagrams={diagrams} sense={sense} units={building.units} />
         </div>
       </div>
     </>
   );
 }
 
-/** Diagrams stand under the plan where the span runs across the sheet, beside it where it runs up the sheet. */
-function PlanWithDiagrams({
-  plan,
-  view,
-  upright,
-  onPick,
-}: {
-  readonly plan: PlanView;
-  readonly view: Omit<SpanDiagramsView, 'from' | 'to'>;
-  readonly upright: boolean;
-  readonly onPick: (line: string) => void;
-}) {
-  const [ref, width] = useWidth<HTMLDivElement>();
-  const box = boxOf(planBox(plan.building));
-  const beside = upright && width > 700;
-  const margin = { left: AXIS, right: 20, top: beside ? CAPTION + 4 : 34, bottom: 42 };
-  // Along y the plan is kept low enough for the diagrams under it to be seen with it.
-  const scale = fitWidth(box, beside ? width * 0.6 : width, margin, beside ? 560 : 420);
-  const extent = upright ? { from: box.y0, to: box.y1 } : { from: box.x0, to: box.x1 };
+/** Load arrow, span names and centres of the level. */
+function signsOf(
+  { analysis, index }: Facts,
+  level: string,
+  caseId: string,
+  sense: Sense,
+): Pick<PlanView, 'load' | 'spans' | 'centres'> {
+  const diagrams = diagramsOf(analysis, level, caseId);
+  const along = diagrams[0]?.along;
+  const upright = Math.abs(along?.[0] ?? 0) > Math.abs(along?.[1] ?? 1);
+  const centres = (['mass', 'rigidity'] as const).flatMap((of) => {
+    const x = index.of(level, `centre-of-${of}-x`, caseId, sense);
+    const y = index.of(level, `centre-of-${of}-y`, caseId, sense);
+    return x === undefined || y === undefined ? [] : [{ of, at: [x.value, y.value] as const }];
+  });
+  return {
+    load: along === undefined ? undefined : [along[0] * sense, along[1] * sense],
+    centres,
+    spans: diagrams.flatMap((diagram) =>
+      diagram.spans.map(({ member, from, to }) => ({
+        member,
+        name: member.split('/')[2] ?? member,
+        from,
+        to,
+        upright,
+      })),
+    ),
+  };
+}
+
+function Legend({ rigid }: { readonly rigid: boolean }) {
   return (
-    <div ref={ref}>
-      {width > 0 &&
-        (beside ? (
-          <div style={{ display: 'flex', gap: 12 }}>
-            <PlanDrawing plan={plan} scale={scale} box={box} onPick={onPick} />
-            <div style={{ flex: 1, minWidth: 0, marginTop: margin.top - CAPTION }}>
-              <SpanDiagrams view={{ ...view, ...extent }} upright length={scale.height - margin.top - margin.bottom} />
-            </div>
-          </div>
-        ) : (
-          <div style={{ width: Math.min(scale.width, width) }}>
-            <PlanDrawing plan={plan} scale={scale} box={box} onPick={onPick} />
-            <SpanDiagrams view={{ ...view, ...extent }} upright={false} length={0} />
-          </div>
-        ))}
-    </div>
+    <ul className="legend">
+      <li>
+        <span className="swatch" style={{ color: 'var(--tension)' }} />
+        collector in tension, +
+      </li>
+      <li>
+        <span className="swatch dash" style={{ color: 'var(--compression)' }} />
+        collector in compression, −
+      </li>
+      <li>
+        <span className="swatch heavy" style={{ color: 'var(--wall)' }} />
+        pier under the level
+      </li>
+      {rigid && <li>quartered disc: centre of mass; crossed ring: centre of rigidity</li>}
+      <li>V, M, chords and collectors are those of the diaphragm design forces</li>
+    </ul>
   );
 }

@@ -1,65 +1,45 @@
 'use client';
-import type { Building, WallLine } from '@groundward/engine/building/definition';
-import type { Analysis, Quantity, Sense } from '@groundward/engine/path/result';
-import Link from 'next/link';
+import type { Sense } from '@groundward/engine/path/result';
 import { ElevationDrawing } from '@/drawings/elevation';
+import type { PostState } from '@/drawings/elevation-signs';
 import { useWidth } from '@/drawings/use-width';
-import { casesOf, levelName, levelsAscending, type DemandIndex } from '@/lib/demands';
-import { useQueryState } from '@/lib/query-state';
+import { axisOf, casesOf, combinationsOf, directionOf, type Facts } from '@/lib/demands';
+import { useQueryPatch, useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
-import { Figure } from '@/parts/figure';
+import { useOrigin } from '@/parts/facts';
 import { Pending } from '@/parts/problem';
 import { CaseSense, Select } from '@/parts/select';
+import { severitySign } from '@/parts/title-block';
+import { PierTable, StoreyTable } from '@/parts/wall-line-tables';
 
 export default function WallLinePage() {
-  const { projectId, revisionId, building, analysis, index, error } = useRevision();
-  if (building === undefined || analysis === undefined || index === undefined)
-    return <Pending error={error} what="the analysis" />;
-  return (
-    <WallLineView
-      building={building}
-      analysis={analysis}
-      index={index}
-      root={`/projects/${projectId}/revisions/${revisionId}`}
-    />
+  const { facts, root, error } = useRevision();
+  return facts === undefined ? (
+    <Pending error={error} what="the analysis" />
+  ) : (
+    <WallLineView facts={facts} root={root} />
   );
 }
 
-function WallLineView({
-  building,
-  analysis,
-  index,
-  root,
-}: {
-  readonly building: Building;
-  readonly analysis: Analysis;
-  readonly index: DemandIndex;
-  readonly root: string;
-}) {
+const LEAST = 620;
+
+function WallLineView({ facts, root }: { readonly facts: Facts; readonly root: string }) {
+  const { building, analysis, index } = facts;
   const cases = casesOf(analysis);
-  const [lineId, setLine] = useQueryState('line', building.wallLines[0]?.id ?? '');
-  const line = building.wallLines.find((candidate) => candidate.id === lineId) ?? building.wallLines[0];
-  const loaded =
-    cases.find((id) =>
-      analysis.demands.some(
-        (row) =>
-          row.kind === 'wall-line' &&
-          row.quantity === 'shear' &&
-          row.case === id &&
-          row.member.startsWith(`${lineId}/`),
-      ),
-    ) ?? '';
-  const [caseId, setCase] = useQueryState('case', loaded);
+  const origin = useOrigin();
+  const patch = useQueryPatch();
+  const [lineId] = useQueryState('line', '');
+  const line = building.wallLines.find(({ id }) => id === lineId) ?? building.wallLines[0];
+  const [asked] = useQueryState('case', '');
   const [senseText, setSense] = useQueryState('sense', '1');
-  const sense: Sense = senseText === '-1' ? -1 : 1;
+  const [wanted, setCombination] = useQueryState('combination', '');
   const [ref, width] = useWidth<HTMLDivElement>();
   if (line === undefined) return <p>The building has no wall line.</p>;
-  const openPosts = new Set(
-    analysis.findings.filter((finding) => finding.code === 'post-on-nothing').map((finding) => finding.member),
-  );
-  const findings = analysis.findings.filter(
-    (finding) => finding.member === line.id || finding.member.startsWith(`${line.id}/`),
-  );
+  const caseId = asked === '' ? caseFor(facts, line.id) : asked;
+  const sense: Sense = senseText === '-1' ? -1 : 1;
+  const combinations = combinationsOf(analysis, 'pier', caseId);
+  const combination = combinations.includes(wanted) ? wanted : undefined;
+  const findings = analysis.findings.filter(({ member }) => member === line.id || member.startsWith(`${line.id}/`));
   return (
     <>
       <div className="bar">
@@ -67,175 +47,93 @@ function WallLineView({
           label="Wall line"
           value={line.id}
           options={building.wallLines.map((each) => ({ value: each.id, name: each.name ?? each.id }))}
-          onChange={setLine}
+          onChange={(id) => patch({ line: id, case: along(facts, id, caseId) ? caseId : '' })}
         />
-        <CaseSense cases={cases} caseId={caseId} sense={sense} onCase={setCase} onSense={setSense} />
+        <CaseSense
+          cases={cases}
+          caseId={caseId}
+          sense={sense}
+          onCase={(id) => patch({ case: id, line: line.id })}
+          onSense={setSense}
+        />
+        <Select
+          label="End forces of"
+          value={combination ?? ''}
+          options={[
+            { value: '', name: 'the case alone, unfactored' },
+            ...combinations.map((value) => ({ value, name: value })),
+          ]}
+          onChange={setCombination}
+        />
       </div>
       <div className="split">
         <div className="wide" ref={ref}>
           {width > 0 && (
-            <ElevationDrawing view={{ building, line, forces: { index, caseId, sense }, openPosts }} width={width} />
+            <div className="scroll">
+              <ElevationDrawing
+                view={{
+                  building,
+                  line,
+                  forces: { index, caseId, sense, combination, origin },
+                  posts: postsOf(findings),
+                }}
+                width={Math.max(width, LEAST)}
+              />
+            </div>
           )}
           <ul className="legend">
-            <li style={{ color: 'var(--force)' }}>→ what the diaphragm gives at the level; in the pier its shear</li>
-            <li style={{ color: 'var(--tension)' }}>↑ end post in tension at the foot</li>
+            <li style={{ color: 'var(--force)' }}>→ from the level’s diaphragm; in a pier its shear and unit shear</li>
+            <li style={{ color: 'var(--tension)' }}>↑ end post in tension, at its foot</li>
             <li style={{ color: 'var(--compression)' }}>↓ end post in compression</li>
-            <li style={{ color: 'var(--alarm)' }}>✕ end post that stands on nothing</li>
-            <li>end forces are those of the case alone, without gravity</li>
+            <li style={{ color: 'var(--alarm)' }}>✕ post that stands on nothing</li>
+            <li style={{ color: 'var(--warn)' }}>△ post that lands between the posts of a pier</li>
+            <li>{`end forces: ${combination ?? 'the case alone, without gravity'}, ${building.units.force}`}</li>
           </ul>
-        </div>
-        <div className="stack wide">
-          <StoreyTable building={building} index={index} line={line} caseId={caseId} sense={sense} root={root} />
-          <PierTable building={building} analysis={analysis} index={index} line={line} caseId={caseId} sense={sense} />
           {findings.length > 0 && (
-            <section className="panel">
+            <section className="panel" style={{ marginTop: 18 }}>
               <h2>Findings on this line</h2>
-              {findings.map((finding, i) => (
-                <p key={i}>
-                  <span className={`tag ${finding.severity}`}>{finding.severity}</span> {finding.sentence}
-                </p>
-              ))}
+              <ul className="plain">
+                {findings.map((finding, i) => (
+                  <li key={i}>
+                    <span className={`tag ${finding.severity}`}>
+                      {`${severitySign(finding.severity)} ${finding.severity}`}
+                    </span>{' '}
+                    {finding.sentence}
+                  </li>
+                ))}
+              </ul>
             </section>
           )}
+        </div>
+        <div className="stack wide">
+          <StoreyTable facts={facts} line={line} caseId={caseId} sense={sense} root={root} />
+          <PierTable facts={facts} line={line} caseId={caseId} sense={sense} combination={combination} />
         </div>
       </div>
     </>
   );
 }
 
-type At = {
-  readonly building: Building;
-  readonly index: DemandIndex;
-  readonly line: WallLine;
-  readonly caseId: string;
-  readonly sense: Sense;
-};
-
-function StoreyTable({ building, index, line, caseId, sense, root }: At & { readonly root: string }) {
-  const levels = levelsAscending(building).slice(1).reverse();
-  return (
-    <section className="panel">
-      <h2>From above, from the level, and on</h2>
-      <div className="scroll">
-        <table>
-          <thead>
-            <tr>
-              <th>Storey under</th>
-              <th className="n">From above</th>
-              <th className="n">Reaction</th>
-              <th className="n">Shear</th>
-              <th className="n">Overturning</th>
-              <th>Goes to</th>
-            </tr>
-          </thead>
-          <tbody>
-            {levels.map((level, i) => {
-              if (!line.storeys.some((storey) => storey.under === level.id)) return null;
-              const of = (quantity: Quantity) => index.of(`${line.id}/${level.id}`, quantity, caseId, sense);
-              const above = levels[i - 1];
-              const below = levels[i + 1];
-              const goesOn = below === undefined || line.storeys.some((storey) => storey.under === below.id);
-              return (
-                <tr key={level.id}>
-                  <td>{levelName(building, level.id)}</td>
-                  <td className="n">
-                    <Figure
-                      demand={
-                        above === undefined ? undefined : index.of(`${line.id}/${above.id}`, 'shear', caseId, sense)
-                      }
-                    />
-                  </td>
-                  <td className="n">
-                    <Figure demand={of('reaction')} />
-                  </td>
-                  <td className="n">
-                    <Figure demand={of('shear')} />
-                  </td>
-                  <td className="n">
-                    <Figure demand={of('overturning-moment')} />
-                  </td>
-                  <td>
-                    <Link
-                      href={`${root}/path?member=${encodeURIComponent(`${line.id}/${level.id}`)}&case=${encodeURIComponent(caseId)}`}
-                    >
-                      {below === undefined
-                        ? 'foundation'
-                        : goesOn
-                          ? 'the same line'
-                          : `transfer at ${levelName(building, below.id)}`}
-                    </Link>
-                  </td>
-                </tr>
-              );
-            })}
-          </tbody>
-        </table>
-      </div>
-    </section>
-  );
+function along({ building, analysis }: Facts, lineId: string, caseId: string): boolean {
+  const line = building.wallLines.find(({ id }) => id === lineId);
+  const direction = directionOf(analysis, caseId);
+  if (line === undefined || direction === undefined) return false;
+  const { u } = axisOf(line);
+  return Math.abs(u[0] * direction[0] + u[1] * direction[1]) > 0.5;
 }
 
-function PierTable({ building, analysis, index, line, caseId, sense }: At & { readonly analysis: Analysis }) {
-  const levels = levelsAscending(building).slice(1).reverse();
-  const combinations = [
-    ...new Set(
-      analysis.demands
-        .filter((row) => row.kind === 'pier' && row.case === caseId && row.combination !== undefined)
-        .map((row) => row.combination ?? ''),
+/** The first case that acts along the line. */
+function caseFor(facts: Facts, lineId: string): string {
+  const cases = casesOf(facts.analysis);
+  return cases.find((caseId) => along(facts, lineId, caseId)) ?? cases[0] ?? '';
+}
+
+function postsOf(findings: Facts['analysis']['findings']): ReadonlyMap<string, PostState> {
+  return new Map(
+    findings.flatMap(({ code, member, sentence }) =>
+      code === 'post-on-nothing' || code === 'post-within-pier'
+        ? [[member, { rests: code === 'post-on-nothing' ? 'on-nothing' : 'within-pier', sentence }] as const]
+        : [],
     ),
-  ];
-  const [combination, setCombination] = useQueryState('combination', '');
-  const chosen = combinations.includes(combination) ? combination : undefined;
-  return (
-    <section className="panel">
-      <h2>Piers</h2>
-      {combinations.length > 0 && (
-        <div className="bar">
-          <Select
-            label="End forces of"
-            value={chosen ?? ''}
-            options={[{ value: '', name: 'the case alone' }, ...combinations.map((value) => ({ value, name: value }))]}
-            onChange={setCombination}
-          />
-        </div>
-      )}
-      <div className="scroll">
-        <table>
-          <thead>
-            <tr>
-              <th>Pier</th>
-              <th className="n">Shear</th>
-              <th className="n">Unit shear</th>
-              <th className="n">End tension</th>
-              <th className="n">compression</th>
-            </tr>
-          </thead>
-          <tbody>
-            {levels.flatMap((level) =>
-              (line.storeys.find((storey) => storey.under === level.id)?.piers ?? []).map((pier) => {
-                const key = `${line.id}/${level.id}/${pier.id}`;
-                return (
-                  <tr key={key}>
-                    <td>{`${pier.id}, under ${levelName(building, level.id)}`}</td>
-                    <td className="n">
-                      <Figure demand={index.of(key, 'shear', caseId, sense)} />
-                    </td>
-                    <td className="n">
-                      <Figure demand={index.of(key, 'unit-shear', caseId, sense)} />
-                    </td>
-                    <td className="n">
-                      <Figure demand={index.of(key, 'end-tension', caseId, sense, chosen)} />
-                    </td>
-                    <td className="n">
-                      <Figure demand={index.of(key, 'end-compression', caseId, sense, chosen)} />
-                    </td>
-                  </tr>
-                );
-              }),
-            )}
-          </tbody>
-        </table>
-      </div>
-    </section>
   );
 }
