@@ -1,20 +1,19 @@
 /** The service: `/api` by Nest, everything else by the dashboard, on one port of one process. */
 import 'reflect-metadata';
-import { randomBytes } from 'node:crypto';
-import { mkdir, readFile, writeFile } from 'node:fs/promises';
-import { dirname } from 'node:path';
 import { StandardSchemaValidationPipe } from '@nestjs/common';
 import { NestFactory } from '@nestjs/core';
 import { FastifyAdapter, type NestFastifyApplication } from '@nestjs/platform-fastify';
 import { AppModule } from './app.module.js';
 import { LinksService } from './auth/links.service.js';
+import { DatabaseService } from './database/database.service.js';
 import { ProblemFilter } from './faults/problem.filter.js';
 import { Problem } from './faults/problem.js';
 import { mountAuth } from './http/auth-routes.js';
 import { readBodies } from './http/bodies.js';
 import { guardRequests } from './http/guards.js';
 import { mountDashboard } from './http/dashboard.js';
-import { openApiDocument } from './openapi/document.js';
+import { OPENAPI_URL, openApiDocument } from './openapi/document.js';
+import { secretOf } from './secret.js';
 
 export type ServeOptions = {
   readonly port: number;
@@ -41,7 +40,16 @@ export async function serve(options: ServeOptions): Promise<Serving> {
     new FastifyAdapter({ trustProxy: 'loopback', routerOptions: { maxParamLength: 300 } }),
     { bodyParser: false, logger: ['error', 'warn'], abortOnError: false },
   );
-  app.useGlobalFilters(new ProblemFilter());
+  try {
+    return await listen(app, options);
+  } catch (error) {
+    await app.close();
+    throw error;
+  }
+}
+
+async function listen(app: NestFastifyApplication, options: ServeOptions): Promise<Serving> {
+  app.useGlobalFilters(new ProblemFilter(() => app.get(DatabaseService).answers()));
   app.useGlobalPipes(new StandardSchemaValidationPipe({ exceptionFactory: wrongRequest }));
   const fastify = app.getHttpAdapter().getInstance();
   readBodies(fastify);
@@ -49,7 +57,7 @@ export async function serve(options: ServeOptions): Promise<Serving> {
   mountAuth(fastify, app);
   const closeDashboard = options.webDir === undefined ? undefined : await mountDashboard(fastify, options.webDir);
   const document = openApiDocument(app);
-  fastify.get('/api/openapi.json', (_request, reply) => reply.send(document));
+  fastify.get(OPENAPI_URL, (_request, reply) => reply.send(document));
   await app.init();
   await app.listen(options.port, options.host);
   const address = fastify.server.address();
@@ -70,23 +78,6 @@ export async function serve(options: ServeOptions): Promise<Serving> {
 function addressOf(host: string, port: number): string {
   const name = host === '0.0.0.0' || host === '::' ? 'localhost' : host.includes(':') ? `[${host}]` : host;
   return `http://${name}:${port}`;
-}
-
-/** The key is made once and kept, readable by its owner alone: sessions outlive a restart. */
-async function secretOf(file: string | undefined): Promise<string> {
-  const stated = process.env['GROUNDWARD_SECRET'];
-  if (stated !== undefined && stated.length >= 32) return stated;
-  if (stated !== undefined) throw new Error('GROUNDWARD_SECRET must have at least 32 characters.');
-  if (file === undefined) return randomBytes(32).toString('base64url');
-  try {
-    return (await readFile(file, 'utf8')).trim();
-  } catch (error) {
-    if (!(error instanceof Error && 'code' in error && error.code === 'ENOENT')) throw error;
-  }
-  const secret = randomBytes(32).toString('base64url');
-  await mkdir(dirname(file), { recursive: true });
-  await writeFile(file, `${secret}\n`, { mode: 0o600 });
-  return secret;
 }
 
 type Issue = { readonly message: string; readonly path?: readonly unknown[] | undefined };

@@ -8,6 +8,15 @@ import { notFound, Problem } from '../faults/problem.js';
 import { RevisionsService } from '../revisions/revisions.service.js';
 import type { DemandQuery, DemandPage } from './schemas.js';
 
+/** What names one row of a demand table. */
+type OneDemand = {
+  readonly member: string;
+  readonly quantity: string;
+  readonly case: string;
+  readonly sense: '1' | '-1';
+  readonly combination?: string | undefined;
+};
+
 @Injectable()
 export class AnalysesService {
   constructor(
@@ -53,6 +62,21 @@ export class AnalysesService {
       demands: page.map(demandOf),
       next: rows.length > limit ? (page[page.length - 1]?.position ?? null) : null,
     };
+  }
+
+  /** One demand in every revision of a project that has it: one index scan. The caller has checked who asks. */
+  acrossRevisions(projectId: string, demand: OneDemand): Promise<Pick<DemandRow, 'revisionId' | 'value' | 'unit'>[]> {
+    return this.database.prisma.demand.findMany({
+      where: {
+        projectId,
+        member: demand.member,
+        quantity: demand.quantity,
+        case: demand.case,
+        sense: Number(demand.sense),
+        combination: demand.combination ?? null,
+      },
+      select: { revisionId: true, value: true, unit: true },
+    });
   }
 
   /** Up and down from a member, computed on request. */

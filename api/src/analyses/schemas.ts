@@ -1,15 +1,16 @@
 import { Demand, DemandKind, Quantity } from '@groundward/engine/path/result';
 import { Units } from '@groundward/engine/building/definition';
 import { z } from 'zod';
+import { line } from '../http/text.js';
 
 export const DemandQuery = z.object({
-  member: z.string().max(300).optional(),
+  member: line(300).optional(),
   kind: DemandKind.optional(),
   quantity: Quantity.optional(),
-  level: z.string().max(64).optional(),
-  case: z.string().max(64).optional(),
+  level: line(64).optional(),
+  case: line(64).optional(),
   sense: z.enum(['1', '-1']).optional(),
-  combination: z.string().max(64).optional().describe('Empty for unfactored components'),
+  combination: line(64).optional().describe('Empty for unfactored components'),
   limit: z.coerce.number().int().min(1).max(10_000).optional(),
   after: z.coerce.number().int().min(0).optional().describe('The `next` of the page before'),
 });
@@ -18,7 +19,7 @@ export type DemandQuery = z.infer<typeof DemandQuery>;
 export const DemandPage = z.object({ demands: z.array(Demand), next: z.number().int().nullable() });
 export type DemandPage = z.infer<typeof DemandPage>;
 
-export const TraceQuery = z.object({ member: z.string().min(1).max(300), case: z.string().min(1).max(64) });
+export const TraceQuery = z.object({ member: line(300).min(1), case: line(64).min(1) });
 
 const Part = z.object({ member: z.string(), level: z.string(), force: z.number(), share: z.number() });
 

@@ -4,6 +4,9 @@ import type pg from 'pg';
 
 export type AccountsOptions = { readonly pool: pg.Pool; readonly secret: string; readonly origin: string };
 
+/** Carries the caller's address, as the service sees it, to where sign-in tries are counted. */
+export const ADDRESS_HEADER = 'x-groundward-address';
+
 export type Accounts = ReturnType<typeof makeAccounts>;
 
 export function makeAccounts({ pool, secret, origin }: AccountsOptions) {
@@ -23,6 +26,7 @@ export function makeAccounts({ pool, secret, origin }: AccountsOptions) {
     // The service checks the origin of every write itself; a script sends none.
     advanced: {
       disableCSRFCheck: true,
+      ipAddress: { ipAddressHeaders: [ADDRESS_HEADER] },
       cookiePrefix: 'groundward',
       defaultCookieAttributes: { sameSite: 'lax', httpOnly: true },
     },

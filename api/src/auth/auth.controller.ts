@@ -2,6 +2,7 @@ import { Body, Controller, Get, HttpCode, Inject, Post, Res } from '@nestjs/comm
 import { ApiTags } from '@nestjs/swagger';
 import type { FastifyReply } from 'fastify';
 import { z } from 'zod';
+import { line } from '../http/text.js';
 import { Answers, Takes } from '../openapi/decorators.js';
 import { LinksService } from './links.service.js';
 import { Public, User, type SignedIn } from './session.guard.js';
@@ -9,13 +10,13 @@ import { Public, User, type SignedIn } from './session.guard.js';
 const Password = z.string().min(10).max(200);
 const OwnerRequest = z.strictObject({
   token: z.string().max(200),
-  name: z.string().min(1).max(200),
+  name: line(200).trim().min(1),
   email: z.email().max(200),
   password: Password,
 });
 const InvitationRequest = z.strictObject({
   token: z.string().max(200),
-  name: z.string().min(1).max(200),
+  name: line(200).trim().min(1),
   password: Password,
 });
 const Me = z.object({ id: z.string(), name: z.string(), email: z.string() });

@@ -4,6 +4,7 @@ import { DatabaseService } from '../database/database.service.js';
 import { makeAccounts } from './accounts.js';
 import { AuthController } from './auth.controller.js';
 import { LinksService } from './links.service.js';
+import { PeopleService } from './people.service.js';
 import { SessionGuard } from './session.guard.js';
 import { ACCOUNTS } from './tokens.js';
 
@@ -21,9 +22,10 @@ export class AuthModule {
           inject: [DatabaseService],
         },
         LinksService,
+        PeopleService,
         { provide: APP_GUARD, useClass: SessionGuard },
       ],
-      exports: [ACCOUNTS, LinksService],
+      exports: [ACCOUNTS, LinksService, PeopleService],
     };
   }
 }

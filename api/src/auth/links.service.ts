@@ -1,28 +1,33 @@
-/** One-time links: the first owner's, and invitations to a project. Only the hash of a token is kept. */
+/** One-time links: the only ways to an account. */
 import { createHash, randomBytes } from 'node:crypto';
 import { Inject, Injectable } from '@nestjs/common';
+import { isAPIError } from 'better-auth/api';
+import { AccessService } from '../access/access.service.js';
+import { fromDatabaseRole, toDatabaseRole, type Role } from '../access/roles.js';
 import { DatabaseService } from '../database/database.service.js';
 import { Problem } from '../faults/problem.js';
-import type { Role } from '../access/roles.js';
-import { toDatabaseRole } from '../access/roles.js';
-import { ACCOUNTS } from './tokens.js';
+import type { Link } from '../generated/client.js';
 import type { Accounts } from './accounts.js';
+import { ACCOUNTS } from './tokens.js';
 
 const OWNER_LINK_HOURS = 24 * 7;
 const INVITATION_HOURS = 24 * 14;
 
 export type NewAccount = { readonly name: string; readonly email: string; readonly password: string };
 
+type Invitation = Link & { readonly projectId: string; readonly email: string };
+
 @Injectable()
 export class LinksService {
   constructor(
     @Inject(DatabaseService) private readonly database: DatabaseService,
+    @Inject(AccessService) private readonly access: AccessService,
     @Inject(ACCOUNTS) private readonly accounts: Accounts,
   ) {}
 
   /** A new owner link, as long as nobody has an account; earlier ones are withdrawn. */
   async ownerToken(): Promise<string | undefined> {
-    if ((await this.database.prisma.user.count()) > 0) return undefined;
+    if (await this.somebodyIsIn()) return undefined;
     await this.database.prisma.link.deleteMany({ where: { projectId: null, usedAt: null } });
     return this.make({ projectId: null, email: null, role: 'owner', hours: OWNER_LINK_HOURS });
   }
@@ -33,34 +38,43 @@ export class LinksService {
 
   /** Makes the first account, the owner of everything that is there. */
   async becomeOwner(token: string, account: NewAccount): Promise<Headers> {
-    const link = await this.take(token, (found) => found.projectId === null);
-    const headers = await this.signUp(account, link.id);
-    const user = await this.database.prisma.user.findUniqueOrThrow({ where: { email: account.email.toLowerCase() } });
-    const projects = await this.database.prisma.project.findMany({ select: { id: true } });
-    await this.database.prisma.membership.createMany({
-      data: projects.map(({ id }) => ({ projectId: id, userId: user.id, role: 'owner' as const })),
-      skipDuplicates: true,
+    const link = await this.find(token);
+    if (link?.projectId !== null || (await this.somebodyIsIn())) throw linkGone();
+    // All owner links are used up with the first: of several people with one each, one becomes the owner.
+    const used = await this.database.prisma.link.updateManyAndReturn({
+      where: { projectId: null, usedAt: null },
+      data: { usedAt: new Date() },
+      select: { id: true },
     });
+    if (!used.some(({ id }) => id === link.id)) throw linkGone();
+    const { headers, userId } = await this.signUp(account, link.id);
+    await this.access.grantEverything(userId);
     return headers;
   }
 
   /** Makes an account for an invited person, with the role in the project. */
   async acceptInvitation(token: string, name: string, password: string): Promise<Headers> {
-    const link = await this.take(token, (found) => found.projectId !== null && found.email !== null);
-    const email = link.email as string;
-    const headers = await this.signUp({ name, email, password }, link.id);
-    const user = await this.database.prisma.user.findUniqueOrThrow({ where: { email } });
-    await this.database.prisma.membership.create({
-      data: { projectId: link.projectId as string, userId: user.id, role: link.role },
+    const link = await this.find(token);
+    if (!isInvitation(link)) throw linkGone();
+    const { count } = await this.database.prisma.link.updateMany({
+      where: { id: link.id, usedAt: null },
+      data: { usedAt: new Date() },
     });
+    if (count === 0) throw linkGone();
+    const { headers, userId } = await this.signUp({ name, email: link.email, password }, link.id);
+    await this.access.grant(link.projectId, userId, fromDatabaseRole(link.role));
     return headers;
   }
 
+  private async somebodyIsIn(): Promise<boolean> {
+    return (await this.database.prisma.user.findFirst({ select: { id: true } })) !== null;
+  }
+
   private async make(link: {
-    projectId: string | null;
-    email: string | null;
-    role: Role;
-    hours: number;
+    readonly projectId: string | null;
+    readonly email: string | null;
+    readonly role: Role;
+    readonly hours: number;
   }): Promise<string> {
     const token = randomBytes(32).toString('base64url');
     await this.database.prisma.link.create({
@@ -75,32 +89,34 @@ export class LinksService {
     return token;
   }
 
-  /** Uses a link up, once, whoever else tries at the same moment. */
-  private async take(token: string, fits: (link: { projectId: string | null; email: string | null }) => boolean) {
+  /** A link that may still be used. */
+  private async find(token: string): Promise<Link | undefined> {
     // The look-up is by the hash of 256 random bits: its timing tells nothing about a token.
     const link = await this.database.prisma.link.findUnique({ where: { tokenHash: hashOf(token) } });
-    if (link === null || !fits(link) || link.usedAt !== null || link.expiresAt < new Date()) throw linkGone();
-    const { count } = await this.database.prisma.link.updateMany({
-      where: { id: link.id, usedAt: null },
-      data: { usedAt: new Date() },
-    });
-    if (count === 0) throw linkGone();
-    return link;
+    return link === null || link.usedAt !== null || link.expiresAt < new Date() ? undefined : link;
   }
 
-  private async signUp(account: NewAccount, linkId: string): Promise<Headers> {
+  private async signUp(
+    account: NewAccount,
+    linkId: string,
+  ): Promise<{ readonly headers: Headers; readonly userId: string }> {
     try {
-      const { headers } = await this.accounts.api.signUpEmail({
+      const { headers, response } = await this.accounts.api.signUpEmail({
         body: { name: account.name, email: account.email.toLowerCase(), password: account.password },
         returnHeaders: true,
       });
-      return headers;
+      return { headers, userId: response.user.id };
     } catch (error) {
       // The link is given back: whatever was wrong with the account can be mended and tried again.
       await this.database.prisma.link.update({ where: { id: linkId }, data: { usedAt: null } });
-      throw new Problem(422, 'account-refused', error instanceof Error ? error.message : String(error));
+      if (isAPIError(error) && error.statusCode < 500) throw new Problem(422, 'account-refused', error.message);
+      throw error;
     }
   }
+}
+
+function isInvitation(link: Link | undefined): link is Invitation {
+  return link !== undefined && link.projectId !== null && link.email !== null;
 }
 
 function linkGone(): Problem {

@@ -16,6 +16,14 @@ export class DatabaseService implements OnModuleDestroy {
     this.prisma = new PrismaClient({ adapter: new PrismaPg(this.pool) });
   }
 
+  /** Whether the database answers and is migrated. */
+  async answers(): Promise<boolean> {
+    return this.pool.query('SELECT 1 FROM "project" LIMIT 1').then(
+      () => true,
+      () => false,
+    );
+  }
+
   async onModuleDestroy(): Promise<void> {
     await this.prisma.$disconnect();
     if (!this.pool.ended) await this.pool.end();

@@ -2,20 +2,27 @@
 import { STATUS_CODES } from 'node:http';
 import { Catch, HttpException, Logger, type ArgumentsHost, type ExceptionFilter } from '@nestjs/common';
 import type { FastifyReply, FastifyRequest } from 'fastify';
-import { Problem, type ProblemDocument } from './problem.js';
+import { databaseDown, Problem, type ProblemDocument } from './problem.js';
 
 @Catch()
 export class ProblemFilter implements ExceptionFilter {
   private readonly logger = new Logger('Problem');
 
-  catch(error: unknown, host: ArgumentsHost): void {
+  /** @param databaseAnswers asked after a failure that nothing in the service accounts for */
+  constructor(private readonly databaseAnswers: () => Promise<boolean>) {}
+
+  async catch(error: unknown, host: ArgumentsHost): Promise<void> {
     const http = host.switchToHttp();
     const request = http.getRequest<FastifyRequest>();
     const reply = http.getResponse<FastifyReply>();
+    const problem = await this.problemOf(error);
+    if (problem.status >= 500) this.logger.error(logged(error, problem));
+    await sendProblem(reply, request.url, problem);
+  }
+
+  private async problemOf(error: unknown): Promise<Problem> {
     const problem = asProblem(error);
-    if (problem.status >= 500)
-      this.logger.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
-    void sendProblem(reply, request.url, problem);
+    return problem.status === 500 && problem !== error && !(await this.databaseAnswers()) ? databaseDown() : problem;
   }
 }
 
@@ -57,6 +64,11 @@ export function asProblem(error: unknown): Problem {
 
 function tooLarge(): Problem {
   return new Problem(413, 'too-large', 'The body is larger than 20 MB.');
+}
+
+/** A database that is away needs no stack; what nobody expected does. */
+function logged(error: unknown, problem: Problem): string {
+  return problem.status !== 503 && error instanceof Error ? (error.stack ?? error.message) : problem.message;
 }
 
 function messageOf(error: HttpException): string {

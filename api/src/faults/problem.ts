@@ -42,6 +42,10 @@ export function notFound(what: string): Problem {
   return new Problem(404, 'not-found', `There is no such ${what}, or you are not let in to it.`);
 }
 
+export function databaseDown(): Problem {
+  return new Problem(503, 'database-down', 'The database does not answer.');
+}
+
 /** The engine's faults: nothing was saved. */
 export function faulty(faults: readonly Fault[]): Problem {
   const first = faults[0];
@@ -50,8 +54,6 @@ export function faulty(faults: readonly Fault[]): Problem {
     422,
     first?.code ?? 'fault',
     `Nothing was saved: ${faults.length === 1 ? 'a fault' : `${first?.code ?? 'a fault'}${more}`} in the building.`,
-    {
-      faults,
-    },
+    { faults },
   );
 }

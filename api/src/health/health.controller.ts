@@ -3,7 +3,7 @@ import { ApiTags } from '@nestjs/swagger';
 import { z } from 'zod';
 import { Public } from '../auth/session.guard.js';
 import { DatabaseService } from '../database/database.service.js';
-import { Problem } from '../faults/problem.js';
+import { databaseDown } from '../faults/problem.js';
 import { Answers } from '../openapi/decorators.js';
 
 export const VERSION = '0.1.0';
@@ -19,11 +19,7 @@ export class HealthController {
   @Get()
   @Answers(200, Health, [503])
   async health(): Promise<z.infer<typeof Health>> {
-    try {
-      await this.database.pool.query('SELECT 1 FROM "project" LIMIT 1');
-    } catch {
-      throw new Problem(503, 'database-down', 'The database does not answer.');
-    }
+    if (!(await this.database.answers())) throw databaseDown();
     return { status: 'ok', database: 'ok', version: VERSION };
   }
 }

@@ -4,15 +4,16 @@ import { Quantity } from '@groundward/engine/path/result';
 import { z } from 'zod';
 import { User, type SignedIn } from '../auth/session.guard.js';
 import { Answers, Asks } from '../openapi/decorators.js';
+import { line } from '../http/text.js';
 import { RevisionState } from '../revisions/schemas.js';
 import { HistoryService } from './history.service.js';
 
 const HistoryQuery = z.object({
-  member: z.string().min(1).max(300),
+  member: line(300).min(1),
   quantity: Quantity,
-  case: z.string().min(1).max(64),
+  case: line(64).min(1),
   sense: z.enum(['1', '-1']),
-  combination: z.string().max(64).optional(),
+  combination: line(64).optional(),
 });
 export type HistoryQuery = z.infer<typeof HistoryQuery>;
 

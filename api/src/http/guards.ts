@@ -14,6 +14,7 @@ export async function guardRequests(fastify: FastifyInstance): Promise<void> {
         // The dashboard's pages carry their start-up script inline; nothing comes from elsewhere.
         scriptSrc: ["'self'", "'unsafe-inline'"],
         styleSrc: ["'self'", "'unsafe-inline'"],
+        fontSrc: ["'self'", 'data:'],
         imgSrc: ["'self'", 'data:', 'blob:'],
         connectSrc: ["'self'"],
         objectSrc: ["'none'"],

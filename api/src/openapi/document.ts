@@ -1,6 +1,9 @@
 import type { INestApplication } from '@nestjs/common';
 import { DocumentBuilder, SwaggerModule, type OpenAPIObject } from '@nestjs/swagger';
 import { VERSION } from '../health/health.controller.js';
+import { sessionPaths } from './session-paths.js';
+
+export const OPENAPI_URL = '/api/openapi.json';
 
 export function openApiDocument(app: INestApplication): OpenAPIObject {
   const config = new DocumentBuilder()
@@ -12,5 +15,14 @@ export function openApiDocument(app: INestApplication): OpenAPIObject {
     .setOpenAPIVersion('3.1.0')
     .addCookieAuth('groundward.session_token')
     .build();
-  return SwaggerModule.createDocument(app, config);
+  const document = SwaggerModule.createDocument(app, config);
+  return { ...document, paths: { ...document.paths, ...sessionPaths(), [OPENAPI_URL]: { get: ITSELF } } };
 }
+
+const ITSELF = {
+  operationId: 'openapi',
+  tags: ['operation'],
+  responses: {
+    '200': { description: 'This document', content: { 'application/json': { schema: { type: 'object' } } } },
+  },
+};

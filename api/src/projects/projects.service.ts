@@ -1,9 +1,11 @@
 import { Inject, Injectable } from '@nestjs/common';
 import { AccessService } from '../access/access.service.js';
-import { fromDatabaseRole, toDatabaseRole, type Role } from '../access/roles.js';
+import { fromDatabaseRole, type Role } from '../access/roles.js';
 import { LinksService } from '../auth/links.service.js';
+import { PeopleService } from '../auth/people.service.js';
 import { DatabaseService } from '../database/database.service.js';
 import { notFound, Problem } from '../faults/problem.js';
+import { RevisionsService } from '../revisions/revisions.service.js';
 import type { MemberAnswer, ProjectDetail, ProjectSummary } from './schemas.js';
 
 @Injectable()
@@ -12,30 +14,23 @@ export class ProjectsService {
     @Inject(DatabaseService) private readonly database: DatabaseService,
     @Inject(AccessService) private readonly access: AccessService,
     @Inject(LinksService) private readonly links: LinksService,
+    @Inject(PeopleService) private readonly people: PeopleService,
+    @Inject(RevisionsService) private readonly revisions: RevisionsService,
   ) {}
 
   async list(userId: string): Promise<ProjectSummary[]> {
     const memberships = await this.database.prisma.membership.findMany({
       where: { userId },
-      include: {
-        project: {
-          include: {
-            revisions: {
-              orderBy: { number: 'desc' },
-              take: 1,
-              select: { id: true, number: true, name: true, state: true },
-            },
-          },
-        },
-      },
-      orderBy: { project: { updatedAt: 'desc' } },
+      include: { project: true },
+      orderBy: [{ project: { updatedAt: 'desc' } }, { projectId: 'asc' }],
     });
+    const latest = await this.revisions.latest(memberships.map(({ projectId }) => projectId));
     return memberships.map(({ project, role }) => ({
       id: project.id,
       name: project.name,
       role: fromDatabaseRole(role),
       updatedAt: project.updatedAt.toISOString(),
-      latest: project.revisions[0] ?? null,
+      latest: latest.get(project.id) ?? null,
     }));
   }
 
@@ -80,28 +75,14 @@ export class ProjectsService {
 
   async addMember(userId: string, projectId: string, email: string, role: Role): Promise<MemberAnswer> {
     await this.access.require(userId, projectId, 'manage');
-    const user = await this.database.prisma.user.findUnique({ where: { email: email.toLowerCase() } });
-    if (user === null) return { member: null, invitation: await this.links.invitation(projectId, email, role) };
-    if (role !== 'owner') await this.keepAnOwner(projectId, user.id);
-    await this.database.prisma.membership.upsert({
-      where: { projectId_userId: { projectId, userId: user.id } },
-      create: { projectId, userId: user.id, role: toDatabaseRole(role) },
-      update: { role: toDatabaseRole(role) },
-    });
-    return { member: { userId: user.id, name: user.name, email: user.email, role }, invitation: null };
+    const person = await this.people.byEmail(email);
+    if (person === null) return { member: null, invitation: await this.links.invitation(projectId, email, role) };
+    await this.access.grant(projectId, person.id, role);
+    return { member: { userId: person.id, name: person.name, email: person.email, role }, invitation: null };
   }
 
   async removeMember(userId: string, projectId: string, memberId: string): Promise<void> {
     await this.access.require(userId, projectId, 'manage');
-    await this.keepAnOwner(projectId, memberId);
-    const { count } = await this.database.prisma.membership.deleteMany({ where: { projectId, userId: memberId } });
-    if (count === 0) throw notFound('member');
-  }
-
-  private async keepAnOwner(projectId: string, without: string): Promise<void> {
-    const owners = await this.database.prisma.membership.findMany({ where: { projectId, role: 'owner' } });
-    if (owners.length === 1 && owners[0]?.userId === without) {
-      throw new Problem(409, 'last-owner', 'A project keeps at least one owner.');
-    }
+    await this.access.revoke(projectId, memberId);
   }
 }

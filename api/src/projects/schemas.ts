@@ -1,8 +1,9 @@
 import { z } from 'zod';
 import { Role } from '../access/roles.js';
-import { RevisionState } from '../revisions/schemas.js';
+import { line } from '../http/text.js';
+import { LatestRevision } from '../revisions/schemas.js';
 
-export const ProjectName = z.string().trim().min(1).max(200);
+export const ProjectName = line(200).trim().min(1);
 
 export const ProjectRequest = z.strictObject({ name: ProjectName });
 
@@ -11,7 +12,7 @@ export const ProjectSummary = z.object({
   name: z.string(),
   role: Role,
   updatedAt: z.iso.datetime(),
-  latest: z.object({ id: z.uuid(), number: z.number().int(), name: z.string(), state: RevisionState }).nullable(),
+  latest: LatestRevision.nullable(),
 });
 export type ProjectSummary = z.infer<typeof ProjectSummary>;
 

@@ -10,7 +10,7 @@ import { DatabaseService, type Transaction } from '../database/database.service.
 import { faulty, notFound, Problem } from '../faults/problem.js';
 import { hashOf } from './hash.js';
 import { REVISION_COLUMNS, revisionView, type RevisionRow } from './revision-view.js';
-import type { RevisionView, Summary } from './schemas.js';
+import type { LatestRevision, RevisionView, Summary } from './schemas.js';
 
 export type Author = { readonly id: string; readonly name: string };
 
@@ -31,6 +31,14 @@ export class RevisionsService {
       orderBy: { number: 'asc' },
     });
     return rows.map(revisionView);
+  }
+
+  /** The revision with the highest number of each project that has any. */
+  async latest(projectIds: readonly string[]): Promise<ReadonlyMap<string, LatestRevision>> {
+    const rows = await this.database.prisma.$queryRaw<(LatestRevision & { readonly projectId: string })[]>`
+      SELECT DISTINCT ON ("project_id") "project_id" AS "projectId", "id", "number", "name", "state"::text AS "state"
+      FROM "revision" WHERE "project_id" = ANY (${projectIds}::uuid[]) ORDER BY "project_id", "number" DESC`;
+    return new Map(rows.map(({ projectId, ...latest }) => [projectId, latest]));
   }
 
   async one(userId: string, projectId: string, revisionId: string): Promise<RevisionView> {
@@ -158,6 +166,18 @@ export class RevisionsService {
     await this.access.require(author.id, projectId, 'write');
     const before = await this.find(projectId, revisionId);
     if (before.state === 'issued') throw issued();
+    if (before.version !== version) throw await this.stale(projectId, revisionId);
+    const follower = await this.database.prisma.revision.findFirst({
+      where: { basedOn: revisionId, state: 'issued' },
+      select: { number: true },
+    });
+    if (follower !== null) {
+      throw new Problem(
+        409,
+        'followed',
+        `The issued revision ${follower.number} was made from this draft, so it stays.`,
+      );
+    }
     const { count } = await this.database.prisma.revision.deleteMany({
       where: { id: revisionId, version, state: 'draft' },
     });

@@ -1,5 +1,6 @@
 import { Building } from '@groundward/engine/building/definition';
 import { z } from 'zod';
+import { line, prose } from '../http/text.js';
 
 export const RevisionState = z.enum(['draft', 'issued']);
 
@@ -29,7 +30,10 @@ export const RevisionView = z.object({
 });
 export type RevisionView = z.infer<typeof RevisionView>;
 
-const RevisionName = z.string().trim().min(1).max(200);
+export const LatestRevision = RevisionView.pick({ id: true, number: true, name: true, state: true });
+export type LatestRevision = z.infer<typeof LatestRevision>;
+
+const RevisionName = line(200).trim().min(1);
 
 export const NewRevision = z
   .strictObject({ name: RevisionName, from: z.uuid().optional(), building: z.unknown().optional() })
@@ -40,8 +44,8 @@ export const NewRevision = z
 export const RevisionChange = z.strictObject({ name: RevisionName });
 
 export const IssueRequest = z.strictObject({
-  purpose: z.string().trim().min(1).max(500),
-  remarks: z.string().trim().max(5000).optional(),
+  purpose: prose(500).trim().min(1),
+  remarks: prose(5000).trim().optional(),
 });
 
 export { Building };
