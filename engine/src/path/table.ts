@@ -27,14 +27,40 @@ export type Row = {
   readonly at?: Point | undefined;
 };
 
-/** One row; `-0` and rounding's sign of zero do not show. */
+/** One row; `-0` does not show. */
 export function addRow(table: Table, row: Row, sense: Sense, combination?: string): void {
   const { member, kind, quantity, unit, at } = row;
-  const value = row.value === 0 ? 0 : row.value;
-  const demand: Demand = { member, kind, quantity, case: row.case, sense, value, unit };
-  if (combination !== undefined) demand.combination = combination;
-  if (at !== undefined) demand.at = at;
-  table.rows.push(demand);
+  put(table, member, kind, quantity, row.case, sense, row.value, unit, at, combination);
+}
+
+/** One row from its columns: the way for rows by the ten thousand, without a record in between. */
+export function put(
+  table: Table,
+  member: string,
+  kind: DemandKind,
+  quantity: Quantity,
+  caseId: string,
+  sense: Sense,
+  size: number,
+  unit: string,
+  at: Point | undefined,
+  combination: string | undefined,
+): void {
+  const value = size === 0 ? 0 : size;
+  // One literal for each set of columns, so that rows of a kind share their shape in memory.
+  if (combination === undefined) {
+    table.rows.push(
+      at === undefined
+        ? { member, kind, quantity, case: caseId, sense, value, unit }
+        : { member, kind, quantity, case: caseId, sense, value, unit, at },
+    );
+  } else {
+    table.rows.push(
+      at === undefined
+        ? { member, kind, quantity, case: caseId, sense, value, unit, combination }
+        : { member, kind, quantity, case: caseId, sense, value, unit, combination, at },
+    );
+  }
 }
 
 /** A demand that is the same in both senses. */

@@ -6,7 +6,7 @@ import type { Point } from '../building/definition.js';
 import type { LevelOutcome } from './descent.js';
 import type { Model } from './model.js';
 import type { Quantity, Sense } from './result.js';
-import { addBoth, addRow, type Table } from './table.js';
+import { put, type Table } from './table.js';
 
 const SENSES: readonly Sense[] = [1, -1];
 
@@ -38,20 +38,30 @@ export function lineDemands(
       overturning[line.index] = moment;
       if (shear === 0 && reaction === 0 && moment === 0) continue;
       const member = `${line.line.id}/${outcome.level.id}`;
-      const head = { member, kind: 'wall-line' as const, case: caseId };
+      const { force, moment: momentUnit, perLength } = table.units;
       for (const sense of SENSES) {
-        addRow(table, { ...head, quantity: 'reaction', value: reaction * sense, unit: table.units.force }, sense);
-        addRow(table, { ...head, quantity: 'shear', value: shear * sense, unit: table.units.force }, sense);
+        put(table, member, 'wall-line', 'reaction', caseId, sense, reaction * sense, force, undefined, undefined);
+        put(table, member, 'wall-line', 'shear', caseId, sense, shear * sense, force, undefined, undefined);
+        put(
+          table,
+          member,
+          'wall-line',
+          'overturning-moment',
+          caseId,
+          sense,
+          Math.abs(moment),
+          momentUnit,
+          undefined,
+          undefined,
+        );
       }
-      addBoth(table, { ...head, quantity: 'overturning-moment', value: Math.abs(moment), unit: table.units.moment });
       for (const pier of storey.piers) {
-        const pierHead = { member: pier.key, kind: 'pier' as const, case: caseId };
-        const force = shear * pier.share;
+        const own = shear * pier.share;
+        const unitShear = Math.abs(own) / pier.length;
         for (const sense of SENSES) {
-          addRow(table, { ...pierHead, quantity: 'shear', value: force * sense, unit: table.units.force }, sense);
+          put(table, pier.key, 'pier', 'shear', caseId, sense, own * sense, force, undefined, undefined);
+          put(table, pier.key, 'pier', 'unit-shear', caseId, sense, unitShear, perLength, undefined, undefined);
         }
-        const value = Math.abs(force) / pier.length;
-        addBoth(table, { ...pierHead, quantity: 'unit-shear', value, unit: table.units.perLength });
       }
     }
   }
@@ -68,19 +78,13 @@ export function pierEndDemands(table: Table, descent: PostDescent, lateral: read
       for (const { id, component, combinations } of lateral) {
         if (foot.near[component] === 0 && foot.far[component] === 0) continue;
         for (const sense of SENSES) {
-          endRows(
-            table,
-            foot,
-            places,
-            id,
-            sense,
-            [foot.near[component] as number, foot.far[component] as number],
-            sense,
-          );
+          const a = (foot.near[component] as number) * sense;
+          const b = (foot.far[component] as number) * sense;
+          endRows(table, foot, places, id, sense, a, b);
           for (const combination of combinations) {
             const near = factored(foot.near, combination, component, sense);
             const far = factored(foot.far, combination, component, sense);
-            endRows(table, foot, places, id, sense, [near, far], 1, combination.id);
+            endRows(table, foot, places, id, sense, near, far, combination.id);
           }
         }
       }
@@ -94,27 +98,15 @@ function endRows(
   places: readonly [Point, Point],
   caseId: string,
   sense: Sense,
-  [near, far]: readonly [number, number],
-  factor: number,
+  near: number,
+  far: number,
   combination?: string,
 ): void {
-  const a = near * factor;
-  const b = far * factor;
-  const low = Math.min(a, b);
-  const high = Math.max(a, b);
-  const head = { member: foot.pier.key, kind: 'pier' as const, case: caseId, unit: table.units.force };
-  addRow(
-    table,
-    { ...head, quantity: 'end-tension', value: Math.max(0, -low), at: places[a <= b ? 0 : 1] },
-    sense,
-    combination,
-  );
-  addRow(
-    table,
-    { ...head, quantity: 'end-compression', value: Math.max(0, high), at: places[a <= b ? 1 : 0] },
-    sense,
-    combination,
-  );
+  const { key } = foot.pier;
+  const { force } = table.units;
+  const [pulled, pushed] = near <= far ? places : [places[1], places[0]];
+  put(table, key, 'pier', 'end-tension', caseId, sense, Math.max(0, -near, -far), force, pulled, combination);
+  put(table, key, 'pier', 'end-compression', caseId, sense, Math.max(0, near, far), force, pushed, combination);
 }
 
 /** Compression under a combination. */
@@ -151,7 +143,7 @@ export function supportDemands(
       const far = foot.far[component] as number;
       if (shear === 0 && near === 0 && far === 0) continue;
       const add = (quantity: Quantity, value: number, unit: string, sense: Sense, combination?: string): void =>
-        addRow(table, { member, kind: 'support', quantity, case: id, value, unit, at }, sense, combination);
+        put(table, member, 'support', quantity, id, sense, value, unit, at, combination);
       for (const sense of SENSES) {
         add('shear', shear, units.force, sense);
         add('moment', moment(near, far), units.moment, sense);
@@ -178,9 +170,9 @@ function postDemands(
   gravity: readonly FactoredCombination[],
 ): void {
   const add = (caseId: string, sense: Sense, compression: number, combination?: string): void => {
-    const head = { member, kind: 'support' as const, case: caseId, unit: table.units.force, at };
-    addRow(table, { ...head, quantity: 'uplift', value: Math.max(0, -compression) }, sense, combination);
-    addRow(table, { ...head, quantity: 'bearing', value: Math.max(0, compression) }, sense, combination);
+    const { force: unit } = table.units;
+    put(table, member, 'support', 'uplift', caseId, sense, Math.max(0, -compression), unit, at, combination);
+    put(table, member, 'support', 'bearing', caseId, sense, Math.max(0, compression), unit, at, combination);
   };
   GRAVITY.forEach((name, g) => {
     if (force[g] !== 0) add(name, 1, force[g] as number);
