@@ -1,11 +1,11 @@
 import { Inject, Injectable } from '@nestjs/common';
 import { trace } from '@groundward/engine/path/trace';
-import type { Analysis, Demand } from '@groundward/engine/path/result';
+import type { Analysis } from '@groundward/engine/path/result';
 import type { Trace } from '@groundward/engine/path/trace-result';
-import type { Demand as DemandRow } from '../generated/client.js';
 import { DatabaseService } from '../database/database.service.js';
 import { notFound, Problem } from '../faults/problem.js';
 import { RevisionsService } from '../revisions/revisions.service.js';
+import { demandOf, readDemands, type DemandRow } from './demand-rows.js';
 import type { DemandQuery, DemandPage } from './schemas.js';
 
 /** What names one row of a demand table. */
@@ -27,13 +27,13 @@ export class AnalysesService {
   /** The analysis as it was stored when its building was saved. */
   async analysis(userId: string, projectId: string, revisionId: string): Promise<Analysis> {
     await this.revisions.one(userId, projectId, revisionId);
-    const [stored, rows] = await Promise.all([
+    const [stored, demands] = await Promise.all([
       this.database.prisma.analysis.findUnique({ where: { revisionId } }),
-      this.database.prisma.demand.findMany({ where: { revisionId }, orderBy: { position: 'asc' } }),
+      readDemands(this.database.pool, revisionId),
     ]);
     if (stored === null) throw notFound('analysis');
     const document = stored.document as unknown as Omit<Analysis, 'demands'>;
-    return { schema: document.schema, units: document.units, demands: rows.map(demandOf), ...rest(document) };
+    return { schema: document.schema, units: document.units, demands, ...rest(document) };
   }
 
   /** Demand rows by any of their columns, page by page. */
@@ -91,21 +91,6 @@ export class AnalysesService {
       `Found ${fault?.found ?? member}, expected ${fault?.expected ?? 'a member'}.`,
     );
   }
-}
-
-export function demandOf(row: DemandRow): Demand {
-  const demand = {
-    member: row.member,
-    kind: row.kind,
-    quantity: row.quantity,
-    case: row.case,
-    sense: row.sense,
-    value: row.value,
-    unit: row.unit,
-    ...(row.combination === null ? {} : { combination: row.combination }),
-    ...(row.atX === null || row.atY === null ? {} : { at: [row.atX, row.atY] }),
-  };
-  return demand as Demand;
 }
 
 function rest({ diagrams, path, findings, certificate }: Omit<Analysis, 'demands'>) {
