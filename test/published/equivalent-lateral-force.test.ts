@@ -1,4 +1,5 @@
 import { expect, test } from 'vitest';
+import { analysed, value } from './cases.js';
 import {
   baseShear,
   diaphragmForces,
@@ -35,6 +36,17 @@ test('one storey: period, limits and coefficient', () => {
   expect(found.governs).toBe('12.8-2');
   expect(0.31 / (0.19 * 5)).toBeCloseTo(0.326, 3);
   expect(diaphragmForces([{ weight: 2960 }], [0.1 * 2960], basis)[0]).toBeCloseTo(296, 6);
+});
+
+test('one storey, from its file: 296 lb/ft on the roof, and what a simple beam makes of it', () => {
+  // Taly, Example 7.11, pp. 7.56-7.57: F_px = 296 lb/ft on a roof of 120 × 80 ft with walls of 84 psf tributary over 10 ft.
+  // Shear, chord and unit shear derived by the simple beam's equations.
+  const roof = analysed('one-storey-from-basis');
+  expect(value(roof, 'roof', 'diaphragm-force', 'EY')).toBeCloseTo(0.296 * 120, 9);
+  expect(value(roof, 'roof/d/1-2', 'shear', 'EY')).toBeCloseTo(17.76, 9);
+  expect(value(roof, 'roof/d/1-2', 'unit-shear', 'EY')).toBeCloseTo(0.222, 9);
+  expect(value(roof, 'roof/d/1-2', 'moment', 'EY')).toBeCloseTo(532.8, 9);
+  expect(value(roof, 'roof/d/1-2', 'chord-force', 'EY')).toBeCloseTo(6.66, 9);
 });
 
 test('twelve storeys: k between 1 and 2 by the period, and the table of forces', () => {

@@ -42,7 +42,7 @@ export const GravityCase = z
 export const WeightZone = z.strictObject({
   id: Id,
   name: Name.optional(),
-  outline: Ring,
+  outline: Ring.max(200),
   area: Weight.describe('Replaces the diaphragm’s own area weight inside the outline [force/length²]'),
 });
 
@@ -55,8 +55,8 @@ export const WeightLine = z.strictObject({
 
 export const DiaphragmWeight = z.strictObject({
   area: Weight.optional().describe('Seismic weight of floor or roof [force/length²]; default 0'),
-  zones: z.array(WeightZone).optional(),
-  lines: z.array(WeightLine).optional().describe('Façades and partitions, added to area weights'),
+  zones: z.array(WeightZone).max(200).optional(),
+  lines: z.array(WeightLine).max(2000).optional().describe('Façades and partitions, added to area weights'),
 });
 
 export const Opening = z.strictObject({ id: Id, name: Name.optional(), outline: Ring });
@@ -67,7 +67,7 @@ export const Diaphragm = z.strictObject({
   id: Id,
   name: Name.optional(),
   outline: Ring,
-  openings: z.array(Opening).optional(),
+  openings: z.array(Opening).max(200).optional(),
   behaviour: Behaviour.optional().describe('Default flexible'),
   assembly: Id.optional().describe('A diaphragm assembly'),
   meshSize: Positive.optional().describe(
@@ -80,7 +80,7 @@ export const Level = z.strictObject({
   id: Id,
   name: Name.optional(),
   elevation: Coordinate.describe('[length]; the lowest level is the base'),
-  diaphragms: z.array(Diaphragm).optional(),
+  diaphragms: z.array(Diaphragm).max(50).optional(),
 });
 
 export const PierGravity = z.strictObject({
@@ -100,12 +100,12 @@ export const Pier = z.strictObject({
     .union([Weight, z.tuple([Weight, Weight])])
     .optional()
     .describe('Distance of the end posts from the pier’s ends, one number or [near, far] [length]; default 0'),
-  gravity: z.array(PierGravity).optional(),
+  gravity: z.array(PierGravity).max(100).optional(),
 });
 
 export const WallStorey = z.strictObject({
   under: Id.describe('The level which this storey of the wall line holds'),
-  piers: z.array(Pier).min(1),
+  piers: z.array(Pier).min(1).max(500),
 });
 
 export const CollectorExtent = z.strictObject({
@@ -124,9 +124,10 @@ export const WallLine = z.strictObject({
     .describe('How the line’s force goes to its piers; default length'),
   collectors: z
     .array(CollectorExtent)
+    .max(2000)
     .optional()
     .describe('Where a collector runs over less than the whole cut of the diaphragm at the line'),
-  storeys: z.array(WallStorey).min(1),
+  storeys: z.array(WallStorey).min(1).max(500),
 });
 
 const NominalUnitShear = z.strictObject({ seismic: Positive.optional(), wind: Positive.optional() });
@@ -159,9 +160,9 @@ export const HoldDownAssembly = z.strictObject({
 });
 
 export const Assemblies = z.strictObject({
-  diaphragms: z.array(DiaphragmAssembly).optional(),
-  walls: z.array(WallAssembly).optional(),
-  holdDowns: z.array(HoldDownAssembly).optional(),
+  diaphragms: z.array(DiaphragmAssembly).max(2000).optional(),
+  walls: z.array(WallAssembly).max(2000).optional(),
+  holdDowns: z.array(HoldDownAssembly).max(2000).optional(),
 });
 
 export const SeismicBasis = z.strictObject({
@@ -227,7 +228,7 @@ export const StatedCase = z.strictObject({
   ...caseHead,
   kind: z.enum(['seismic', 'wind']),
   from: z.literal('stated'),
-  forces: z.array(LevelForce).min(1),
+  forces: z.array(LevelForce).min(1).max(500),
 });
 
 export const BasisCase = z.strictObject({
@@ -255,9 +256,11 @@ export const Combination = z.strictObject({
 export const Combinations = z
   .union([
     z.enum(['ASCE 7-16 allowable', 'ASCE 7-16 strength', 'ASCE 7-22 allowable', 'ASCE 7-22 strength']),
-    z.array(Combination),
+    z.array(Combination).max(500),
   ])
-  .describe('A published set by name, or a list; default none, which leaves the unfactored components');
+  .describe(
+    'A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it.',
+  );
 
 export const Building = z
   .strictObject({

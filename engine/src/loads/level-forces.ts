@@ -18,18 +18,18 @@ export type LevelForce = {
 const METRES_PER_FOOT = 0.3048;
 
 /**
- * @returns the levels that are pushed, ascending where they come from the basis [force]
+ * @returns the levels that are pushed, ascending [force]
  */
 export function levelForces(building: Building, loadCase: LoadCase): Result<readonly LevelForce[]> {
   if (loadCase.from === 'stated') {
-    return {
-      ok: true,
-      value: loadCase.forces.map(({ level, force, diaphragmForce }) => ({
-        level,
-        force,
-        diaphragmForce: diaphragmForce ?? force,
-      })),
-    };
+    const elevation = new Map(building.levels.map((level) => [level.id, level.elevation]));
+    const stated = loadCase.forces.map(({ level, force, diaphragmForce }) => ({
+      level,
+      force,
+      diaphragmForce: diaphragmForce ?? force,
+    }));
+    stated.sort((a, b) => (elevation.get(a.level) ?? 0) - (elevation.get(b.level) ?? 0));
+    return { ok: true, value: stated };
   }
   const basis = building.basis?.seismic;
   if (basis === undefined)
