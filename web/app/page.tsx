@@ -2,10 +2,12 @@
 import { useQuery, useQueryClient } from '@tanstack/react-query';
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
-import { useEffect, useState } from 'react';
-import { ApiProblem, api } from '@/lib/api';
-import { when } from '@/lib/format';
+import { useState } from 'react';
+import { api } from '@/lib/api';
+import { when, words } from '@/lib/format';
 import { Pending, ProblemView } from '@/parts/problem';
+import { Table } from '@/parts/table';
+import { StateTag } from '@/parts/title-block';
 
 export default function Projects() {
   const projects = useQuery({ queryKey: ['projects'], queryFn: api.projects });
@@ -13,10 +15,6 @@ export default function Projects() {
   const router = useRouter();
   const [name, setName] = useState('');
   const [error, setError] = useState<unknown>(null);
-  const signedOut = projects.error instanceof ApiProblem && projects.error.status === 401;
-  useEffect(() => {
-    if (signedOut) router.replace('/sign-in');
-  }, [signedOut, router]);
   const create = async (): Promise<void> => {
     try {
       const project = await api.createProject(name);
@@ -30,51 +28,45 @@ export default function Projects() {
     <main className="stack">
       <h1>Projects</h1>
       {projects.data === undefined ? (
-        <Pending error={signedOut ? null : projects.error} what="projects" />
+        <Pending error={projects.error} what="projects" />
       ) : (
-        <div className="scroll">
-          <table>
-            <thead>
-              <tr>
-                <th>Project</th>
-                <th>Latest revision</th>
-                <th>State</th>
-                <th>Your role</th>
-                <th>Changed</th>
+        <Table label="Projects">
+          <thead>
+            <tr>
+              <th>Project</th>
+              <th>Latest revision</th>
+              <th>State</th>
+              <th>Your role</th>
+              <th>Changed</th>
+            </tr>
+          </thead>
+          <tbody>
+            {projects.data.map((project) => (
+              <tr key={project.id}>
+                <th scope="row" className="wrap">
+                  <Link href={`/projects/${project.id}`}>{project.name}</Link>
+                </th>
+                <td>
+                  {project.latest === null ? (
+                    'none yet'
+                  ) : (
+                    <Link
+                      href={`/projects/${project.id}/revisions/${project.latest.id}/level`}
+                    >{`${project.latest.number} ${project.latest.name}`}</Link>
+                  )}
+                </td>
+                <td>{project.latest !== null && <StateTag state={project.latest.state} />}</td>
+                <td>{words(project.role)}</td>
+                <td>{when(project.updatedAt)}</td>
               </tr>
-            </thead>
-            <tbody>
-              {projects.data.map((project) => (
-                <tr key={project.id}>
-                  <td className="wrap">
-                    <Link href={`/projects/${project.id}`}>{project.name}</Link>
-                  </td>
-                  <td>
-                    {project.latest === null ? (
-                      'none yet'
-                    ) : (
-                      <Link
-                        href={`/projects/${project.id}/revisions/${project.latest.id}/level`}
-                      >{`${project.latest.number} ${project.latest.name}`}</Link>
-                    )}
-                  </td>
-                  <td>
-                    {project.latest !== null && (
-                      <span className={`tag ${project.latest.state}`}>{project.latest.state}</span>
-                    )}
-                  </td>
-                  <td>{project.role}</td>
-                  <td>{when(project.updatedAt)}</td>
-                </tr>
-              ))}
-              {projects.data.length === 0 && (
-                <tr>
-                  <td colSpan={5}>No project yet. Name one below, then upload a building file into it.</td>
-                </tr>
-              )}
-            </tbody>
-          </table>
-        </div>
+            ))}
+            {projects.data.length === 0 && (
+              <tr>
+                <td colSpan={5}>No project yet. Name one below, then upload a building file into it.</td>
+              </tr>
+            )}
+          </tbody>
+        </Table>
       )}
       <form
         className="bar"

@@ -1,6 +1,7 @@
 'use client';
 import type { Building, Level, Pier, WallLine } from '@groundward/engine/building/definition';
 import type { Demand } from '@groundward/engine/path/result';
+import type { GonePier } from '@/lib/changes';
 import { axisOf, levelsAscending, type DemandIndex, type Loading } from '@/lib/demands';
 import { dimension, quantity } from '@/lib/format';
 import { Arrival, Departure, EndForces, Post, type PostState } from './elevation-signs';
@@ -19,6 +20,8 @@ export type ElevationView = {
   /** Left out, the wall is drawn without forces. */
   readonly forces?: ElevationForces | undefined;
   readonly marks?: ReadonlyMap<string, Mark> | undefined;
+  /** Piers that are no longer there. */
+  readonly gone?: readonly GonePier[] | undefined;
   /** End posts that do not stand on an end post, by their key, with the finding. */
   readonly posts?: ReadonlyMap<string, PostState> | undefined;
 };
@@ -29,6 +32,7 @@ const TOP = 24;
 const FOOT = 40;
 /** A storey is drawn at least so high that it can be written in [px]. */
 const LEAST_STOREY = 70;
+const LEAST_PLAIN = 42;
 /** A short wall is drawn at most so high [px]. */
 const MOST_HEIGHT = 560;
 
@@ -41,7 +45,7 @@ export function ElevationDrawing({ view, width }: { readonly view: ElevationView
   const top = levels[levels.length - 1]?.elevation ?? 1;
   const across = Math.min(Math.max(60, width - LEFT - RIGHT) / length, MOST_HEIGHT / (top - base));
   const lowest = Math.min(...levels.slice(1).map((level, i) => level.elevation - (levels[i]?.elevation ?? 0)));
-  const up = Math.max(across, LEAST_STOREY / lowest);
+  const up = Math.max(across, (forces === undefined ? LEAST_PLAIN : LEAST_STOREY) / lowest);
   const height = (top - base) * up + TOP + FOOT;
   const x = (d: number): number => LEFT + d * across;
   const y = (z: number): number => TOP + (top - z) * up;

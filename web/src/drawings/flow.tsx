@@ -142,15 +142,16 @@ function StepFlow({
   const k = layout.perForce;
   const line = view.flow.columns[step.column]?.line;
   if (line === undefined || (step.shear === 0 && step.above === 0)) return null;
-  const member = `${line.id}/${level.id}`;
+  const stops = step.said.shear === undefined;
+  // What arrives where a line stops is the force of the storey above.
+  const member = `${line.id}/${(stops ? view.flow.levels[i - 1] : undefined)?.id ?? level.id}`;
   const [top, foot] = [layout.top(i), layout.foot(i)];
   const x = layout.x(step.column);
   const end = last ? layout.ground : layout.top(i + 1);
   const half = (k * Math.abs(step.shear)) / 2;
   const tall = Math.max(2, 2 * half);
-  const stroke = step.shear < 0 ? ' against' : '';
+  const stroke = step.shear * k < -1e-6 ? ' against' : '';
   const after = level.steps[step.column + 1];
-  const stops = step.said.shear === undefined;
   return (
     <>
       {after !== undefined && step.after !== 0 && Math.abs(k * step.after) > 0.2 && after.before !== 0 && (
@@ -242,7 +243,7 @@ function Feet({ view, layout, onPick }: Part) {
           shown={view.shown === foot.member}
           onPick={() => onPick(foot.member)}
         >
-          <path d={d} className={tone(view, foot.member) + (foot.shear < 0 ? ' against' : '')} />
+          <path d={d} className={tone(view, foot.member) + (foot.shear * layout.perForce < -1e-6 ? ' against' : '')} />
           <rect
             x={x - 4}
             y={layout.ground + 30}

@@ -1,5 +1,7 @@
 'use client';
 import type { Building, Point } from '@groundward/engine/building/definition';
+import { axisOf } from '@/lib/demands';
+import type { GonePier } from '@/lib/changes';
 import { CollectorShape, largestAxial, type CollectorView } from './collector';
 import { LineLabel, WallLineShape, type Mark } from './plan-lines';
 import { Centres, CursorLine, LoadArrow, ScaleBar, SpanNames, type Centre, type SpanName } from './plan-signs';
@@ -18,6 +20,8 @@ export type PlanView = {
   readonly cursor?: { readonly across: readonly [number, number]; readonly s: number } | undefined;
   /** Marks of piers, by member key. */
   readonly marks?: ReadonlyMap<string, Mark> | undefined;
+  /** Piers that are no longer there. */
+  readonly gone?: readonly GonePier[] | undefined;
   readonly shown?: string | undefined;
 };
 
@@ -66,6 +70,11 @@ export function PlanDrawing({
           onPick={onPick}
         />
       ))}
+      {(plan.gone ?? [])
+        .filter(({ under }) => under === level)
+        .map(({ line, pier }) => (
+          <GoneShape key={`${line.id}/${pier.id}`} line={line} pier={pier} scale={scale} />
+        ))}
       {collectors.map((collector) => (
         <CollectorShape
           key={collector.line.id}
@@ -89,6 +98,22 @@ export function PlanDrawing({
       {plan.load !== undefined && <LoadArrow load={plan.load} scale={scale} box={box} />}
       <ScaleBar unit={building.units.length} scale={scale} box={box} />
     </svg>
+  );
+}
+
+function GoneShape({ line, pier, scale }: Pick<GonePier, 'line' | 'pier'> & { readonly scale: Scale }) {
+  const [a] = line.axis;
+  const { u } = axisOf(line);
+  const at = (d: number) => [scale.x(a[0] + u[0] * d), scale.y(a[1] + u[1] * d)] as const;
+  const [[x1, y1], [x2, y2]] = [at(pier.from), at(pier.to)];
+  return (
+    <g>
+      <line x1={x1} y1={y1} x2={x2} y2={y2} className="gone" />
+      <text x={(x1 + x2) / 2} y={(y1 + y2) / 2 - 6} textAnchor="middle" className="sign halo gone-sign">
+        ✕
+      </text>
+      <title>{`Pier ${pier.id} of line ${line.id} is gone`}</title>
+    </g>
   );
 }
 

@@ -99,6 +99,7 @@ function Level({ view, field, said, width, largest }: One) {
         domain={bounds(view, field)}
         ticks={ticksOf(view, field)}
         tickFormatter={(value: number) => figure(value, 3)}
+        tick={{ fill: 'var(--ink-2)' }}
         tickLine={false}
         axisLine={false}
         interval={0}

@@ -19,6 +19,11 @@ export function quantity(value: number, unit: string, significant = 3): string {
   return unit === '1' || unit === '' ? figure(value, significant) : `${figure(value, significant)}${THIN}${unit}`;
 }
 
+/** How many there are. */
+export function count(value: number): string {
+  return grouped(String(value));
+}
+
 /** A length or a coordinate as drawings give it: to a thousandth, without idle zeros. */
 export function dimension(value: number, unit = ''): string {
   const text = signed(value, grouped(String(Number(Math.abs(value).toFixed(3)))));

@@ -2,6 +2,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { useState, type SubmitEvent } from 'react';
+import { placeAfter } from '@/lib/sign-in';
 import { ProblemView } from './problem';
 
 export type AccountField = {
@@ -36,7 +37,7 @@ export function AccountForm({
     try {
       await submit(Object.fromEntries(fields.map(({ name }) => [name, textOf(data.get(name))])));
       await client.invalidateQueries();
-      router.push('/');
+      router.push(placeAfter(window.location.search));
     } catch (failure) {
       setError(failure);
       setBusy(false);

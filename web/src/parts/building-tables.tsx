@@ -1,19 +1,12 @@
 'use client';
-import type { Building, Pier } from '@groundward/engine/building/definition';
-import type { Fault } from '@groundward/engine/building/fault';
-import { useState } from 'react';
-import { EditTable, type Change, type EditColumn } from './edit-table';
-
-export type TableProps = {
-  readonly document: unknown;
-  readonly faults: readonly Fault[];
-  readonly locked: boolean;
-  readonly onChange: (changes: readonly Change[]) => void;
-};
+import type { Building } from '@groundward/engine/building/definition';
+import { EditTable, type EditColumn, type Editing } from './edit-table';
 
 /** While it is edited the document may be at fault; what can be shown of it is shown. */
-function partsOf(document: unknown): Pick<Building, 'levels' | 'wallLines' | 'loadCases' | 'units' | 'assemblies'> {
-  const file = document as Partial<Building>;
+export function partsOf(
+  document: unknown,
+): Pick<Building, 'levels' | 'wallLines' | 'loadCases' | 'units' | 'assemblies'> {
+  const file = (document ?? {}) as Partial<Building>;
   return {
     levels: Array.isArray(file.levels) ? file.levels : [],
     wallLines: Array.isArray(file.wallLines) ? file.wallLines : [],
@@ -23,8 +16,8 @@ function partsOf(document: unknown): Pick<Building, 'levels' | 'wallLines' | 'lo
   };
 }
 
-export function ForcesTable(props: TableProps) {
-  const { loadCases, units } = partsOf(props.document);
+export function ForcesTable(props: Editing) {
+  const { loadCases, levels, units } = partsOf(props.document);
   return (
     <div className="stack">
       {loadCases.map((loadCase, c) => (
@@ -33,6 +26,7 @@ export function ForcesTable(props: TableProps) {
           {loadCase.from === 'stated' ? (
             <EditTable
               {...props}
+              label={`Forces of ${loadCase.id}`}
               head="Level"
               columns={[
                 { head: 'Storey force', unit: units.force, key: ['force'] },
@@ -43,10 +37,18 @@ export function ForcesTable(props: TableProps) {
                 head: force.level,
                 path: ['loadCases', c, 'forces', f],
               }))}
+              extend={(count) => {
+                const free = levels.slice(1).filter(({ id }) => !loadCase.forces.some((force) => force.level === id));
+                const paths = free
+                  .slice(0, count)
+                  .map((_, i) => ['loadCases', c, 'forces', loadCase.forces.length + i]);
+                return { paths, changes: paths.map((path, i) => ({ path, value: { level: free[i]?.id ?? '' } })) };
+              }}
             />
           ) : (
             <p className="note">
-              The forces of this case come from the basis of design and the weights; they stand on the level’s page.
+              The forces of this case are computed from the basis of design and the weights; they stand on the pages of
+              the levels.
             </p>
           )}
         </section>
@@ -65,16 +67,18 @@ const BASIS: readonly EditColumn[] = [
   { head: 'C_d', key: ['Cd'] },
   { head: 'I_e', key: ['importance'] },
   { head: 'ρ', key: ['redundancy'] },
+  { head: 'T', unit: 's', key: ['period'] },
 ];
 
-function BasisTable(props: TableProps) {
-  const file = props.document as Partial<Building>;
+function BasisTable(props: Editing) {
+  const file = (props.document ?? {}) as Partial<Building>;
   if (file.basis?.seismic === undefined) return null;
   return (
     <section className="panel">
       <h2>{`Seismic basis, ${file.basis.standard}`}</h2>
       <EditTable
         {...props}
+        label="Seismic basis"
         head=""
         columns={BASIS}
         rows={[{ key: 'basis', head: 'values', path: ['basis', 'seismic'] }]}
@@ -83,15 +87,44 @@ function BasisTable(props: TableProps) {
   );
 }
 
-export function WeightsTable(props: TableProps) {
+export function LevelsTable(props: Editing) {
   const { levels, units } = partsOf(props.document);
+  return (
+    <EditTable
+      {...props}
+      label="Levels"
+      head="Level"
+      columns={[
+        { head: 'Name', key: ['name'], text: true },
+        { head: 'Elevation', unit: units.length, key: ['elevation'] },
+      ]}
+      rows={levels.map((level, l) => ({ key: level.id, head: level.id, path: ['levels', l] }))}
+    />
+  );
+}
+
+export function WeightsTable(props: Editing) {
+  const { levels, units, assemblies } = partsOf(props.document);
   const perArea = `${units.force}/${units.length}²`;
-  const perLength = `${units.force}/${units.length}`;
   const diaphragms = levels.flatMap((level, l) =>
     (level.diaphragms ?? []).map((diaphragm, d) => ({
       level,
       diaphragm,
       path: ['levels', l, 'diaphragms', d] as const,
+    })),
+  );
+  const zones = diaphragms.flatMap(({ level, diaphragm, path }) =>
+    (diaphragm.weight?.zones ?? []).map((zone, z) => ({
+      key: `${level.id}/${zone.id}`,
+      head: `${level.name ?? level.id}: ${zone.name ?? zone.id}`,
+      path: [...path, 'weight', 'zones', z],
+    })),
+  );
+  const lines = diaphragms.flatMap(({ level, diaphragm, path }) =>
+    (diaphragm.weight?.lines ?? []).map((line, i) => ({
+      key: `${level.id}/${line.id}`,
+      head: `${level.name ?? level.id}: ${line.name ?? line.id}`,
+      path: [...path, 'weight', 'lines', i],
     })),
   );
   return (
@@ -100,10 +133,12 @@ export function WeightsTable(props: TableProps) {
         <h2>Floors and roofs</h2>
         <EditTable
           {...props}
+          label="Floors and roofs"
           head="Diaphragm"
           columns={[
             { head: 'Behaviour', key: ['behaviour'], choices: ['flexible', 'rigid', 'semi-rigid'] },
             { head: 'Area weight', unit: perArea, key: ['weight', 'area'] },
+            { head: 'Assembly', key: ['assembly'], choices: (assemblies?.diaphragms ?? []).map(({ id }) => id) },
           ]}
           rows={diaphragms.map(({ level, diaphragm, path }) => ({
             key: `${level.id}/${diaphragm.id}`,
@@ -112,181 +147,50 @@ export function WeightsTable(props: TableProps) {
           }))}
         />
       </section>
-      <section className="panel">
-        <h2>Zones</h2>
-        <EditTable
-          {...props}
-          head="Zone"
-          columns={[{ head: 'Area weight', unit: perArea, key: ['area'] }]}
-          rows={diaphragms.flatMap(({ level, diaphragm, path }) =>
-            (diaphragm.weight?.zones ?? []).map((zone, z) => ({
-              key: `${level.id}/${zone.id}`,
-              head: `${level.name ?? level.id}: ${zone.name ?? zone.id}`,
-              path: [...path, 'weight', 'zones', z],
-            })),
-          )}
-        />
-      </section>
-      <section className="panel">
-        <h2>Façades and partitions</h2>
-        <EditTable
-          {...props}
-          head="Line"
-          columns={[{ head: 'Weight', unit: perLength, key: ['perLength'] }]}
-          rows={diaphragms.flatMap(({ level, diaphragm, path }) =>
-            (diaphragm.weight?.lines ?? []).map((line, i) => ({
-              key: `${level.id}/${line.id}`,
-              head: `${level.name ?? level.id}: ${line.name ?? line.id}`,
-              path: [...path, 'weight', 'lines', i],
-            })),
-          )}
-        />
-      </section>
+      {zones.length > 0 && (
+        <section className="panel">
+          <h2>Zones, instead of the area weight inside their outline</h2>
+          <EditTable
+            {...props}
+            label="Weight zones"
+            head="Zone"
+            columns={[{ head: 'Area weight', unit: perArea, key: ['area'] }]}
+            rows={zones}
+          />
+        </section>
+      )}
+      {lines.length > 0 && (
+        <section className="panel">
+          <h2>Façades and partitions</h2>
+          <EditTable
+            {...props}
+            label="Façades and partitions"
+            head="Line"
+            columns={[{ head: 'Weight', unit: `${units.force}/${units.length}`, key: ['perLength'] }]}
+            rows={lines}
+          />
+        </section>
+      )}
     </div>
   );
 }
 
-export function LinesTable(props: TableProps) {
+export function LinesTable(props: Editing) {
   const { wallLines, units } = partsOf(props.document);
   return (
     <EditTable
       {...props}
+      label="Wall lines"
       head="Line"
       columns={[
         { head: 'Name', key: ['name'], text: true },
-        { head: 'from x', unit: units.length, key: ['axis', 0, 0] },
-        { head: 'from y', unit: units.length, key: ['axis', 0, 1] },
-        { head: 'to x', unit: units.length, key: ['axis', 1, 0] },
-        { head: 'to y', unit: units.length, key: ['axis', 1, 1] },
+        { head: 'From x', unit: units.length, key: ['axis', 0, 0] },
+        { head: 'From y', unit: units.length, key: ['axis', 0, 1] },
+        { head: 'To x', unit: units.length, key: ['axis', 1, 0] },
+        { head: 'To y', unit: units.length, key: ['axis', 1, 1] },
         { head: 'Piers share by', key: ['shareBy'], choices: ['length', 'stiffness'] },
       ]}
       rows={wallLines.map((line, l) => ({ key: line.id, head: line.id, path: ['wallLines', l] }))}
     />
-  );
-}
-
-export function PiersTable(props: TableProps) {
-  const { wallLines, units, assemblies } = partsOf(props.document);
-  const [only, setOnly] = useState(wallLines[0]?.id ?? '');
-  const columns: readonly EditColumn[] = [
-    { head: 'From', unit: units.length, key: ['from'] },
-    { head: 'To', unit: units.length, key: ['to'] },
-    { head: 'Assembly', key: ['assembly'], choices: (assemblies?.walls ?? []).map((wall) => wall.id) },
-    { head: 'Stiffness', unit: `${units.force}/${units.length}`, key: ['stiffness'] },
-    { head: 'Post offset', unit: units.length, key: ['endOffset'] },
-    { head: 'Dead', unit: `${units.force}/${units.length}`, key: ['gravity', 0, 'perLength'] },
-  ];
-  const gravityOf = (pier: Pier): string => (pier.gravity ?? []).map((load) => load.case).join(', ');
-  return (
-    <>
-      <div className="bar">
-        <label>
-          Wall line
-          <select value={only} onChange={(event) => setOnly(event.target.value)}>
-            <option value="">all</option>
-            {wallLines.map((line) => (
-              <option key={line.id} value={line.id}>
-                {line.name ?? line.id}
-              </option>
-            ))}
-          </select>
-        </label>
-      </div>
-      <EditTable
-        {...props}
-        head="Pier"
-        columns={columns}
-        rows={wallLines.flatMap((line, l) =>
-          only !== '' && line.id !== only
-            ? []
-            : line.storeys.flatMap((storey, s) =>
-                storey.piers.map((pier, p) => ({
-                  key: `${line.id}/${storey.under}/${pier.id}`,
-                  head: `${line.id}/${storey.under}/${pier.id}`,
-                  path: ['wallLines', l, 'storeys', s, 'piers', p],
-                  actions: props.locked ? (
-                    <span className="note">{gravityOf(pier)}</span>
-                  ) : (
-                    <>
-                      <button
-                        className="quiet"
-                        onClick={() =>
-                          props.onChange([
-                            {
-                              path: ['wallLines', l, 'storeys', s, 'piers'],
-                              value: [...storey.piers, following(storey.piers, pier)],
-                            },
-                          ])
-                        }
-                      >
-                        Add beside
-                      </button>
-                      {storey.piers.length > 1 && (
-                        <button
-                          className="quiet"
-                          onClick={() =>
-                            props.onChange([
-                              {
-                                path: ['wallLines', l, 'storeys', s, 'piers'],
-                                value: storey.piers.filter((other) => other !== pier),
-                              },
-                            ])
-                          }
-                        >
-                          Remove
-                        </button>
-                      )}
-                    </>
-                  ),
-                })),
-              ),
-        )}
-      />
-    </>
-  );
-}
-
-/** A pier as long as its neighbour, just beyond the last one, with an id that is free. */
-function following(piers: readonly Pier[], like: Pier): Pier {
-  const end = Math.max(...piers.map((pier) => pier.to));
-  let n = piers.length + 1;
-  while (piers.some((pier) => pier.id === `p${n}`)) n += 1;
-  return { ...like, id: `p${n}`, from: end, to: end + (like.to - like.from) };
-}
-
-export function RawFile({
-  document,
-  locked,
-  onReplace,
-}: {
-  readonly document: unknown;
-  readonly locked: boolean;
-  readonly onReplace: (document: unknown) => void;
-}) {
-  const [text, setText] = useState(() => JSON.stringify(document, null, 2));
-  const [fault, setFault] = useState('');
-  return (
-    <section className="panel">
-      <h2>The building file</h2>
-      <textarea
-        className="raw"
-        spellCheck={false}
-        aria-label="The building file"
-        readOnly={locked}
-        value={text}
-        onChange={(event) => setText(event.target.value)}
-        onBlur={() => {
-          if (locked) return;
-          try {
-            const next: unknown = JSON.parse(text);
-            setFault('');
-            if (JSON.stringify(next) !== JSON.stringify(document)) onReplace(next);
-          } catch (error) {
-            setFault(`Not JSON yet: ${error instanceof Error ? error.message : String(error)}`);
-          }
-        }}
-      />
-      {fault !== '' && <p className="problem">{fault}</p>}
-    </section>
   );
 }

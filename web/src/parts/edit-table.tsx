@@ -2,7 +2,9 @@
 import type { Fault } from '@groundward/engine/building/fault';
 import { faultSentence } from '@groundward/engine/building/fault';
 import type { ClipboardEvent, ReactNode } from 'react';
-import { getAt, jsonPath, pastedCells, typedNumber, type Path } from '@/lib/edit';
+import { faultsAt, getAt, jsonPath, pastedCells, shown, typedNumber, type Change, type Path } from '@/lib/edit';
+import { EditCell } from './edit-cell';
+import { Table } from './table';
 
 export type EditColumn = {
   readonly head: string;
@@ -10,6 +12,9 @@ export type EditColumn = {
   readonly key: Path;
   readonly text?: boolean;
   readonly choices?: readonly string[];
+  /** Where a cell is not simply the value at `key`: how it is read from the row, and put back into it. */
+  readonly read?: (row: unknown) => unknown;
+  readonly write?: (row: unknown, typed: string) => unknown;
 };
 
 export type EditRow = {
@@ -19,127 +24,115 @@ export type EditRow = {
   readonly actions?: ReactNode;
 };
 
-export type Change = { readonly path: Path; readonly value: unknown };
-
-/** A table of the building file's own values. A block pasted from a spreadsheet fills the cells from the one that has the focus. */
-export function EditTable({
-  document,
-  head,
-  columns,
-  rows,
-  faults,
-  locked,
-  onChange,
-}: {
+/** What an editing table needs of the editor that it stands in. */
+export type Editing = {
   readonly document: unknown;
-  readonly head: string;
-  readonly columns: readonly EditColumn[];
-  readonly rows: readonly EditRow[];
+  /** The building as last saved: cells that differ from it are marked. */
+  readonly saved: unknown;
   readonly faults: readonly Fault[];
   readonly locked: boolean;
   readonly onChange: (changes: readonly Change[]) => void;
+};
+
+/**
+ * A table of the building file's own values. A block pasted from a spreadsheet fills the cells from the one that has the focus; where
+ * it is longer than the table, `extend` makes the rows that it needs.
+ */
+export function EditTable({
+  label,
+  head,
+  columns,
+  rows,
+  extend,
+  document,
+  saved,
+  faults,
+  locked,
+  onChange,
+}: Editing & {
+  readonly label: string;
+  readonly head: string;
+  readonly columns: readonly EditColumn[];
+  readonly rows: readonly EditRow[];
+  readonly extend?: (count: number) => { readonly paths: readonly Path[]; readonly changes: readonly Change[] };
 }) {
-  const valueOf = (column: EditColumn, text: string): unknown =>
-    column.text === true || column.choices !== undefined ? (text === '' ? undefined : text) : typedNumber(text);
   const paste = (event: ClipboardEvent, r: number, c: number): void => {
     const cells = pastedCells(event.clipboardData.getData('text/plain'));
     if (cells.length === 1 && cells[0]?.length === 1) return;
     event.preventDefault();
-    onChange(
-      cells.flatMap((line, i) =>
-        line.flatMap((cell, j) => {
-          const row = rows[r + i];
-          const column = columns[c + j];
-          return row === undefined || column === undefined
-            ? []
-            : [{ path: [...row.path, ...column.key], value: valueOf(column, cell.trim()) }];
+    const missing = Math.max(0, r + cells.length - rows.length);
+    const more = missing === 0 ? undefined : extend?.(missing);
+    const paths = [...rows.map(({ path }) => path), ...(more?.paths ?? [])];
+    onChange([
+      ...(more?.changes ?? []),
+      ...cells.flatMap((line, i) =>
+        line.flatMap((cell, j): Change[] => {
+          const [path, column] = [paths[r + i], columns[c + j]];
+          return path === undefined || column === undefined ? [] : [changeOf(column, path, cell.trim())];
         }),
       ),
-    );
+    ]);
   };
   return (
-    <div className="scroll">
-      <table className="edit">
-        <thead>
-          <tr>
-            <th>{head}</th>
-            {columns.map((column) => (
-              <th key={column.head}>
-                {column.head}
-                {column.unit !== undefined && <span style={{ fontWeight: 400 }}>{` [${column.unit}]`}</span>}
-              </th>
-            ))}
-            <th aria-label="Actions" />
-          </tr>
-        </thead>
-        <tbody>
-          {rows.map((row, r) => (
-            <tr key={row.key}>
-              <td>{row.head}</td>
-              {columns.map((column, c) => {
-                const path = [...row.path, ...column.key];
-                const value = getAt(document, path);
-                const where = jsonPath(path);
-                const fault = faults.find(
-                  (candidate) =>
-                    candidate.path === where ||
-                    candidate.path.startsWith(`${where}[`) ||
-                    candidate.path.startsWith(`${where}.`),
-                );
-                const text = shown(value);
-                const label = `${column.head} of ${row.key}`;
-                return (
-                  <td key={column.head}>
-                    {column.choices !== undefined ? (
-                      <select
-                        aria-label={label}
-                        aria-invalid={fault !== undefined}
-                        disabled={locked}
-                        value={text}
-                        onChange={(event) => onChange([{ path, value: valueOf(column, event.target.value) }])}
-                      >
-                        <option value="">–</option>
-                        {column.choices.map((choice) => (
-                          <option key={choice}>{choice}</option>
-                        ))}
-                      </select>
-                    ) : (
-                      <input
-                        aria-label={label}
-                        aria-invalid={fault !== undefined}
-                        title={fault === undefined ? undefined : faultSentence(fault)}
-                        className={column.text === true ? 'text' : undefined}
-                        readOnly={locked}
-                        defaultValue={text}
-                        key={text}
-                        inputMode={column.text === true ? 'text' : 'decimal'}
-                        onPaste={(event) => !locked && paste(event, r, c)}
-                        onBlur={(event) => {
-                          if (!locked && event.target.value !== text)
-                            onChange([{ path, value: valueOf(column, event.target.value) }]);
-                        }}
-                        onKeyDown={(event) => event.key === 'Enter' && event.currentTarget.blur()}
-                      />
-                    )}
-                    {fault !== undefined && (
-                      <div
-                        style={{ color: 'var(--alarm)', fontSize: 11, maxWidth: 180, whiteSpace: 'normal' }}
-                      >{`expected ${fault.expected}`}</div>
-                    )}
-                  </td>
-                );
-              })}
-              <td>{row.actions}</td>
-            </tr>
+    <Table label={label} className="edit">
+      <thead>
+        <tr>
+          <th>{head}</th>
+          {columns.map((column) => (
+            <th key={column.head}>{column.unit === undefined ? column.head : `${column.head} [${column.unit}]`}</th>
           ))}
-        </tbody>
-      </table>
-    </div>
+          <th aria-label="Actions" />
+        </tr>
+      </thead>
+      <tbody>
+        {rows.map((row, r) => (
+          <tr key={row.key}>
+            <th scope="row">
+              {row.head}
+              {faults
+                .filter(({ path }) => path === jsonPath(row.path))
+                .map((fault) => (
+                  <div key={faultSentence(fault)} className="fault">
+                    {faultSentence(fault)}
+                  </div>
+                ))}
+            </th>
+            {columns.map((column, c) => {
+              const path = [...row.path, ...column.key];
+              return (
+                <EditCell
+                  key={column.head}
+                  label={`${column.head} of ${row.key}`}
+                  where={jsonPath(path)}
+                  text={textOf(column, document, row.path)}
+                  was={textOf(column, saved, row.path)}
+                  faults={faultsAt(faults, path)}
+                  locked={locked}
+                  wide={column.text === true}
+                  choices={column.choices}
+                  onType={(typed) => onChange([changeOf(column, row.path, typed)])}
+                  onPaste={(event) => paste(event, r, c)}
+                />
+              );
+            })}
+            <td>{row.actions}</td>
+          </tr>
+        ))}
+      </tbody>
+    </Table>
   );
 }
 
-/** A value of the file as its cell shows it. */
-function shown(value: unknown): string {
-  if (value === undefined || value === null) return '';
-  return typeof value === 'string' ? value : JSON.stringify(value);
+function textOf(column: EditColumn, document: unknown, path: Path): string {
+  const row = getAt(document, path);
+  return shown(column.read === undefined ? getAt(row, column.key) : column.read(row));
+}
+
+/** A change of one cell. One that is put back into its row is worked out when it is applied, so that two on one row both count. */
+function changeOf(column: EditColumn, path: Path, typed: string): Change {
+  const { write } = column;
+  if (write !== undefined) return { path, value: (row: unknown) => write(row, typed) };
+  const value =
+    column.text === true || column.choices !== undefined ? (typed === '' ? undefined : typed) : typedNumber(typed);
+  return { path: [...path, ...column.key], value };
 }

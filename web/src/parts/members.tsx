@@ -2,8 +2,10 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { api, type ProjectDetail, type Role } from '@/lib/api';
+import { words } from '@/lib/format';
 import { ProblemView } from './problem';
 import { Select } from './select';
+import { Table } from './table';
 
 const ROLES: readonly Role[] = ['owner', 'engineer', 'checker', 'foundation-designer', 'reader'];
 
@@ -34,33 +36,31 @@ export function Members({ project }: { readonly project: ProjectDetail }) {
   return (
     <section className="panel">
       <h2>People</h2>
-      <div className="scroll">
-        <table>
-          <tbody>
-            {project.members.map((member) => (
-              <tr key={member.userId}>
-                <td>{member.name}</td>
-                <td>{member.email}</td>
-                <td>{member.role}</td>
-                <td>
-                  {owner && (
-                    <button
-                      className="quiet"
-                      onClick={() =>
-                        void attempt(async () => {
-                          await api.removeMember(project.id, member.userId);
-                        })
-                      }
-                    >
-                      Remove
-                    </button>
-                  )}
-                </td>
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      </div>
+      <Table label="People">
+        <tbody>
+          {project.members.map((member) => (
+            <tr key={member.userId}>
+              <th scope="row">{member.name}</th>
+              <td>{member.email}</td>
+              <td>{words(member.role)}</td>
+              <td>
+                {owner && (
+                  <button
+                    className="quiet"
+                    onClick={() =>
+                      void attempt(async () => {
+                        await api.removeMember(project.id, member.userId);
+                      })
+                    }
+                  >
+                    Remove
+                  </button>
+                )}
+              </td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
       {owner && (
         <form
           className="bar"
@@ -77,7 +77,7 @@ export function Members({ project }: { readonly project: ProjectDetail }) {
           <Select
             label="Role"
             value={role}
-            options={ROLES.map((value) => ({ value, name: value }))}
+            options={ROLES.map((value) => ({ value, name: words(value) }))}
             onChange={(value) => setRole(value as Role)}
           />
           <button>Let in</button>

@@ -1,8 +1,8 @@
 import { faultSentence } from '@groundward/engine/building/fault';
 import { ApiProblem } from '@/lib/api';
 
-/** What went wrong, with every fault in its own sentence. */
-export function ProblemView({ error }: { readonly error: unknown }) {
+/** What went wrong, with every fault in its own sentence; `onGo` leads to a fault's place in the building file. */
+export function ProblemView({ error, onGo }: { readonly error: unknown; readonly onGo?: (path: string) => void }) {
   if (error === null || error === undefined) return null;
   const faults = error instanceof ApiProblem ? error.faults : [];
   return (
@@ -11,7 +11,14 @@ export function ProblemView({ error }: { readonly error: unknown }) {
       {faults.length > 0 && (
         <ul>
           {faults.map((fault, i) => (
-            <li key={i}>{faultSentence(fault)}</li>
+            <li key={i}>
+              {faultSentence(fault)}{' '}
+              {onGo !== undefined && fault.path !== '' && (
+                <button className="quiet" onClick={() => onGo(fault.path)}>
+                  go there
+                </button>
+              )}
+            </li>
           ))}
         </ul>
       )}
@@ -19,10 +26,12 @@ export function ProblemView({ error }: { readonly error: unknown }) {
   );
 }
 
-/** Loading, failed or there. */
+/** Loading, or failed. */
 export function Pending({ error, what }: { readonly error: unknown; readonly what: string }) {
   return error === null || error === undefined ? (
-    <p className="note">Reading {what} …</p>
+    <p className="note" role="status">
+      Reading {what} …
+    </p>
   ) : (
     <ProblemView error={error} />
   );

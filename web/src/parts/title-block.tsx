@@ -30,13 +30,7 @@ export function TitleBlock({
           </>
         )}
       </Cell>
-      <Cell name="State">
-        {state === undefined ? (
-          '…'
-        ) : (
-          <span className={`tag ${state}`}>{state === 'issued' ? '■ issued' : '□ draft'}</span>
-        )}
-      </Cell>
+      <Cell name="State">{state === undefined ? '…' : <StateTag state={state} />}</Cell>
       <Cell name={state === 'issued' ? 'Issued' : 'Saved'} narrow>
         {revision === undefined ? '…' : when(revision.issuedAt ?? revision.updatedAt)}
       </Cell>
@@ -78,6 +72,10 @@ function Cell({
       <dd>{children}</dd>
     </div>
   );
+}
+
+export function StateTag({ state }: { readonly state: Revision['state'] }) {
+  return <span className={`tag ${state}`}>{state === 'issued' ? '■ issued' : '□ draft'}</span>;
 }
 
 const SIGNS = [

@@ -35,7 +35,7 @@ export function TopBar() {
   );
 }
 
-const THEMES = { system: 'Light: as the system', light: 'Light', dark: 'Dark' } as const;
+const THEMES = { system: 'Light or dark as the system', light: 'Light', dark: 'Dark' } as const;
 type ThemeName = keyof typeof THEMES;
 
 function Theme() {
@@ -52,6 +52,7 @@ function Theme() {
   return (
     <button
       className="quiet"
+      title="Light, dark, or as the system"
       onClick={() => {
         const chosen = next[theme];
         window.localStorage.setItem('theme', chosen);

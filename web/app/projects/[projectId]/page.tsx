@@ -4,10 +4,10 @@ import Link from 'next/link';
 import { useParams, useRouter } from 'next/navigation';
 import { useState, type ChangeEvent } from 'react';
 import { api, type Revision } from '@/lib/api';
-import { shortHash, when } from '@/lib/format';
 import { IssueForm } from '@/parts/issue-form';
 import { Members } from '@/parts/members';
 import { Pending, ProblemView } from '@/parts/problem';
+import { RevisionTable } from '@/parts/revision-table';
 
 export default function Project() {
   const { projectId } = useParams<{ projectId: string }>();
@@ -85,80 +85,24 @@ export default function Project() {
           <span className="note">Tick two revisions to compare them.</span>
         )}
       </div>
-      <div className="scroll">
-        <table>
-          <thead>
-            <tr>
-              <th aria-label="Compare" />
-              <th className="n">No.</th>
-              <th>Revision</th>
-              <th>State</th>
-              <th>Findings</th>
-              <th>Purpose</th>
-              <th>By</th>
-              <th>Date</th>
-              <th>Hash</th>
-              <th aria-label="Actions" />
-            </tr>
-          </thead>
-          <tbody>
-            {[...list].reverse().map((revision) => (
-              <tr key={revision.id}>
-                <td>
-                  <input
-                    type="checkbox"
-                    style={{ minHeight: 0 }}
-                    aria-label={`Compare revision ${revision.number}`}
-                    checked={picked.includes(revision.id)}
-                    onChange={() => pick(revision.id)}
-                  />
-                </td>
-                <td className="n">{revision.number}</td>
-                <td className="wrap">
-                  <Link href={`/projects/${projectId}/revisions/${revision.id}/level`}>{revision.name}</Link>
-                  {revision.remarks !== null && <div className="note">{revision.remarks}</div>}
-                </td>
-                <td>
-                  <span className={`tag ${revision.state}`}>{revision.state}</span>
-                </td>
-                <td>
-                  <Link href={`/projects/${projectId}/revisions/${revision.id}/findings`}>
-                    {findingsText(revision)}
-                  </Link>
-                </td>
-                <td className="wrap">{revision.purpose ?? ''}</td>
-                <td>{revision.createdBy}</td>
-                <td>{when(revision.issuedAt ?? revision.updatedAt)}</td>
-                <td style={{ fontFamily: 'var(--mono)' }} title={revision.hash}>
-                  {shortHash(revision.hash)}
-                </td>
-                <td>
-                  {mayWrite && revision.state === 'draft' && (
-                    <button onClick={() => setIssuing(revision)}>Issue …</button>
-                  )}{' '}
-                  {mayWrite && <button onClick={() => void follow(revision)}>Revise</button>}{' '}
-                  {mayWrite && revision.state === 'draft' && (
-                    <button
-                      className="quiet"
-                      onClick={() => {
-                        if (window.confirm(`Delete draft ${revision.number}, ${revision.name}?`))
-                          void attempt(() => api.removeRevision(projectId, revision.id, revision.version));
-                      }}
-                    >
-                      Delete
-                    </button>
-                  )}
-                </td>
-              </tr>
-            ))}
-            {list.length === 0 && (
-              <tr>
-                <td colSpan={10}>No revision yet: upload a building file.</td>
-              </tr>
-            )}
-          </tbody>
-        </table>
-      </div>
+      <RevisionTable
+        revisions={[...list].reverse()}
+        root={`/projects/${projectId}/revisions`}
+        picked={picked}
+        onPick={pick}
+        actions={
+          mayWrite
+            ? {
+                revise: (revision) => void follow(revision),
+                issue: setIssuing,
+                remove: (revision) => {
+                  if (window.confirm(`Delete draft ${revision.number}, ${revision.name}?`))
+                    void attempt(() => api.removeRevision(projectId, revision.id, revision.version));
+                },
+              }
+            : undefined
+        }
+      />
       {issuing !== null && (
         <IssueForm
           revision={issuing}
@@ -174,9 +118,4 @@ export default function Project() {
       <Members project={project.data} />
     </main>
   );
-}
-
-function findingsText(revision: Revision): string {
-  const { openEnd, warning, note } = revision.summary.findings;
-  return `${openEnd} open, ${warning} warnings, ${note} notes`;
 }

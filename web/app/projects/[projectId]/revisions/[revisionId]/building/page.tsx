@@ -1,14 +1,16 @@
 'use client';
 import type { Building } from '@groundward/engine/building/definition';
-import { useQueryClient } from '@tanstack/react-query';
 import { useEffect, useState, type ChangeEvent } from 'react';
 import { ApiProblem, api, type Revision } from '@/lib/api';
-import { setAt } from '@/lib/edit';
-import { useQueryState } from '@/lib/query-state';
+import { currentOf, useDraft, type Draft } from '@/lib/draft';
+import { when } from '@/lib/format';
+import { useQueryPatch, useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
-import { ForcesTable, LinesTable, PiersTable, RawFile, WeightsTable } from '@/parts/building-tables';
-import type { Change } from '@/parts/edit-table';
+import { ForcesTable, LevelsTable, LinesTable, partsOf, WeightsTable } from '@/parts/building-tables';
+import type { Editing } from '@/parts/edit-table';
+import { PiersTable } from '@/parts/piers-table';
 import { Pending, ProblemView } from '@/parts/problem';
+import { RawFile } from '@/parts/raw-file';
 
 export default function BuildingPage() {
   const { projectId, revisionId, revision, building, error } = useRevision();
@@ -18,21 +20,24 @@ export default function BuildingPage() {
   );
 }
 
-type Kept = { readonly version: number; readonly document: unknown };
-
-/** What was typed and not saved is kept in the browser until it is saved or dropped. */
-function kept(id: string): Kept | null {
-  const text = window.localStorage.getItem(`draft ${id}`);
-  return text === null ? null : (JSON.parse(text) as Kept);
-}
-
 const SECTIONS = [
   ['forces', 'Forces'],
-  ['weights', 'Weights'],
+  ['levels', 'Levels'],
+  ['weights', 'Floors and weights'],
   ['lines', 'Wall lines'],
   ['piers', 'Piers'],
   ['file', 'The file itself'],
 ] as const;
+
+/** Where the tables show a place of the file. */
+function sectionOf(path: string): (typeof SECTIONS)[number][0] {
+  if (/^(loadCases|basis)/.test(path)) return 'forces';
+  if (/^wallLines\[\d+\]\.storeys/.test(path)) return 'piers';
+  if (/^wallLines/.test(path)) return 'lines';
+  if (/^levels\[\d+\]\.(name|elevation)/.test(path)) return 'levels';
+  if (/^levels\[\d+\]\.diaphragms\[\d+\]\.(weight|behaviour|assembly)/.test(path)) return 'weights';
+  return 'file';
+}
 
 function Editor({
   projectId,
@@ -43,123 +48,40 @@ function Editor({
   readonly revision: Revision;
   readonly saved: Building;
 }) {
-  const client = useQueryClient();
-  const [document, setDocument] = useState<unknown>(saved);
-  const [version, setVersion] = useState(revision.version);
-  const [error, setError] = useState<unknown>(null);
-  const [busy, setBusy] = useState(false);
-  const [message, setMessage] = useState('');
-  const [section, setSection] = useQueryState('section', 'piers');
+  const draft = useDraft(projectId, revision, saved);
+  const patch = useQueryPatch();
+  const [section] = useQueryState('section', 'piers');
+  const [target, setTarget] = useState('');
   const locked = revision.state === 'issued';
-  const dirty = document !== saved;
-  const store = `draft ${revision.id}`;
   useEffect(() => {
-    const before = kept(revision.id);
-    if (before !== null && !locked) {
-      setDocument(before.document);
-      setVersion(before.version);
-      setMessage('Unsaved changes from before were brought back.');
+    if (target === '') return;
+    const field = window.document.querySelector<HTMLElement>(`[data-path="${CSS.escape(target)}"]`);
+    if (field === null) {
+      if (section === 'file') setTarget('');
+      return;
     }
-  }, [revision.id, locked]);
-  const edit = (next: unknown): void => {
-    setDocument(next);
-    setMessage('');
-    window.localStorage.setItem(store, JSON.stringify({ version, document: next }));
+    field.scrollIntoView({ block: 'center' });
+    field.focus();
+    setTarget('');
+  }, [target, section]);
+  const goTo = (path: string): void => {
+    const line = /^wallLines\[(\d+)\]\.storeys/.exec(path)?.[1];
+    const id = line === undefined ? undefined : partsOf(draft.document).wallLines[Number(line)]?.id;
+    patch({ section: sectionOf(path), ...(id === undefined ? {} : { line: id }) });
+    setTarget(path);
   };
-  const change = (changes: readonly Change[]): void =>
-    edit(changes.reduce<unknown>((now, { path, value }) => setAt(now, path, value), document));
-  const drop = (): void => {
-    window.localStorage.removeItem(store);
-    setDocument(saved);
-    setVersion(revision.version);
-    setError(null);
-    setMessage('');
+  const editing: Editing = {
+    document: draft.document,
+    saved,
+    faults: draft.error instanceof ApiProblem ? draft.error.faults : [],
+    locked,
+    onChange: draft.change,
   };
-  const save = async (): Promise<void> => {
-    setBusy(true);
-    setError(null);
-    setMessage('');
-    try {
-      await api.save(projectId, revision.id, JSON.stringify(document), version);
-      window.localStorage.removeItem(store);
-      await client.invalidateQueries({ queryKey: ['revision', revision.id] });
-      await client.invalidateQueries({ queryKey: ['revisions', projectId] });
-    } catch (failure) {
-      setError(failure);
-    }
-    setBusy(false);
-  };
-  const upload = async (event: ChangeEvent<HTMLInputElement>): Promise<void> => {
-    const file = event.target.files?.[0];
-    if (file === undefined) return;
-    event.target.value = '';
-    try {
-      edit(JSON.parse(await file.text()));
-      setMessage(`${file.name} is in the editor; it is checked when you save.`);
-    } catch {
-      setError(new Error(`${file.name} is not JSON.`));
-    }
-  };
-  const faults = error instanceof ApiProblem ? error.faults : [];
-  const stale = error instanceof ApiProblem && error.status === 412;
-  const shared = { document, faults, locked, onChange: change };
   return (
     <>
-      <div className="bar">
-        {!locked && (
-          <button className="primary" disabled={!dirty || busy} onClick={() => void save()}>
-            {busy ? 'Saving and analysing …' : 'Save and analyse'}
-          </button>
-        )}
-        {!locked && dirty && (
-          <button disabled={busy} onClick={drop}>
-            Drop the changes
-          </button>
-        )}
-        <a href={api.downloadHref(projectId, revision.id)} download>
-          Download the building file
-        </a>
-        {!locked && (
-          <label>
-            Replace by a building file
-            <input type="file" accept=".json,application/json" onChange={(event) => void upload(event)} />
-          </label>
-        )}
-        <span className="note" role="status">
-          {locked
-            ? 'Issued: nothing here can change. Make a new revision from it.'
-            : dirty
-              ? 'Changed, not saved.'
-              : 'Saved.'}{' '}
-          {message}
-        </span>
-      </div>
-      {stale ? (
-        <div className="problem" role="alert">
-          {error.message}{' '}
-          <button
-            onClick={() => {
-              const current = error.current as { revision: Revision };
-              setVersion(current.revision.version);
-              setError(null);
-              setMessage('Your next save replaces theirs.');
-            }}
-          >
-            Keep mine, over theirs
-          </button>{' '}
-          <button
-            onClick={() => {
-              drop();
-              void client.invalidateQueries({ queryKey: ['revision', revision.id] });
-            }}
-          >
-            Take theirs
-          </button>
-        </div>
-      ) : (
-        <ProblemView error={error} />
-      )}
-      <nav className="tabs" aria-label="Parts of the building" style={{ padding: 0, marginBottom: 12 }}>
+      <Bar projectId={projectId} revision={revision} draft={draft} locked={locked} />
+      <Trouble draft={draft} onGo={goTo} />
+      <nav className="tabs inner" aria-label="Parts of the building">
         {SECTIONS.map(([key, name]) => (
           <a
             key={key}
@@ -167,23 +89,99 @@ function Editor({
             aria-current={section === key ? 'page' : undefined}
             onClick={(event) => {
               event.preventDefault();
-              setSection(key);
+              patch({ section: key });
             }}
           >
             {name}
           </a>
         ))}
       </nav>
-      {section === 'forces' && <ForcesTable {...shared} />}
-      {section === 'weights' && <WeightsTable {...shared} />}
-      {section === 'lines' && <LinesTable {...shared} />}
-      {section === 'piers' && <PiersTable {...shared} />}
-      {section === 'file' && <RawFile document={document} locked={locked} onReplace={edit} />}
-      {section !== 'file' && (
-        <p className="note">
-          A block copied from a spreadsheet can be pasted into any cell; it fills the cells to the right and below.
+      {section === 'forces' && <ForcesTable {...editing} />}
+      {section === 'levels' && <LevelsTable {...editing} />}
+      {section === 'weights' && <WeightsTable {...editing} />}
+      {section === 'lines' && <LinesTable {...editing} />}
+      {section === 'piers' && <PiersTable {...editing} />}
+      {section === 'file' && (
+        <RawFile
+          key={draft.round}
+          document={draft.document}
+          locked={locked}
+          onReplace={(next) => draft.replace(next)}
+        />
+      )}
+      {section !== 'file' && !locked && (
+        <p className="note" style={{ marginTop: 10 }}>
+          A block copied from a spreadsheet goes into the cell that has the focus and those right of it and below; Enter
+          and the arrows go from row to row. What differs from the saved building is bold.
         </p>
       )}
     </>
+  );
+}
+
+function Bar({
+  projectId,
+  revision,
+  draft,
+  locked,
+}: {
+  readonly projectId: string;
+  readonly revision: Revision;
+  readonly draft: Draft;
+  readonly locked: boolean;
+}) {
+  const upload = async (event: ChangeEvent<HTMLInputElement>): Promise<void> => {
+    const file = event.target.files?.[0];
+    if (file === undefined) return;
+    event.target.value = '';
+    try {
+      draft.replace(JSON.parse(await file.text()), `${file.name} is in the editor; it is checked when you save.`);
+    } catch {
+      draft.fail(new Error(`${file.name} is not JSON.`));
+    }
+  };
+  return (
+    <div className="bar">
+      {!locked && (
+        <button className="primary" disabled={!draft.dirty || draft.busy} onClick={() => void draft.save()}>
+          {draft.busy ? 'Saving and analysing …' : 'Save and analyse'}
+        </button>
+      )}
+      {!locked && draft.dirty && (
+        <button disabled={draft.busy} onClick={draft.drop}>
+          Drop the changes
+        </button>
+      )}
+      <a href={api.downloadHref(projectId, revision.id)} download>
+        Download the building file
+      </a>
+      {!locked && (
+        <label>
+          Replace by a building file
+          <input type="file" accept=".json,application/json" onChange={(event) => void upload(event)} />
+        </label>
+      )}
+      <span className="note" role="status">
+        {locked
+          ? 'Issued: nothing here can change. Make a new revision from it.'
+          : draft.dirty
+            ? 'Changed, not saved; kept in this browser.'
+            : 'Saved.'}{' '}
+        {draft.message}
+      </span>
+    </div>
+  );
+}
+
+/** Faults with a way to their field; or somebody else’s save, and what to do about it. */
+function Trouble({ draft, onGo }: { readonly draft: Draft; readonly onGo: (path: string) => void }) {
+  const theirs = currentOf(draft.error);
+  if (theirs === undefined) return <ProblemView error={draft.error} onGo={onGo} />;
+  return (
+    <div className="problem" role="alert">
+      {`Somebody else saved this revision on ${when(theirs.updatedAt)}. What you typed is still here.`}{' '}
+      <button onClick={draft.overrule}>Keep mine, over theirs</button>{' '}
+      <button onClick={() => void draft.yieldToTheirs()}>Take theirs</button>
+    </div>
   );
 }

@@ -2,15 +2,14 @@
 import type { Building } from '@groundward/engine/building/definition';
 import type { Foundation } from '@groundward/engine/foundation/result';
 import { useQuery } from '@tanstack/react-query';
-import { useState } from 'react';
 import { FoundationPlan } from '@/drawings/foundation-plan';
 import { planBox } from '@/drawings/plan';
 import { boxOf, fitWidth } from '@/drawings/scale';
 import { useWidth } from '@/drawings/use-width';
 import { api } from '@/lib/api';
-import { figure, quantity, senseSign } from '@/lib/format';
 import { useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
+import { DemandTable, QUANTITIES, Schedule, Totals } from '@/parts/foundation-tables';
 import { Pending } from '@/parts/problem';
 import { Select } from '@/parts/select';
 
@@ -27,7 +26,9 @@ export default function FoundationPage() {
   return <FoundationView building={building} foundation={demands.data} csv={api.csvHref(projectId, revisionId)} />;
 }
 
-const MOST_ROWS = 400;
+/** Labels need so much [px]. */
+const LEAST = 560;
+const UNFACTORED = 'unfactored';
 
 function FoundationView({
   building,
@@ -39,24 +40,22 @@ function FoundationView({
   readonly csv: string;
 }) {
   const [shown, setShown] = useQueryState('support', '');
-  const [which, setWhich] = useQueryState('show', 'governing');
+  const [show, setShow] = useQueryState('show', 'schedule');
   const [kind, setKind] = useQueryState('quantity', '');
+  const [component, setComponent] = useQueryState('component', '');
   const [combination, setCombination] = useQueryState('combination', '');
-  const [all, setAll] = useState(false);
   const [ref, width] = useWidth<HTMLDivElement>();
-  const combinations = [
-    ...new Set(
-      foundation.supports.flatMap((support) => support.demands.map((demand) => demand.combination ?? 'unfactored')),
-    ),
-  ];
-  const rows = foundation.supports
-    .filter((support) => shown === '' || support.member === shown)
+  const all = foundation.supports.flatMap((support) => support.demands);
+  const components = [...new Set(all.map((demand) => demand.case))];
+  const combinations = [...new Set(all.map((demand) => demand.combination ?? UNFACTORED))];
+  const supports = foundation.supports.filter(({ member }) => shown === '' || member === shown);
+  const rows = supports
     .flatMap((support) => support.demands.map((demand) => ({ support, demand })))
-    .filter(({ demand }) => which === 'all' || demand.governing)
     .filter(({ demand }) => kind === '' || demand.quantity === kind)
-    .filter(({ demand }) => combination === '' || (demand.combination ?? 'unfactored') === combination);
-  const visible = all ? rows : rows.slice(0, MOST_ROWS);
+    .filter(({ demand }) => component === '' || demand.case === component)
+    .filter(({ demand }) => combination === '' || (demand.combination ?? UNFACTORED) === combination);
   const box = boxOf(planBox(building));
+  const margin = { left: 36, right: 24, top: 24, bottom: 46 };
   return (
     <>
       <p className="caution">
@@ -65,137 +64,65 @@ function FoundationView({
       </p>
       <div className="bar">
         <Select
+          label="Show"
+          value={show}
+          options={[
+            { value: 'schedule', name: 'governing, a row a support' },
+            { value: 'all', name: 'every component and combination' },
+          ]}
+          onChange={setShow}
+        />
+        <Select
           label="Support"
           value={shown}
           options={[
             { value: '', name: 'all' },
-            ...foundation.supports.map((support) => ({
-              value: support.member,
-              name: `${support.label} ${support.member}`,
-            })),
+            ...foundation.supports.map(({ label, member }) => ({ value: member, name: `${label} ${member}` })),
           ]}
           onChange={setShown}
         />
-        <Select
-          label="Quantity"
-          value={kind}
-          options={[
-            { value: '', name: 'all' },
-            ...['uplift', 'bearing', 'shear', 'moment'].map((value) => ({ value, name: value })),
-          ]}
-          onChange={setKind}
-        />
-        <Select
-          label="Combination"
-          value={combination}
-          options={[{ value: '', name: 'all' }, ...combinations.map((value) => ({ value, name: value }))]}
-          onChange={setCombination}
-        />
-        <Select
-          label="Show"
-          value={which}
-          options={[
-            { value: 'governing', name: 'governing only' },
-            { value: 'all', name: 'every component and combination' },
-          ]}
-          onChange={setWhich}
-        />
+        {show === 'all' && (
+          <>
+            <Select label="Quantity" value={kind} options={choices(QUANTITIES)} onChange={setKind} />
+            <Select label="Component" value={component} options={choices(components)} onChange={setComponent} />
+            <Select label="Combination" value={combination} options={choices(combinations)} onChange={setCombination} />
+          </>
+        )}
         <a href={csv} download>
           Schedule as CSV
         </a>
       </div>
-      <div className="split">
+      <div className="split half">
         <div className="wide" ref={ref}>
           {width > 0 && (
-            <FoundationPlan
-              building={building}
-              supports={foundation.supports}
-              scale={fitWidth(box, width, { left: 20, right: 20, top: 20, bottom: 20 })}
-              shown={shown}
-              onPick={(member) => setShown(member === shown ? '' : member)}
-            />
+            <div className="scroll">
+              <FoundationPlan
+                building={building}
+                supports={foundation.supports}
+                scale={fitWidth(box, Math.max(width, LEAST), margin)}
+                box={box}
+                shown={shown}
+                onPick={(member) => setShown(member === shown ? '' : member)}
+              />
+            </div>
           )}
           <ul className="legend">
-            <li>■ end post; filled where it lifts</li>
+            <li>■ end post, filled where a combination lifts it</li>
+            <li>◆ post carried straight down, with no pier under the lowest level</li>
             <li>● foot of a pier: shear and moment</li>
           </ul>
           <Totals foundation={foundation} />
         </div>
-        <section className="panel wide">
-          <h2>{`${rows.length} demands`}</h2>
-          <div className="scroll">
-            <table>
-              <thead>
-                <tr>
-                  <th>Label</th>
-                  <th>Member</th>
-                  <th>Quantity</th>
-                  <th className="n">Value</th>
-                  <th>Case</th>
-                  <th>Combination</th>
-                </tr>
-              </thead>
-              <tbody>
-                {visible.map(({ support, demand }, i) => (
-                  <tr key={i} className={which === 'all' && demand.governing ? 'strong' : undefined}>
-                    <td>{support.label}</td>
-                    <td>{support.member}</td>
-                    <td>
-                      {demand.quantity}
-                      {which === 'all' && demand.governing ? ' ◀' : ''}
-                    </td>
-                    <td
-                      className="n"
-                      title={`at ${figure(support.at[0])}, ${figure(support.at[1])} ${foundation.units.length}`}
-                    >
-                      {quantity(demand.value, demand.unit)}
-                    </td>
-                    <td>{`${demand.case} ${senseSign(demand.sense)}`}</td>
-                    <td>{demand.combination ?? 'unfactored'}</td>
-                  </tr>
-                ))}
-              </tbody>
-            </table>
-          </div>
-          {visible.length < rows.length && <button onClick={() => setAll(true)}>{`Show all ${rows.length}`}</button>}
-        </section>
+        {show === 'all' ? (
+          <DemandTable rows={rows} />
+        ) : (
+          <Schedule supports={supports} shown={shown} onPick={setShown} units={foundation.units} />
+        )}
       </div>
     </>
   );
 }
 
-function Totals({ foundation }: { readonly foundation: Foundation }) {
-  const { force, length } = foundation.units;
-  return (
-    <section className="panel" style={{ marginTop: 18 }}>
-      <h2>Unfactored totals on the foundation</h2>
-      <p className="note">{`Forces in ${force}, moments about the plan’s origin in ${force}·${length}.`}</p>
-      <div className="scroll">
-        <table>
-          <thead>
-            <tr>
-              <th>Case</th>
-              {['Fx', 'Fy', 'down', 'Mx', 'My', 'Mz'].map((head) => (
-                <th key={head} className="n">
-                  {head}
-                </th>
-              ))}
-            </tr>
-          </thead>
-          <tbody>
-            {foundation.totals.map((total) => (
-              <tr key={`${total.case} ${total.sense}`}>
-                <td>{`${total.case} ${senseSign(total.sense)}`}</td>
-                {[total.fx, total.fy, total.fz, total.mx, total.my, total.mz].map((value, i) => (
-                  <td key={i} className="n">
-                    {figure(value)}
-                  </td>
-                ))}
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      </div>
-    </section>
-  );
+function choices(values: readonly string[]): { readonly value: string; readonly name: string }[] {
+  return [{ value: '', name: 'all' }, ...values.map((value) => ({ value, name: value }))];
 }

@@ -1,4 +1,5 @@
 'use client';
+import type { WallLine } from '@groundward/engine/building/definition';
 import type { Sense } from '@groundward/engine/path/result';
 import { ElevationDrawing } from '@/drawings/elevation';
 import type { PostState } from '@/drawings/elevation-signs';
@@ -20,8 +21,6 @@ export default function WallLinePage() {
     <WallLineView facts={facts} root={root} />
   );
 }
-
-const LEAST = 620;
 
 function WallLineView({ facts, root }: { readonly facts: Facts; readonly root: string }) {
   const { building, analysis, index } = facts;
@@ -77,7 +76,7 @@ function WallLineView({ facts, root }: { readonly facts: Facts; readonly root: s
                   forces: { index, caseId, sense, combination, origin },
                   posts: postsOf(findings),
                 }}
-                width={Math.max(width, LEAST)}
+                width={Math.max(width, leastWidth(line))}
               />
             </div>
           )}
@@ -112,6 +111,12 @@ function WallLineView({ facts, root }: { readonly facts: Facts; readonly root: s
       </div>
     </>
   );
+}
+
+/** Wide enough for the end forces of its shortest pier to stand side by side, within reason [px]. */
+function leastWidth(line: WallLine): number {
+  const shortest = Math.min(...line.storeys.flatMap(({ piers }) => piers.map(({ from, to }) => to - from)));
+  return Math.min(1000, Math.max(620, 160 + (axisOf(line).length / shortest) * 84));
 }
 
 function along({ building, analysis }: Facts, lineId: string, caseId: string): boolean {
