@@ -102,8 +102,8 @@ export function LineLabel({
   // How far the first end stands inside the box, along the line: at most a small overhang is skipped.
   const inside = Math.abs(u[0]) > Math.abs(u[1]) ? edge(a[0], box.x0, box.x1) : edge(a[1], box.y0, box.y1);
   const skip = inside * scale.perUnit < 40 ? inside * scale.perUnit : 0;
-  const x = scale.x(a[0]) - u[0] * (skip + 14);
-  const y = scale.y(a[1]) + u[1] * (skip + 14);
+  const x = scale.x(a[0]) - u[0] * (skip + 18);
+  const y = scale.y(a[1]) + u[1] * (skip + 18);
   const half = Math.max(8.5, 3.5 + line.id.length * 3.2);
   return (
     <g pointerEvents="none">

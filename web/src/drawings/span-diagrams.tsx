@@ -105,8 +105,8 @@ function Level({ view, field, said, width, largest }: One) {
         interval={0}
       />
       <ReferenceLine y={0} className="zero" />
-      {view.lines.map((line) => (
-        <ReferenceLine key={line.line} x={line.s} className="axis" />
+      {view.lines.map((line, i) => (
+        <ReferenceLine key={i} x={line.s} className="axis" />
       ))}
       <Area type="linear" dataKey={field} {...SHAPE} />
       {largest !== undefined && <ReferenceDot x={largest.s} y={largest[field]} r={2.5} className="extreme" />}
@@ -129,8 +129,8 @@ function Upright({ view, field, said, width, length, largest }: One & { readonly
       <XAxis type="number" hide domain={bounds(view, field)} />
       <YAxis type="number" dataKey="s" hide domain={[view.from, view.to]} allowDataOverflow />
       <ReferenceLine x={0} className="zero" />
-      {view.lines.map((line) => (
-        <ReferenceLine key={line.line} y={line.s} className="axis" />
+      {view.lines.map((line, i) => (
+        <ReferenceLine key={i} y={line.s} className="axis" />
       ))}
       <Area type="linear" dataKey={field} {...SHAPE} />
       {largest !== undefined && <ReferenceDot x={largest[field]} y={largest.s} r={2.5} className="extreme" />}

@@ -45,13 +45,28 @@ export function LevelSheet({
     units: plan.building.units,
     ...extent,
   };
-  const drawn: PlanView = s === null ? plan : { ...plan, cursor: { across, s } };
+  const drawn: PlanView = {
+    ...plan,
+    ...(s === null ? {} : { cursor: { across, s } }),
+    ...(oblique(across) ? { spans: [] } : {}),
+  };
   const length = scale.height - margin.top - margin.bottom;
   const each = Math.max(56, (full - scale.width - 8 * ORDINATES.length) / ORDINATES.length);
   const place =
     s === null ? 0 : ((s - extent.from) / (extent.to - extent.from)) * (upright ? length : scale.width - AXIS - RIGHT);
   return (
     <div className="scroll">
+      {oblique(across) && (
+        <p className="note">
+          The load acts at an angle to the sheet: the diagrams run along s, square to the load, and are not in line with
+          the plan. A cut is drawn where it is.
+        </p>
+      )}
+      <p className="reading" aria-hidden={at === undefined}>
+        {at === undefined
+          ? 'Point at the diagrams, or use the arrow keys on them, to read them at any cut.'
+          : reading(at, shown.units).map((text) => <span key={text}>{text}</span>)}
+      </p>
       <div style={upright ? { display: 'flex', width: full, gap: 8 } : { width: scale.width }}>
         <PlanDrawing plan={drawn} scale={scale} box={box} onPick={onPick} />
         <div
@@ -82,13 +97,12 @@ export function LevelSheet({
           )}
         </div>
       </div>
-      <p className="reading" aria-hidden={at === undefined}>
-        {at === undefined
-          ? 'Point at the diagrams, or use the arrow keys on them, to read them at any cut.'
-          : reading(at, shown.units).map((text) => <span key={text}>{text}</span>)}
-      </p>
     </div>
   );
+}
+
+function oblique(across: readonly [number, number]): boolean {
+  return Math.min(Math.abs(across[0]), Math.abs(across[1])) > 1e-9;
 }
 
 type Extent = { readonly from: number; readonly to: number };
