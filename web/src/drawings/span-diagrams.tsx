@@ -22,16 +22,17 @@ const HEIGHT = 82;
 
 export type Ordinate = {
   readonly key: 'w' | 'V' | 'v' | 'M' | 'T';
+  readonly symbol: string;
   readonly name: string;
   readonly unit: (force: string, length: string) => string;
 };
 
 export const ORDINATES: readonly Ordinate[] = [
-  { key: 'w', name: 'Load w', unit: (f, l) => `${f}/${l}` },
-  { key: 'V', name: 'Shear V', unit: (f) => f },
-  { key: 'v', name: 'Unit shear V/d', unit: (f, l) => `${f}/${l}` },
-  { key: 'M', name: 'Moment M', unit: (f, l) => `${f}·${l}` },
-  { key: 'T', name: 'Chord M/D', unit: (f) => f },
+  { key: 'w', symbol: 'w', name: 'Load w', unit: (f, l) => `${f}/${l}` },
+  { key: 'V', symbol: 'V', name: 'Shear V', unit: (f) => f },
+  { key: 'v', symbol: 'V/d', name: 'Unit shear V/d', unit: (f, l) => `${f}/${l}` },
+  { key: 'M', symbol: 'M', name: 'Moment M', unit: (f, l) => `${f}·${l}` },
+  { key: 'T', symbol: 'M/D', name: 'Chord M/D', unit: (f) => f },
 ];
 
 /** Load, shear, unit shear, moment and chord force along the span; `upright` where s runs up the sheet. */

@@ -91,6 +91,8 @@ export const api = {
   createRevision: (id: string, body: { name: string; from?: string; building?: unknown }) =>
     call(`${project(id)}/revisions`, { method: 'POST', body }) as Promise<Revision>,
   revision: (projectId: string, id: string) => call(revision(projectId, id)) as Promise<Revision>,
+  renameRevision: (projectId: string, id: string, version: number, name: string) =>
+    call(revision(projectId, id), { method: 'PATCH', body: { name }, version }) as Promise<Revision>,
   removeRevision: (projectId: string, id: string, version: number) =>
     call(revision(projectId, id), { method: 'DELETE', version }),
   building: (projectId: string, id: string) => call(`${revision(projectId, id)}/building`) as Promise<Building>,

@@ -17,7 +17,7 @@ export type DiagramPoint = {
   readonly T: number;
 };
 
-const STEPS = 10;
+const STEPS = 20;
 
 /** Points along s, two at every break so that jumps stay jumps. */
 export function pointsOf(diagram: DiaphragmDiagram, sense: number): DiagramPoint[] {

@@ -27,3 +27,13 @@ export function useQueryState(name: string, fallback: string): [string, (value: 
   const set = useCallback((value: string) => patch({ [name]: value }), [name, patch]);
   return [search.get(name) ?? fallback, set];
 }
+
+/** One of several values; what an old or foreign link asks for and is not among them counts as not asked for. */
+export function useQueryChoice(
+  name: string,
+  options: readonly string[],
+  fallback: string,
+): [string, (value: string) => void] {
+  const [wanted, set] = useQueryState(name, fallback);
+  return [options.includes(wanted) ? wanted : fallback, set];
+}

@@ -10,7 +10,7 @@ import { useWidth } from '@/drawings/use-width';
 import { COLOURS, gonePiers, SIGNS, sizeOf } from '@/lib/changes';
 import { levelName, levelsAscending } from '@/lib/demands';
 import { percent, words } from '@/lib/format';
-import { useQueryState } from '@/lib/query-state';
+import { useQueryChoice, useQueryState } from '@/lib/query-state';
 import { Select } from './select';
 
 /** Piers on plan and elevation, marked by the class of the largest change of one of their quantities; piers that are gone, broken. */
@@ -24,7 +24,11 @@ export function ComparisonDrawings({
   readonly after: Building;
 }) {
   const levels = levelsAscending(after).slice(1);
-  const [level, setLevel] = useQueryState('level', levels[0]?.id ?? '');
+  const [level, setLevel] = useQueryChoice(
+    'level',
+    levels.map(({ id }) => id),
+    levels[0]?.id ?? '',
+  );
   const [lineId, setLine] = useQueryState('line', firstChanged(comparison) ?? after.wallLines[0]?.id ?? '');
   const [what, setWhat] = useQueryState('mark', 'unit-shear');
   const line = after.wallLines.find(({ id }) => id === lineId) ?? after.wallLines[0];

@@ -65,7 +65,7 @@ export function LevelSheet({
       <p className="reading" aria-hidden={at === undefined}>
         {at === undefined
           ? 'Point at the diagrams, or use the arrow keys on them, to read them at any cut.'
-          : reading(at, shown.units).map((text) => <span key={text}>{text}</span>)}
+          : reading(at, shown.units, 'symbol').map((text) => <span key={text}>{text}</span>)}
       </p>
       <div style={upright ? { display: 'flex', width: full, gap: 8 } : { width: scale.width }}>
         <PlanDrawing plan={drawn} scale={scale} box={box} onPick={onPick} />
@@ -79,7 +79,7 @@ export function LevelSheet({
           aria-valuemin={extent.from}
           aria-valuemax={extent.to}
           aria-valuenow={s ?? extent.from}
-          aria-valuetext={at === undefined ? 'not set' : reading(at, shown.units).join(', ')}
+          aria-valuetext={at === undefined ? 'not set' : reading(at, shown.units, 'name').join(', ')}
           onPointerMove={(event) => setS(pointed(event, upright, extent, upright ? length : scale.width))}
           onPointerLeave={() => setS(null)}
           onKeyDown={(event) => moved(event, s, extent, setS)}
@@ -154,9 +154,15 @@ function moved(
   set(Math.min(to, Math.max(from, next)));
 }
 
-function reading(at: NonNullable<ReturnType<typeof readAt>>, units: SpanDiagramsView['units']): string[] {
+function reading(
+  at: NonNullable<ReturnType<typeof readAt>>,
+  units: SpanDiagramsView['units'],
+  by: 'name' | 'symbol',
+): string[] {
   return [
     `s ${dimension(Number(at.s.toPrecision(4)), units.length)}`,
-    ...ORDINATES.map(({ key, name, unit }) => `${name} ${quantity(at[key], unit(units.force, units.length), 4)}`),
+    ...ORDINATES.map(
+      (ordinate) => `${ordinate[by]} ${quantity(at[ordinate.key], ordinate.unit(units.force, units.length), 4)}`,
+    ),
   ];
 }

@@ -6,6 +6,7 @@ import { FindingCounts, StateTag } from './title-block';
 
 export type RevisionActions = {
   readonly revise: (revision: Revision) => void;
+  readonly rename: (revision: Revision) => void;
   readonly issue: (revision: Revision) => void;
   readonly remove: (revision: Revision) => void;
 };
@@ -97,6 +98,11 @@ function Actions({ revision, actions }: { readonly revision: Revision; readonly 
       <button className="quiet" onClick={() => actions.revise(revision)}>
         Revise
       </button>
+      {draft && (
+        <button className="quiet" onClick={() => actions.rename(revision)}>
+          Rename …
+        </button>
+      )}
       {draft && (
         <button className="quiet" onClick={() => actions.issue(revision)}>
           Issue …

@@ -6,6 +6,7 @@ import { useState, type ChangeEvent } from 'react';
 import { api, type Revision } from '@/lib/api';
 import { IssueForm } from '@/parts/issue-form';
 import { Members } from '@/parts/members';
+import { NameForm } from '@/parts/name-form';
 import { Pending, ProblemView } from '@/parts/problem';
 import { RevisionTable } from '@/parts/revision-table';
 
@@ -17,6 +18,7 @@ export default function Project() {
   const router = useRouter();
   const [error, setError] = useState<unknown>(null);
   const [issuing, setIssuing] = useState<Revision | null>(null);
+  const [naming, setNaming] = useState<Revision | null>(null);
   const [picked, setPicked] = useState<readonly string[]>([]);
   const list = revisions.data ?? [];
   const last = list[list.length - 1];
@@ -94,6 +96,7 @@ export default function Project() {
           mayWrite
             ? {
                 revise: (revision) => void follow(revision),
+                rename: setNaming,
                 issue: setIssuing,
                 remove: (revision) => {
                   if (window.confirm(`Delete draft ${revision.number}, ${revision.name}?`))
@@ -103,6 +106,19 @@ export default function Project() {
             : undefined
         }
       />
+      {naming !== null && (
+        <NameForm
+          key={naming.id}
+          revision={naming}
+          onCancel={() => setNaming(null)}
+          onName={(name) =>
+            void attempt(async () => {
+              await api.renameRevision(projectId, naming.id, naming.version, name);
+              setNaming(null);
+            })
+          }
+        />
+      )}
       {issuing !== null && (
         <IssueForm
           revision={issuing}

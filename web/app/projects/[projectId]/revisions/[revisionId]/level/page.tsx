@@ -5,7 +5,7 @@ import type { CollectorView } from '@/drawings/collector';
 import type { PlanView } from '@/drawings/plan';
 import { useWidth } from '@/drawings/use-width';
 import { casesOf, collectorsOf, diagramsOf, levelsAscending, type Facts } from '@/lib/demands';
-import { useQueryState } from '@/lib/query-state';
+import { useQueryChoice, useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
 import { LevelSheet } from '@/parts/level-sheet';
 import { BreakTable, CollectorTable, LevelFigures, SpanTable } from '@/parts/level-tables';
@@ -23,8 +23,12 @@ function LevelView({ facts }: { readonly facts: Facts }) {
   const { building, analysis, index } = facts;
   const cases = casesOf(analysis);
   const levels = levelsAscending(building).slice(1).reverse();
-  const [level, setLevel] = useQueryState('level', levels[0]?.id ?? '');
-  const [caseId, setCase] = useQueryState('case', cases[0] ?? '');
+  const [level, setLevel] = useQueryChoice(
+    'level',
+    levels.map(({ id }) => id),
+    levels[0]?.id ?? '',
+  );
+  const [caseId, setCase] = useQueryChoice('case', cases, cases[0] ?? '');
   const [senseText, setSense] = useQueryState('sense', '1');
   const [shown, setShown] = useQueryState('line', '');
   const sense: Sense = senseText === '-1' ? -1 : 1;

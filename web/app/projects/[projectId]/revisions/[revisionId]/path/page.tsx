@@ -8,7 +8,7 @@ import { api } from '@/lib/api';
 import { casesOf, type Facts } from '@/lib/demands';
 import { connected, flowOf } from '@/lib/flow';
 import { quantity } from '@/lib/format';
-import { useQueryState } from '@/lib/query-state';
+import { useQueryChoice, useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
 import { Neighbours, Parts, ShearTable } from '@/parts/path-tables';
 import { Pending } from '@/parts/problem';
@@ -34,7 +34,7 @@ function PathView({
 }) {
   const { building, analysis } = facts;
   const cases = casesOf(analysis);
-  const [caseId, setCase] = useQueryState('case', cases[0] ?? '');
+  const [caseId, setCase] = useQueryChoice('case', cases, cases[0] ?? '');
   const [senseText, setSense] = useQueryState('sense', '1');
   const sense: Sense = senseText === '-1' ? -1 : 1;
   const [member, setMember] = useQueryState('member', '');

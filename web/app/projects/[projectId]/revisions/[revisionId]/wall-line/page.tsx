@@ -5,7 +5,7 @@ import { ElevationDrawing } from '@/drawings/elevation';
 import type { PostState } from '@/drawings/elevation-signs';
 import { useWidth } from '@/drawings/use-width';
 import { axisOf, casesOf, combinationsOf, directionOf, type Facts } from '@/lib/demands';
-import { useQueryPatch, useQueryState } from '@/lib/query-state';
+import { useQueryChoice, useQueryPatch, useQueryState } from '@/lib/query-state';
 import { useRevision } from '@/lib/revision-data';
 import { useOrigin } from '@/parts/facts';
 import { Pending } from '@/parts/problem';
@@ -29,7 +29,7 @@ function WallLineView({ facts, root }: { readonly facts: Facts; readonly root: s
   const patch = useQueryPatch();
   const [lineId] = useQueryState('line', '');
   const line = building.wallLines.find(({ id }) => id === lineId) ?? building.wallLines[0];
-  const [asked] = useQueryState('case', '');
+  const [asked] = useQueryChoice('case', cases, '');
   const [senseText, setSense] = useQueryState('sense', '1');
   const [wanted, setCombination] = useQueryState('combination', '');
   const [ref, width] = useWidth<HTMLDivElement>();
