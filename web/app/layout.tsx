@@ -6,7 +6,10 @@ import { Providers } from '@/parts/providers';
 import { TopBar } from '@/parts/top-bar';
 import './tokens.css';
 import './sheet.css';
+import './controls.css';
+import './tables.css';
 import './marks.css';
+import './media.css';
 
 export const metadata: Metadata = {
   title: 'Groundward',
