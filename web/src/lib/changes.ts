@@ -65,15 +65,20 @@ export function sorted(changes: readonly Change[], order: Order, falling: boolea
   });
 }
 
+/** Keys of all piers of a building. */
+export function pierKeys({ wallLines }: Building): ReadonlySet<string> {
+  return new Set(
+    wallLines.flatMap((line) =>
+      line.storeys.flatMap(({ under, piers }) => piers.map(({ id }) => `${line.id}/${under}/${id}`)),
+    ),
+  );
+}
+
 export type GonePier = { readonly line: WallLine; readonly under: string; readonly pier: Pier };
 
 /** Piers of the first building that the second no longer has. */
 export function gonePiers(before: Building, after: Building): GonePier[] {
-  const there = new Set(
-    after.wallLines.flatMap((line) =>
-      line.storeys.flatMap(({ under, piers }) => piers.map(({ id }) => `${line.id}/${under}/${id}`)),
-    ),
-  );
+  const there = pierKeys(after);
   return before.wallLines.flatMap((line) =>
     line.storeys.flatMap(({ under, piers }) =>
       piers.filter(({ id }) => !there.has(`${line.id}/${under}/${id}`)).map((pier) => ({ line, under, pier })),

@@ -7,7 +7,7 @@ import { PlanDrawing, planBox } from '@/drawings/plan';
 import type { Mark } from '@/drawings/plan-lines';
 import { boxOf, fitWidth } from '@/drawings/scale';
 import { useWidth } from '@/drawings/use-width';
-import { COLOURS, gonePiers, SIGNS, sizeOf } from '@/lib/changes';
+import { COLOURS, gonePiers, pierKeys, SIGNS, sizeOf } from '@/lib/changes';
 import { levelName, levelsAscending } from '@/lib/demands';
 import { percent, words } from '@/lib/format';
 import { useQueryChoice, useQueryState } from '@/lib/query-state';
@@ -37,7 +37,7 @@ export function ComparisonDrawings({
     () => [...new Set(comparison.changes.filter(({ kind }) => kind === 'pier').map((change) => change.quantity))],
     [comparison],
   );
-  const marks = useMemo(() => marksOf(comparison, what), [comparison, what]);
+  const marks = useMemo(() => marksOf(comparison, what, pierKeys(before)), [comparison, what, before]);
   const gone = useMemo(() => gonePiers(before, after), [before, after]);
   const box = boxOf(planBox(after));
   const each = width > 900 ? (width - 24) / 2 : width;
@@ -94,10 +94,12 @@ function firstChanged(comparison: Comparison): string | undefined {
     ?.member.split('/')[0];
 }
 
-function marksOf(comparison: Comparison, what: string): ReadonlyMap<string, Mark> {
+function marksOf(comparison: Comparison, what: string, before: ReadonlySet<string>): ReadonlyMap<string, Mark> {
   const largest = new Map<string, Change>();
   for (const change of comparison.changes) {
     if (change.kind !== 'pier' || change.quantity !== what) continue;
+    // A pier that was there may get a force in a case that it had none in: that does not make it a new pier.
+    if (change.class === 'added' && before.has(change.member)) continue;
     const known = largest.get(change.member);
     if (known === undefined || sizeOf(change) > sizeOf(known)) largest.set(change.member, change);
   }
