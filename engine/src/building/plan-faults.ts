@@ -1,14 +1,60 @@
 /** Faults of what is drawn on plan: outlines, openings, zones. */
-import { frameAlong } from '../geometry/frame.js';
-import { massOf } from '../geometry/area.js';
+import { commonArea } from '../geometry/common-area.js';
 import { bordersMeet, contains, selfMeeting, twiceArea } from '../geometry/polygon.js';
-import { profileOf } from '../geometry/profile.js';
 import type { Diaphragm, Level, Point, Ring } from './definition.js';
 import type { Fault } from './fault.js';
 
+/** Points that the drawings of a level may have at the most. */
+const MOST_POINTS = 10_000;
+
+/** Lengths that are less than this part of the coordinates are rounding; areas likewise. */
+const ROUNDING = 1e-9;
+
 /** @param level a level whose shape is right, with its JSON path */
 export function levelFaults(level: Level, path: string): Fault[] {
-  return (level.diaphragms ?? []).flatMap((diaphragm, d) => diaphragmFaults(diaphragm, `${path}.diaphragms[${d}]`));
+  const diaphragms = level.diaphragms ?? [];
+  const points = diaphragms.reduce((sum, diaphragm) => sum + pointsOf(diaphragm), 0);
+  if (points > MOST_POINTS) {
+    return [
+      {
+        code: 'too-large',
+        path: `${path}.diaphragms`,
+        found: `${points} points in outlines, openings and zones`,
+        expected: `at most ${MOST_POINTS} points on a level`,
+      },
+    ];
+  }
+  const single = diaphragms.map((diaphragm, d) => diaphragmFaults(diaphragm, `${path}.diaphragms[${d}]`));
+  return [...single.flat(), ...overlapFaults(diaphragms, single, path)];
+}
+
+function pointsOf(diaphragm: Diaphragm): number {
+  const rings = [...(diaphragm.openings ?? []), ...(diaphragm.weight?.zones ?? [])];
+  return rings.reduce((sum, { outline }) => sum + outline.length, diaphragm.outline.length);
+}
+
+/** Diaphragms of a level lie side by side, or one in the opening of another. */
+function overlapFaults(diaphragms: readonly Diaphragm[], single: readonly (readonly Fault[])[], path: string): Fault[] {
+  const faults: Fault[] = [];
+  diaphragms.forEach((diaphragm, d) => {
+    if (single[d]?.length !== 0) return;
+    diaphragms.slice(0, d).forEach((other, o) => {
+      if (single[o]?.length !== 0) return;
+      const share = commonArea(diaphragm, other);
+      if (share <= negligible(diaphragm.outline, other.outline)) return;
+      faults.push({
+        code: 'diaphragms-overlap',
+        path: `${path}.diaphragms[${d}].outline`,
+        found: `diaphragm ${diaphragm.id} that overlaps diaphragm ${other.id} by an area of ${share.toPrecision(4)}`,
+        expected: 'diaphragms of a level apart from one another, or side by side',
+      });
+    });
+  });
+  return faults;
+}
+
+function negligible(a: Ring, b: Ring): number {
+  return ROUNDING * Math.max(Math.abs(twiceArea(a)), Math.abs(twiceArea(b)));
 }
 
 function diaphragmFaults(diaphragm: Diaphragm, path: string): Fault[] {
@@ -55,7 +101,7 @@ function diaphragmFaults(diaphragm: Diaphragm, path: string): Fault[] {
     }
     goodOpenings.push({ ring: opening.outline, id: opening.id, path: at });
   });
-  faults.push(...zoneFaults(diaphragm, path));
+  faults.push(...zoneFaults(diaphragm, path, outlineGood));
   (diaphragm.weight?.lines ?? []).forEach((line, l) => {
     line.along.slice(1).forEach((point, i) => {
       if (same(line.along[i] as Point, point)) {
@@ -66,7 +112,7 @@ function diaphragmFaults(diaphragm: Diaphragm, path: string): Fault[] {
   return faults;
 }
 
-function zoneFaults(diaphragm: Diaphragm, path: string): Fault[] {
+function zoneFaults(diaphragm: Diaphragm, path: string, outlineGood: boolean): Fault[] {
   const faults: Fault[] = [];
   const good: { ring: Ring; id: string }[] = [];
   (diaphragm.weight?.zones ?? []).forEach((zone, z) => {
@@ -74,9 +120,18 @@ function zoneFaults(diaphragm: Diaphragm, path: string): Fault[] {
     const own = ringFaults(zone.outline, at);
     faults.push(...own);
     if (own.length > 0) return;
+    const outline = { outline: diaphragm.outline };
+    if (outlineGood && commonArea(zone, outline) <= ROUNDING * Math.abs(twiceArea(zone.outline))) {
+      faults.push({
+        code: 'zone-outside',
+        path: at,
+        found: `zone ${zone.id}, which lies outside the outline of its diaphragm`,
+        expected: 'a zone that covers a part of the diaphragm',
+      });
+    }
     for (const other of good) {
-      const share = overlap(zone.outline, other.ring);
-      if (share > 1e-9 * Math.abs(twiceArea(zone.outline))) {
+      const share = commonArea(zone, { outline: other.ring });
+      if (share > negligible(zone.outline, other.ring)) {
         faults.push({
           code: 'zones-overlap',
           path: at,
@@ -90,18 +145,22 @@ function zoneFaults(diaphragm: Diaphragm, path: string): Fault[] {
   return faults;
 }
 
-/** Area that two simple polygons have in common [length²] */
-function overlap(a: Ring, b: Ring): number {
-  const diaphragm: Diaphragm = { id: 'a', outline: a, weight: { area: 0, zones: [{ id: 'b', outline: b, area: 1 }] } };
-  return massOf(diaphragm, profileOf(diaphragm, frameAlong([0, 1]))).weight;
-}
-
 /** A ring must be a simple polygon with an area. */
 function ringFaults(ring: Ring, path: string): Fault[] {
   const faults: Fault[] = [];
+  const most = ring.reduce((largest, [x, y]) => Math.max(largest, Math.abs(x), Math.abs(y)), 0);
   ring.forEach((point, i) => {
     const next = (i + 1) % ring.length;
-    if (same(point, ring[next] as Point)) faults.push(repeated(`${path}[${next}]`, point));
+    const end = ring[next] as Point;
+    if (same(point, end)) faults.push(repeated(`${path}[${next}]`, point));
+    else if (Math.hypot(end[0] - point[0], end[1] - point[1]) <= ROUNDING * most) {
+      faults.push({
+        code: 'short-edge',
+        path: `${path}[${next}]`,
+        found: `an edge from [${point.join(', ')}] to [${end.join(', ')}]`,
+        expected: 'points farther apart than rounding',
+      });
+    }
   });
   if (faults.length > 0) return faults;
   const meeting = selfMeeting(ring);

@@ -1,5 +1,5 @@
 /** Faults between the parts of a file: identities, references, elevations. */
-import type { Building } from './definition.js';
+import { GravityCase, type Building } from './definition.js';
 import type { Fault } from './fault.js';
 
 /** The parts of a file whose shape is right, each at its place. */
@@ -7,9 +7,9 @@ export type Parts = {
   readonly levels: readonly (Building['levels'][number] | undefined)[];
   readonly wallLines: readonly (Building['wallLines'][number] | undefined)[];
   readonly loadCases: readonly (Building['loadCases'][number] | undefined)[];
-  readonly assemblies: Building['assemblies'];
-  readonly basis: Building['basis'];
-  readonly combinations: Building['combinations'];
+  readonly assemblies?: Building['assemblies'];
+  readonly basis?: Building['basis'];
+  readonly combinations?: Building['combinations'];
   /** Whether every level could be read: references to levels are judged only then. */
   readonly levelsComplete: boolean;
 };
@@ -218,6 +218,9 @@ function assemblyReferences(parts: Parts): Fault[] {
   ];
 }
 
+/** Demands name these components as their case. */
+const GRAVITY_CASES: ReadonlySet<string> = new Set(GravityCase.options);
+
 function loadFaults(parts: Parts): Fault[] {
   const faults = parts.loadCases.flatMap((loadCase, c): Fault[] =>
     loadCase?.from === 'basis' && parts.basis?.seismic === undefined
@@ -231,6 +234,15 @@ function loadFaults(parts: Parts): Fault[] {
         ]
       : [],
   );
+  parts.loadCases.forEach((loadCase, c) => {
+    if (loadCase === undefined || !GRAVITY_CASES.has(loadCase.id)) return;
+    faults.push({
+      code: 'reserved-id',
+      path: `loadCases[${c}].id`,
+      found: `"${loadCase.id}", the name of a component of gravity load`,
+      expected: 'an id other than D, L, Lr and S',
+    });
+  });
   if (Array.isArray(parts.combinations)) {
     parts.combinations.forEach((combination, c) => {
       if (combination.factors.E === undefined || combination.factors.W === undefined) return;

@@ -8,32 +8,43 @@ export function jsonPath(path: readonly PropertyKey[]): string {
   let out = '';
   for (const part of path) {
     if (typeof part === 'number') out += `[${part}]`;
-    else out += `${out === '' ? '' : '.'}${String(part)}`;
+    else if (/^[\p{L}\p{N}_$-]{1,64}$/u.test(String(part))) out += `${out === '' ? '' : '.'}${String(part)}`;
+    else out += `[${shown(String(part))}]`;
   }
   return out;
 }
 
-export function shapeFaults(error: z.ZodError): Fault[] {
-  return error.issues.flatMap((issue) => faultsOf(issue, []));
+/** @param most faults that are said in full; the ones beyond are only counted */
+export function shapeFaults(error: z.ZodError, most: number): Fault[] {
+  const faults: Fault[] = [];
+  for (const issue of error.issues) {
+    if (faults.length <= most) {
+      for (const fault of faultsOf(issue, [], most)) faults.push(fault);
+    } else faults.push(BEYOND);
+  }
+  return faults;
 }
 
-function faultsOf(issue: z.core.$ZodIssue, above: readonly PropertyKey[]): Fault[] {
+const BEYOND: Fault = { code: 'wrong-value', path: '', found: 'a fault beyond those listed', expected: 'none' };
+
+function faultsOf(issue: z.core.$ZodIssue, above: readonly PropertyKey[], most: number): Fault[] {
   const path = [...above, ...issue.path];
   const where = jsonPath(path);
   switch (issue.code) {
     case 'unrecognized_keys':
-      return issue.keys.map((key) => {
+      return issue.keys.map((key, i) => {
+        if (i > most) return BEYOND;
         const near = nearestKey(key);
         return {
           code: 'unknown-key',
           path: jsonPath([...path, key]),
-          found: `the unknown key "${key}"`,
+          found: `the unknown key ${shown(key)}`,
           expected: 'only keys of the format',
           ...(near === undefined ? {} : { hint: `did you mean "${near}"?` }),
         };
       });
     case 'invalid_union':
-      return unionFaults(issue, path);
+      return unionFaults(issue, path, most);
     case 'invalid_type':
       return [
         issue.input === undefined
@@ -77,8 +88,9 @@ function faultsOf(issue: z.core.$ZodIssue, above: readonly PropertyKey[]): Fault
 }
 
 /** A union's fault: the one of the branch that fits best, or that none fits. */
-function unionFaults(issue: z.core.$ZodIssueInvalidUnion, path: readonly PropertyKey[]): Fault[] {
-  const branches = issue.errors.map((errors) => errors.flatMap((inner) => faultsOf(inner, path)));
+function unionFaults(issue: z.core.$ZodIssueInvalidUnion, path: readonly PropertyKey[], most: number): Fault[] {
+  if (issue.discriminator !== undefined) return [discriminatorFault(issue, path, issue.discriminator)];
+  const branches = issue.errors.map((errors) => errors.flatMap((inner) => faultsOf(inner, path, most)));
   const deep = branches.filter((faults) => faults.every((fault) => fault.path !== jsonPath(path)));
   const best = deep.sort((a, b) => a.length - b.length)[0];
   if (best !== undefined && best.length > 0) return best;
@@ -91,6 +103,26 @@ function unionFaults(issue: z.core.$ZodIssueInvalidUnion, path: readonly Propert
       expected: expected === '' ? 'one of the allowed forms' : expected,
     },
   ];
+}
+
+/** A key whose value says which form an object has, such as `from` of a load case. */
+function discriminatorFault(
+  issue: z.core.$ZodIssueInvalidUnion,
+  path: readonly PropertyKey[],
+  discriminator: string,
+): Fault {
+  const { input } = issue;
+  const options: readonly unknown[] = 'options' in issue && Array.isArray(issue.options) ? issue.options : [];
+  const value =
+    input !== null && typeof input === 'object' && Object.hasOwn(input, discriminator)
+      ? (input as Record<string, unknown>)[discriminator]
+      : undefined;
+  return {
+    code: value === undefined ? 'missing' : 'wrong-value',
+    path: jsonPath(path),
+    found: shown(value),
+    expected: options.map((option) => JSON.stringify(option)).join(' or '),
+  };
 }
 
 function typeName(expected: string): string {

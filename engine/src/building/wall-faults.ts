@@ -26,17 +26,34 @@ export function wallLineFaults(line: WallLine, path: string): Fault[] {
     storey.piers.forEach((pier, p) => faults.push(...pierFaults(line, pier, `${at}.piers[${p}]`, length, beyond)));
     faults.push(...overlaps(storey.piers, at, length));
   });
-  (line.collectors ?? []).forEach((collector, c) => {
-    const at = `${path}.collectors[${c}]`;
-    if (!(collector.to > collector.from)) {
+  faults.push(...collectorFaults(line.collectors ?? [], path));
+  return faults;
+}
+
+function collectorFaults(collectors: NonNullable<WallLine['collectors']>, path: string): Fault[] {
+  const faults: Fault[] = [];
+  const reached = new Map<string, { to: number; index: number }>();
+  const sorted = collectors.map((collector, index) => ({ ...collector, index })).sort((a, b) => a.from - b.from);
+  for (const { level, from, to, index } of sorted) {
+    const at = `${path}.collectors[${index}]`;
+    const before = reached.get(level);
+    if (!(to > from)) {
       faults.push({
         code: 'no-length',
         path: at,
-        found: `from ${collector.from} to ${collector.to}`,
+        found: `from ${from} to ${to}`,
         expected: 'a collector with from less than to',
       });
+    } else if (before !== undefined && from < before.to) {
+      faults.push({
+        code: 'collectors-overlap',
+        path: at,
+        found: `a collector at level ${level} from ${from}, where collectors[${before.index}] runs to ${before.to}`,
+        expected: 'collectors of one level one after the other',
+      });
     }
-  });
+    if (before === undefined || to > before.to) reached.set(level, { to, index });
+  }
   return faults;
 }
 

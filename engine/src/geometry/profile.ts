@@ -140,10 +140,12 @@ function addCrossings(edges: readonly Edge[], breaks: number[], firstZone: numbe
   if (crossings.length === 0) return;
   const all = gather([...breaks, ...crossings], tolerance);
   // Vertices keep the breaks that they were gathered to.
-  const kept = new Set(breaks);
+  const kept = [...breaks];
+  let next = 0;
   for (const value of all) {
-    if (kept.has(value)) continue;
-    if (breaks.every((b) => Math.abs(b - value) > tolerance)) breaks.push(value);
+    while (next < kept.length && (kept[next] as number) < value - tolerance) next += 1;
+    const near = kept[next];
+    if (near === undefined || near > value + tolerance) breaks.push(value);
   }
   breaks.sort((a, b) => a - b);
 }

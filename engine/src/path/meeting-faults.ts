@@ -2,7 +2,8 @@
 import type { Building } from '../building/definition.js';
 import type { Fault } from '../building/fault.js';
 import { dot, parallel, PARALLEL, unitVector } from '../geometry/frame.js';
-import { buildModel } from './model.js';
+import { tOn, type LineModel } from '../walls/wall-line.js';
+import { buildModel, type Model } from './model.js';
 
 /** @param building a building without any other fault */
 export function meetingFaults(building: Building): Fault[] {
@@ -23,6 +24,7 @@ export function meetingFaults(building: Building): Fault[] {
       });
     });
   }
+  for (const line of model.lines) faults.push(...collectorFaults(model, line));
   building.loadCases.forEach((loadCase, c) => {
     const direction = unitVector(loadCase.direction);
     for (const level of model.levels) {
@@ -54,4 +56,27 @@ export function meetingFaults(building: Building): Fault[] {
     }
   });
   return faults;
+}
+
+/** A stated collector that runs beside every diaphragm of its level would leave the line without one. */
+function collectorFaults(model: Model, line: LineModel): Fault[] {
+  return (line.line.collectors ?? []).flatMap(({ level, from, to }, c): Fault[] => {
+    const ends = [tOn(line, from), tOn(line, to)] as const;
+    const low = Math.min(...ends);
+    const high = Math.max(...ends);
+    const diaphragms = model.levels.find(({ id }) => id === level)?.diaphragms ?? [];
+    const meets = diaphragms
+      .flatMap((diaphragm) => diaphragm.touches)
+      .filter((touch) => touch.line === line)
+      .some(({ cut }) => [...cut.left, ...cut.right].some(([a, b]) => Math.min(b, high) > Math.max(a, low)));
+    if (meets) return [];
+    return [
+      {
+        code: 'collector-meets-no-diaphragm',
+        path: `wallLines[${line.index}].collectors[${c}]`,
+        found: `a collector from ${from} to ${to}, where no diaphragm of level ${level} lies along line ${line.line.id}`,
+        expected: 'a collector along the cut of a diaphragm of its level',
+      },
+    ];
+  });
 }
