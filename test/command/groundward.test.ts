@@ -86,7 +86,9 @@ test('compare names edits and changed members', async () => {
   expect(code).toBe(0);
   const comparison = JSON.parse(out) as { schema: string; edits: { what: string }[]; changes: { class: string }[] };
   expect(comparison.schema).toBe('groundward.comparison/1');
-  expect(comparison.edits.map((edit) => edit.what)).toContain('wall line A, storey under L2, pier Ac, from: 17 → 18.6');
+  expect(comparison.edits.map((edit) => edit.what)).toContain(
+    'wall line A, storey under L2, pier Ac, from: 17 → 18.6 m',
+  );
   expect(new Set(comparison.changes.map((change) => change.class))).toContain('raised');
   expect((await run(['compare', FIRST, SECOND])).out).toContain('pier Ac');
 });

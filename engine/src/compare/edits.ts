@@ -1,32 +1,33 @@
 /** The edits between two building files: what was added, removed or set, matched by id, as RFC 6902 patches. */
 import { applyPatch, type Operation } from 'rfc6902';
-import type { Building } from '../building/definition.js';
+import type { Building, Units } from '../building/definition.js';
+import { unitOfKey } from './key-units.js';
 import type { Edit } from './result.js';
 
 type Json = unknown;
+
+/** Edits so far; units where they are the same before and after. */
+type Steps = {
+  readonly list: { what: string; operation: Operation }[];
+  readonly units: Units | undefined;
+};
 
 /**
  * @returns edits whose patches, applied in order to the earlier file, give the later one
  */
 export function editsBetween(before: Building, after: Building): Edit[] {
-  const steps: { what: string; operation: Operation }[] = [];
+  const steps: Steps = { list: [], units: same(before.units, after.units) ? after.units : undefined };
   // Each operation's path holds for the document as the operations before it left it.
   walk(structuredClone(before), after, '', [], steps);
-  return steps.map(({ what, operation }, i) => ({ id: `e${i + 1}`, what, patch: [operation] }));
+  return steps.list.map(({ what, operation }, i) => ({ id: `e${i + 1}`, what, patch: [operation] }));
 }
 
-function walk(
-  before: Json,
-  after: Json,
-  pointer: string,
-  names: readonly string[],
-  steps: { what: string; operation: Operation }[],
-): void {
+function walk(before: Json, after: Json, pointer: string, names: readonly string[], steps: Steps): void {
   if (same(before, after)) return;
   if (isRecord(before) && isRecord(after)) {
     for (const key of Object.keys(before)) {
       if (key in after) continue;
-      steps.push({
+      steps.list.push({
         what: `${label([...names, key])} removed`,
         operation: { op: 'remove', path: `${pointer}/${escape(key)}` },
       });
@@ -34,7 +35,10 @@ function walk(
     for (const [key, value] of Object.entries(after)) {
       const path = `${pointer}/${escape(key)}`;
       if (!(key in before)) {
-        steps.push({ what: `${label([...names, key])} set to ${shown(value)}`, operation: { op: 'add', path, value } });
+        steps.list.push({
+          what: `${label([...names, key])} set to ${shown(value)}${unitText(value, key, steps)}`,
+          operation: { op: 'add', path, value },
+        });
       } else walk(before[key], value, path, [...names, key], steps);
     }
     return;
@@ -45,8 +49,8 @@ function walk(
     walkList(beforeList, afterList, pointer, names, steps);
     return;
   }
-  steps.push({
-    what: `${label(names)}: ${shown(before)} → ${shown(after)}`,
+  steps.list.push({
+    what: `${label(names)}: ${shown(before)} → ${shown(after)}${unitText(after, names[names.length - 1] ?? '', steps)}`,
     operation: { op: 'replace', path: pointer, value: after },
   });
 }
@@ -59,7 +63,7 @@ function walkList(
   after: Identified,
   pointer: string,
   names: readonly string[],
-  steps: { what: string; operation: Operation }[],
+  steps: Steps,
 ): void {
   const kept = new Set(after.map((entry) => entry.id));
   const current = [...before];
@@ -68,7 +72,7 @@ function walkList(
   for (let i = current.length - 1; i >= 0; i--) {
     const entry = current[i] as Identified[number];
     if (kept.has(entry.id)) continue;
-    steps.push({
+    steps.list.push({
       what: `${label([...owner, `${one} ${entry.id}`])} removed`,
       operation: { op: 'remove', path: `${pointer}/${i}` },
     });
@@ -77,13 +81,13 @@ function walkList(
   after.forEach((entry, i) => {
     const at = current.findIndex((candidate) => candidate.id === entry.id);
     if (at < 0) {
-      steps.push({
+      steps.list.push({
         what: `${label([...owner, `${one} ${entry.id}`])} added`,
         operation: { op: 'add', path: `${pointer}/${i}`, value: entry.value },
       });
       current.splice(i, 0, entry);
     } else if (at !== i) {
-      steps.push({
+      steps.list.push({
         what: `${label([...owner, `${one} ${entry.id}`])} at another place of the list`,
         operation: { op: 'move', from: `${pointer}/${at}`, path: `${pointer}/${i}` },
       });
@@ -166,6 +170,12 @@ function shown(value: Json): string {
     return `${Math.min(...along)} to ${Math.max(...along)}`;
   };
   return `x ${range(0)}, y ${range(1)}${points.length === 4 ? '' : ` (${points.length} points)`}`;
+}
+
+function unitText(value: Json, key: string, { units }: Steps): string {
+  if (typeof value !== 'number' || units === undefined) return '';
+  const unit = unitOfKey(key, units);
+  return unit === '' ? '' : ` ${unit}`;
 }
 
 /** Applies edits to a building file; used to check that they tell the whole difference. */
