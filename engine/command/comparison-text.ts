@@ -1,4 +1,7 @@
-/** A comparison as the terminal shows it: the edits, and the demands that changed, the largest change first. */
+/**
+ * A comparison as the terminal shows it: the edits, and the demands that changed. The largest change comes first, measured by the
+ * largest demand of its kind and quantity, so that nothing small that doubled goes before something large that grew.
+ */
 import type { Change, Comparison } from '../src/compare/result.js';
 import { figure, senseText, tableText } from './table.js';
 
@@ -6,7 +9,18 @@ export function comparisonText(comparison: Comparison): string {
   const changed = comparison.changes.filter((change) => change.class !== 'unchanged');
   const counts = new Map<string, number>();
   for (const change of comparison.changes) counts.set(change.class, (counts.get(change.class) ?? 0) + 1);
-  const rows = [...changed].sort((a, b) => size(b) - size(a));
+  const largest = new Map<string, number>();
+  for (const change of comparison.changes) {
+    const key = measureOf(change);
+    const most = Math.max(largest.get(key) ?? 0, Math.abs(change.before ?? 0), Math.abs(change.after ?? 0));
+    largest.set(key, most);
+  }
+  const size = (change: Change): number =>
+    Math.abs((change.after ?? 0) - (change.before ?? 0)) / (largest.get(measureOf(change)) || 1);
+  const rows = changed
+    .map((change) => ({ change, size: size(change) }))
+    .sort((a, b) => b.size - a.size)
+    .map(({ change }) => change);
   return [
     `Edits\n${comparison.edits.length === 0 ? 'none\n' : comparison.edits.map((edit) => `${edit.id}  ${edit.what}\n`).join('')}`,
     `Demands: ${[...counts].map(([name, count]) => `${count} ${name}`).join(', ')}\n`,
@@ -39,10 +53,6 @@ export function comparisonText(comparison: Comparison): string {
   ].join('\n');
 }
 
-/** Change relative to the larger value; what came or went counts as a whole. */
-function size(change: Change): number {
-  const before = Math.abs(change.before ?? 0);
-  const after = Math.abs(change.after ?? 0);
-  const most = Math.max(before, after);
-  return most === 0 ? 0 : Math.abs((change.after ?? 0) - (change.before ?? 0)) / most;
+function measureOf(change: Change): string {
+  return `${change.kind} ${change.quantity}`;
 }

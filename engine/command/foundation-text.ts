@@ -3,6 +3,12 @@ import { CAUTION } from '../src/foundation/csv.js';
 import type { Foundation } from '../src/foundation/result.js';
 import { figure, senseText, tableText } from './table.js';
 
+/** Figures of one dimension; what is rounding beside the largest of them reads as 0. */
+function plain(values: readonly number[]): string[] {
+  const most = Math.max(...values.map(Math.abs));
+  return values.map((value) => figure(Math.abs(value) <= 1e-12 * most ? 0 : value));
+}
+
 export function foundationText(foundation: Foundation): string {
   const { length, force } = foundation.units;
   const governing = foundation.supports.flatMap((support) =>
@@ -24,7 +30,8 @@ export function foundationText(foundation: Foundation): string {
   const totals = foundation.totals.map((total) => [
     total.case,
     senseText(total.sense),
-    ...[total.fx, total.fy, total.fz, total.mx, total.my, total.mz].map(figure),
+    ...plain([total.fx, total.fy, total.fz]),
+    ...plain([total.mx, total.my, total.mz]),
   ]);
   return [
     `${foundation.building}: foundation demands, the governing ones\nunits ${length}, ${force}\n`,

@@ -82,4 +82,6 @@ test('CSV: one line a demand, a head, a caution; a text that looks like a formul
     supports: demands.supports.slice(0, 1).map((support) => ({ ...support, line: '=1+1', member: 'a,"b"' })),
   };
   expect(foundationCsv(odd)).toContain(`F1,"a,""b""",'=1+1,`);
+  const sums = { ...odd, supports: odd.supports.map((support) => ({ ...support, line: '-1+2', member: '-3' })) };
+  expect(foundationCsv(sums)).toContain(`F1,-3,'-1+2,`);
 });

@@ -45,6 +45,7 @@ export function foundationCsv(foundation: Foundation): string {
 
 /** Quoted where it must be; a text that a spreadsheet would take for a formula is kept a text. */
 function field(value: string): string {
-  const safe = /^[=+@\t\r]|^-[^\d.]/.test(value) ? `'${value}` : value;
+  const number = /^-?\d+(?:\.\d+)?(?:e[+-]?\d+)?$/.test(value);
+  const safe = !number && /^[=+\-@\t\r]/.test(value) ? `'${value}` : value;
   return /[",\r\n]/.test(safe) ? `"${safe.replaceAll('"', '""')}"` : safe;
 }
