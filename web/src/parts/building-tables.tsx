@@ -1,6 +1,6 @@
 'use client';
 import type { Building } from '@groundward/engine/building/definition';
-import { EditTable, type EditColumn, type Editing } from './edit-table';
+import { EditTable, type Editing } from './edit-table';
 
 /** While it is edited the document may be at fault; what can be shown of it is shown. */
 export function partsOf(
@@ -53,37 +53,7 @@ export function ForcesTable(props: Editing) {
           )}
         </section>
       ))}
-      <BasisTable {...props} />
     </div>
-  );
-}
-
-const BASIS: readonly EditColumn[] = [
-  { head: 'S_DS', key: ['SDS'] },
-  { head: 'S_D1', key: ['SD1'] },
-  { head: 'S_1', key: ['S1'] },
-  { head: 'R', key: ['R'] },
-  { head: 'Ω₀', key: ['overstrength'] },
-  { head: 'C_d', key: ['Cd'] },
-  { head: 'I_e', key: ['importance'] },
-  { head: 'ρ', key: ['redundancy'] },
-  { head: 'T', unit: 's', key: ['period'] },
-];
-
-function BasisTable(props: Editing) {
-  const file = (props.document ?? {}) as Partial<Building>;
-  if (file.basis?.seismic === undefined) return null;
-  return (
-    <section className="panel">
-      <h2>{`Seismic basis, ${file.basis.standard}`}</h2>
-      <EditTable
-        {...props}
-        label="Seismic basis"
-        head=""
-        columns={BASIS}
-        rows={[{ key: 'basis', head: 'values', path: ['basis', 'seismic'] }]}
-      />
-    </section>
   );
 }
 
@@ -136,7 +106,7 @@ export function WeightsTable(props: Editing) {
           label="Floors and roofs"
           head="Diaphragm"
           columns={[
-            { head: 'Behaviour', key: ['behaviour'], choices: ['flexible', 'rigid', 'semi-rigid'] },
+            { head: 'Behaviour', key: ['behaviour'], choices: ['flexible', 'rigid', 'semi-rigid', 'envelope'] },
             { head: 'Area weight', unit: perArea, key: ['weight', 'area'] },
             { head: 'Assembly', key: ['assembly'], choices: (assemblies?.diaphragms ?? []).map(({ id }) => id) },
           ]}
@@ -188,7 +158,7 @@ export function LinesTable(props: Editing) {
         { head: 'From y', unit: units.length, key: ['axis', 0, 1] },
         { head: 'To x', unit: units.length, key: ['axis', 1, 0] },
         { head: 'To y', unit: units.length, key: ['axis', 1, 1] },
-        { head: 'Piers share by', key: ['shareBy'], choices: ['length', 'stiffness'] },
+        { head: 'Piers share by', key: ['shareBy'], choices: ['length', 'stiffness', 'deflection'] },
       ]}
       rows={wallLines.map((line, l) => ({ key: line.id, head: line.id, path: ['wallLines', l] }))}
     />
