@@ -95,6 +95,43 @@ describe.skipIf(executablePath === undefined)('editing a building in the browser
     await page.getByRole('button', { name: 'Drop the changes' }).click();
   });
 
+  test('what the file may state beyond the tables is put in by forms: a fault leads to its field, a save keeps it', async () => {
+    const { page } = dashboard;
+    const before = (await version()) ?? 0;
+    await page.goto(`${await dashboard.view(3, 'building')}?section=basis`);
+    const field = page.getByRole('group', { name: 'Seismic', exact: true }).getByLabel('Overstrength', { exact: true });
+    await field.fill('much');
+    await field.press('Enter');
+    await save();
+    await page.getByRole('alert').filter({ hasText: 'basis.seismic.overstrength' }).waitFor();
+    await page.getByRole('link', { name: 'Piers' }).click();
+    await page.getByRole('alert').getByRole('button', { name: 'go there' }).first().click();
+    await expect.poll(() => field.evaluate((element) => element === document.activeElement)).toBe(true);
+    await field.fill('2.5');
+    await field.press('Enter');
+    await page
+      .getByRole('group', { name: 'EX', exact: true })
+      .getByRole('button', { name: 'State accidental' })
+      .click();
+    await page.getByRole('group', { name: 'EX', exact: true }).getByLabel('Ratio', { exact: true }).fill('0.05');
+    await page.keyboard.press('Enter');
+    await save();
+    await expect.poll(version, { timeout: 30_000 }).toBe(before + 1);
+    const revision = (await dashboard.revisions()).find(({ number }) => number === 3);
+    const saved = await dashboard.json<{ loadCases: { id: string; accidental?: unknown }[]; basis: unknown }>(
+      `/api/projects/${await dashboard.project()}/revisions/${revision?.id ?? ''}/building`,
+    );
+    expect(saved.basis).toMatchObject({ seismic: { overstrength: 2.5 } });
+    expect(saved.loadCases.find(({ id }) => id === 'EX')?.accidental).toEqual({ ratio: 0.05 });
+  });
+
+  test('one member is shown in full: a floor with its outline as lines of points', async () => {
+    const { page } = dashboard;
+    await page.goto(`${await dashboard.view(3, 'building')}?section=member&kind=Floors+and+roofs&member=L2/L2-main`);
+    const outline = page.getByLabel('Outline [m]', { exact: true }).first();
+    await expect.poll(() => outline.inputValue()).toContain('30 0');
+  });
+
   test('an issued revision is shown and cannot be typed into', async () => {
     const { page } = dashboard;
     await page.goto(await dashboard.view(1, 'building'));

@@ -28,10 +28,7 @@ export function NumbersField({
   const faults = faultsAt(editing.faults, path);
   return (
     <div className={text === was ? 'schema-field' : 'schema-field changed'}>
-      <label htmlFor={id}>
-        {title}
-        {unit !== undefined && <span className="unit"> [{unit}]</span>}
-      </label>
+      <label htmlFor={id}>{unit === undefined ? title : `${title} [${unit}]`}</label>
       <textarea
         key={text}
         id={id}

@@ -41,10 +41,7 @@ export function SchemaField({
   } as const;
   return (
     <div className={text === was ? 'schema-field' : 'schema-field changed'}>
-      <label htmlFor={id}>
-        {title}
-        {unit !== undefined && <span className="unit"> [{unit}]</span>}
-      </label>
+      <label htmlFor={id}>{unit === undefined ? title : `${title} [${unit}]`}</label>
       {shape === 'fixed' ? (
         <output id={id}>{String(node.const)}</output>
       ) : choices !== undefined ? (

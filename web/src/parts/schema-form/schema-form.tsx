@@ -6,6 +6,7 @@ import { getAt, jsonPath, type Path } from '@/lib/edit';
 import {
   asVariant,
   blank,
+  choicesOf,
   helpOf,
   isPlain,
   shapeOf,
@@ -15,11 +16,13 @@ import {
   variantsOf,
   type SchemaNode,
 } from '@/lib/schema';
-import type { Editing } from '../edit-table';
+import { EditTable, type EditColumn, type Editing } from '../edit-table';
 import { NumbersField } from './numbers-field';
 import { SchemaField } from './schema-field';
 
 type Props = {
+  /** Whether the title stands already where the form stands. */
+  readonly bare?: boolean;
   readonly node: SchemaNode;
   readonly path: Path;
   readonly title: string;
@@ -72,7 +75,16 @@ function Absent({ node, path, title, units, editing }: Props) {
   );
 }
 
-function ObjectForm({ node, path, title, required, units, editing, skip = [] }: Props & { skip?: readonly string[] }) {
+function ObjectForm({
+  node,
+  path,
+  title,
+  required,
+  units,
+  editing,
+  bare = false,
+  skip = [],
+}: Props & { readonly skip?: readonly string[] }) {
   const entries = Object.entries(node.properties ?? {}).filter(([key]) => !skip.includes(key));
   const part = ([key, property]: readonly [string, SchemaNode]) => (
     <SchemaForm
@@ -88,10 +100,12 @@ function ObjectForm({ node, path, title, required, units, editing, skip = [] }: 
   const plain = entries.filter(([, property]) => isPlain(property));
   const deep = entries.filter(([, property]) => !isPlain(property));
   return (
-    <fieldset className="schema">
-      <legend>
-        {title} <LeaveOut {...{ path, title, required, editing }} />
-      </legend>
+    <fieldset className="schema" aria-label={title}>
+      {!bare && (
+        <legend>
+          {title} <LeaveOut {...{ path, title, required, editing }} />
+        </legend>
+      )}
       {node.description !== undefined && <p className="help">{helpOf(node, units).help}</p>}
       <Faults {...{ editing, path }} />
       {plain.length > 0 && <div className="schema-fields">{plain.map(part)}</div>}
@@ -127,49 +141,98 @@ function UnionForm(props: Props & { readonly skip?: readonly string[] }) {
         </select>
         <LeaveOut {...{ path, title, required, editing }} />
       </div>
-      <SchemaForm {...props} node={variants[index] ?? {}} required />
+      <SchemaForm {...props} node={variants[index] ?? {}} required bare />
     </div>
   );
 }
 
-function ListForm({ node, path, title, required, units, editing }: Props) {
+function ListForm(props: Props) {
+  const { node, path, title, required, units, editing } = props;
   const items = node.items ?? {};
   const value = getAt(editing.document, path);
   const rows: readonly unknown[] = Array.isArray(value) ? value : [];
   return (
-    <fieldset className="schema">
+    <fieldset className="schema" aria-label={title}>
       <legend>
         {title} <LeaveOut {...{ path, title, required, editing }} />
       </legend>
       {node.description !== undefined && <p className="help">{helpOf(node, units).help}</p>}
       <Faults {...{ editing, path }} />
-      {rows.map((row, i) => (
-        <details key={i} className="schema-row" open={rows.length <= 4}>
-          <summary>{nameOf(row, i)}</summary>
-          <SchemaForm
-            node={items}
-            path={[...path, i]}
-            title={nameOf(row, i)}
-            required
-            units={units}
-            editing={editing}
-          />
-          {!editing.locked && (
-            <button
-              className="quiet"
-              onClick={() => editing.onChange([{ path, value: rows.filter((_, other) => other !== i) }])}
-            >
-              {`Remove ${nameOf(row, i)}`}
-            </button>
-          )}
-        </details>
-      ))}
+      {isRow(items) ? (
+        <RowTable {...props} rows={rows} />
+      ) : (
+        rows.map((row, i) => (
+          <details key={i} className="schema-row" open={rows.length <= 4}>
+            <summary>{nameOf(row, i)}</summary>
+            <SchemaForm
+              node={items}
+              path={[...path, i]}
+              title={nameOf(row, i)}
+              required
+              bare
+              units={units}
+              editing={editing}
+            />
+            {!editing.locked && <Remove {...{ path, rows, editing }} at={i} />}
+          </details>
+        ))
+      )}
       {!editing.locked && (
         <button onClick={() => editing.onChange([{ path: [...path, rows.length], value: blank(items) ?? '' }])}>
           {`Add to ${lower(title)}`}
         </button>
       )}
     </fieldset>
+  );
+}
+
+/** Whether an entry of a list is a row of plain values. */
+function isRow(node: SchemaNode): boolean {
+  return shapeOf(node) === 'object' && Object.values(node.properties ?? {}).every(isPlain);
+}
+
+function RowTable({ node, path, title, units, editing, rows }: Props & { readonly rows: readonly unknown[] }) {
+  const columns = Object.entries(node.items?.properties ?? {}).map(([key, property]): EditColumn => {
+    const { unit } = helpOf(property, units);
+    const choices = choicesOf(property);
+    const head = titleOf(key);
+    return {
+      head,
+      key: [key],
+      text: shapeOf(property) === 'text',
+      ...(unit === undefined ? {} : { unit }),
+      ...(choices === undefined ? {} : { choices }),
+    };
+  });
+  return (
+    <EditTable
+      {...editing}
+      label={title}
+      head=""
+      columns={columns}
+      rows={rows.map((row, i) => ({
+        key: `${title} ${nameOf(row, i)}`,
+        head: String(i + 1),
+        path: [...path, i],
+        actions: editing.locked ? undefined : <Remove {...{ path, rows, editing }} at={i} />,
+      }))}
+    />
+  );
+}
+
+function Remove({
+  path,
+  rows,
+  editing,
+  at,
+}: Pick<Props, 'path' | 'editing'> & { readonly rows: readonly unknown[]; readonly at: number }) {
+  return (
+    <button
+      className="quiet"
+      onClick={() => editing.onChange([{ path, value: rows.filter((_, other) => other !== at) }])}
+    >
+      {`Remove ${nameOf(rows[at], at)}`}
+    </button>
   );
 }
 
