@@ -23,6 +23,9 @@ export function comparisonText(comparison: Comparison): string {
     .map(({ change }) => change);
   return [
     `Edits\n${comparison.edits.length === 0 ? 'none\n' : comparison.edits.map((edit) => `${edit.id}  ${edit.what}\n`).join('')}`,
+    comparison.method?.kind === 'sampled'
+      ? `Shares are sampled: ${comparison.method.pairs} pairs of orders, seed ${comparison.method.seed}; the standard error stands behind ±\n`
+      : '',
     `Demands: ${[...counts].map(([name, count]) => `${count} ${name}`).join(', ')}\n`,
     rows.length === 0
       ? ''
@@ -37,6 +40,7 @@ export function comparisonText(comparison: Comparison): string {
             { head: 'before', align: 'right' },
             { head: 'after', align: 'right' },
             { head: 'unit' },
+            ...(comparison.method === undefined ? [] : [{ head: 'of which by' }]),
           ],
           rows.map((change) => [
             change.class,
@@ -48,11 +52,25 @@ export function comparisonText(comparison: Comparison): string {
             change.before === null ? '–' : figure(change.before),
             change.after === null ? '–' : figure(change.after),
             change.unit,
+            ...(comparison.method === undefined ? [] : [causesText(change)]),
           ]),
         ),
-  ].join('\n');
+  ]
+    .filter((part) => part !== '')
+    .join('\n');
 }
 
 function measureOf(change: Change): string {
   return `${change.kind} ${change.quantity}`;
+}
+
+/** `e2 +1.2 e1 −0.3`: the largest share first. */
+function causesText({ causes }: Change): string {
+  return [...causes]
+    .sort((a, b) => Math.abs(b.share) - Math.abs(a.share))
+    .map(
+      ({ edit, share, error }) =>
+        `${edit} ${share < 0 ? '−' : '+'}${figure(Math.abs(share))}${error === undefined ? '' : ` ±${figure(error)}`}`,
+    )
+    .join('  ');
 }

@@ -3,6 +3,7 @@ import { readBuildingText } from '../src/building/read.js';
 import { buildingSchema } from '../src/building/json-schema.js';
 import { faultSentence, type Fault } from '../src/building/fault.js';
 import type { Building } from '../src/building/definition.js';
+import { compareWithCauses } from '../src/compare/causes.js';
 import { compare } from '../src/compare/compare.js';
 import { foundationCsv } from '../src/foundation/csv.js';
 import { foundation } from '../src/foundation/foundation.js';
@@ -25,7 +26,7 @@ export type ExitCode = 0 | 1 | 2 | 3;
 
 const USAGE = `groundward analyse FILE [--json]              demands, findings and certificate of a building file
 groundward foundation FILE [--json | --csv]   what arrives at every support
-groundward compare BEFORE AFTER [--json]      what changed, by member
+groundward compare BEFORE AFTER [--json] [--no-causes]   what changed, by member, and why
 groundward check FILE                         validates only
 groundward schema building | analysis         the JSON Schema
 
@@ -82,11 +83,11 @@ async function run(argv: readonly string[], io: Io): Promise<void> {
       return;
     }
     case 'compare': {
-      const { files, options } = words(rest, 2, ['--json']);
+      const { files, options } = words(rest, 2, ['--json', '--no-causes']);
       if (files[0] === '-' && files[1] === '-') throw wrong('only one file can come from standard input');
       const before = await analysed(files[0] as string, io);
       const after = await analysed(files[1] as string, io);
-      const comparison = compare(before, after);
+      const comparison = options.has('--no-causes') ? compare(before, after) : compareWithCauses(before, after);
       io.out(options.has('--json') ? json(comparison) : comparisonText(comparison));
       return;
     }

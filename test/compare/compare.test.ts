@@ -39,10 +39,13 @@ test('lists that were reordered, shortened and lengthened are patched by identit
   expect(applyEdits(shuffled, editsBetween(shuffled, first))).toEqual(first);
 });
 
-test('an edit is one sentence in the trade’s words', () => {
+test('edits that an engineer would call one change are one, in one sentence', () => {
   const sentences = editsBetween(second, third).map((edit) => edit.what);
-  expect(sentences).toContain('wall line B, storey under L2, pier Bd added');
-  expect(sentences).toContain('wall line A, storey under L2, pier Ad, from: 25 → 24.2 m');
+  expect(sentences).toEqual([
+    'wall line A, storey under L2, pier Ad, from: 25 → 24.2 m; to: 28.6 → 29.4 m',
+    'wall line B, storey under L2 and L3, pier Bd added',
+    'wall line F, storey under L3, pier Fa and Fb, assembly: wall-3 → wall-2',
+  ]);
 });
 
 test('a building against itself has no edit and every demand unchanged', () => {

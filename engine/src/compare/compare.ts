@@ -28,7 +28,10 @@ export function compare(before: Compared, after: Compared, tolerance: Tolerance 
   return { schema: 'groundward.comparison/1', edits: editsBetween(before.building, after.building), changes };
 }
 
-function keyOf(row: Demand): string {
+/** What makes two rows the same demand. */
+export function keyOf(
+  row: Pick<Demand, 'kind' | 'member' | 'quantity' | 'case' | 'sense'> & { readonly combination?: string | undefined },
+): string {
   return JSON.stringify([row.kind, row.member, row.quantity, row.case, row.sense, row.combination ?? null]);
 }
 

@@ -1,8 +1,17 @@
 /** What changed between two buildings, `groundward.comparison/1`. */
 import type { Operation } from 'rfc6902';
+import type { Method } from './shapley.js';
 import type { DemandKind, Quantity, Sense } from '../path/result.js';
 
 export type ChangeClass = 'added' | 'removed' | 'moved' | 'raised' | 'lowered' | 'unchanged';
+
+export type Cause = {
+  readonly edit: string;
+  /** In the demand’s own unit. */
+  readonly share: number;
+  /** Standard error of a share that was sampled. */
+  readonly error?: number;
+};
 
 export type Change = {
   readonly member: string;
@@ -17,7 +26,8 @@ export type Change = {
   readonly after: number | null;
   readonly unit: string;
   readonly class: ChangeClass;
-  readonly causes: readonly { readonly edit: string; readonly share: number }[];
+  /** Shares add up to `after − before`, null counted as 0; empty where causes were not asked for. */
+  readonly causes: readonly Cause[];
 };
 
 export type Edit = {
@@ -30,5 +40,7 @@ export type Edit = {
 export type Comparison = {
   readonly schema: 'groundward.comparison/1';
   readonly edits: readonly Edit[];
+  /** How the causes were found; absent where they were not asked for. */
+  readonly method?: Method;
   readonly changes: readonly Change[];
 };
