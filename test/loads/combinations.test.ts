@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import type { Building } from '@groundward/engine/building/definition';
-import { combinationsOf } from '@groundward/engine/loads/combinations';
+import { combinationsFor, gravityCombinations } from '@groundward/engine/loads/combinations';
 
 const outline: [number, number][] = [
   [0, 0],
@@ -27,9 +27,20 @@ function building(combinations: Building['combinations'], basis?: Building['basi
 
 const seismic = { SDS: 1, SD1: 0.6, R: 6.5, redundancy: 1.3 };
 
+/** All combinations that the building's one case can enter, seismic or wind, and those of gravity. */
+function all(of: Building) {
+  const [loadCase] = of.loadCases;
+  if (loadCase === undefined) throw new Error('no load case');
+  return [
+    ...gravityCombinations(of),
+    ...combinationsFor(of, loadCase),
+    ...combinationsFor(of, { ...loadCase, kind: 'wind' } as typeof loadCase),
+  ];
+}
+
 /** `D L Lr S | lateral` of a combination. */
 function factors(set: Building['combinations'], id: string, basis?: Building['basis']): (number | undefined)[] {
-  const found = combinationsOf(building(set, basis)).find((combination) => combination.id === id);
+  const found = all(building(set, basis)).find((combination) => combination.id === id);
   return [found?.gravity.D, found?.gravity.L, found?.gravity.Lr, found?.gravity.S, found?.lateral];
 }
 
@@ -55,6 +66,11 @@ describe('published sets', () => {
     ['ASCE 7-22 strength', '1.2D+S+L', [1.2, 1, 0, 1, 0]],
     ['ASCE 7-22 strength', '1.2D+W+L+0.3S', [1.2, 1, 0, 0.3, 1]],
     ['ASCE 7-22 strength', '1.2D+E+L+0.15S', [1.2, 1, 0, 0.15, 1]],
+    // EN 1990:2002 Eqs. 6.10 and 6.12b, Tables A1.1 and A1.2; from memory, not checked against the document
+    ['EN 1990', '1.35D+1.5L+0.75S', [1.35, 1.5, 0, 0.75, 0]],
+    ['EN 1990', '1.35D+1.5W+1.05L+0.75S', [1.35, 1.05, 0, 0.75, 1.5]],
+    ['EN 1990', '0.9D+1.5W', [0.9, 0, 0, 0, 1.5]],
+    ['EN 1990', 'D+E+0.3L', [1, 0.3, 0, 0, 1]],
   ] as const)('%s, %s', (set, id, expected) => {
     expect(factors(set, id)).toEqual(expected);
   });
@@ -65,8 +81,9 @@ describe('published sets', () => {
       'ASCE 7-22 allowable',
       'ASCE 7-16 strength',
       'ASCE 7-22 strength',
+      'EN 1990',
     ] as const) {
-      const ids = combinationsOf(building(set)).map(({ id }) => id);
+      const ids = all(building(set)).map(({ id }) => id);
       expect(new Set(ids).size).toBe(ids.length);
     }
   });
@@ -91,7 +108,8 @@ test('a list of the file’s own is taken literally, whatever the basis', () => 
     { id: 'b', factors: { D: 1, L: 0.5, W: 0.6 } },
     { id: 'c', factors: { D: 1.4 } },
   ];
-  expect(combinationsOf(building(own, { standard: 'ASCE 7-22', seismic }))).toEqual([
+  const found = all(building(own, { standard: 'ASCE 7-22', seismic }));
+  expect([...found].sort((a, b) => (a.id < b.id ? -1 : 1))).toEqual([
     { id: 'a', applies: 'seismic', gravity: { D: 0.6, L: 0, Lr: 0, S: 0 }, lateral: 0.7 },
     { id: 'b', applies: 'wind', gravity: { D: 1, L: 0.5, Lr: 0, S: 0 }, lateral: 0.6 },
     { id: 'c', applies: 'gravity', gravity: { D: 1.4, L: 0, Lr: 0, S: 0 }, lateral: 0 },
@@ -99,5 +117,29 @@ test('a list of the file’s own is taken literally, whatever the basis', () => 
 });
 
 test('without combinations the components stay unfactored', () => {
-  expect(combinationsOf(building(undefined))).toEqual([]);
+  expect(all(building(undefined))).toEqual([]);
+});
+
+test('a case takes the set of its basis, with that basis’ own S_DS; gravity is combined by every set in use', () => {
+  const [stated] = building(undefined).loadCases;
+  if (stated === undefined) throw new Error('no load case');
+  const en = { ...stated, id: 'EN', basis: 'en' };
+  const mild = { ...stated, id: 'mild', basis: 'mild' };
+  const file: Building = {
+    ...building('ASCE 7-22 allowable', { standard: 'ASCE 7-22', seismic }),
+    bases: [
+      { id: 'en', standard: 'EN 1998-1', seismic: { agR: 0.2, groundType: 'B', q: 2 }, combinations: 'EN 1990' },
+      { id: 'mild', standard: 'ASCE 7-22', seismic: { SDS: 0.5, SD1: 0.2, R: 6.5 } },
+    ],
+    loadCases: [stated, en, mild],
+  };
+  const dead = (loadCase: typeof stated, id: string) =>
+    combinationsFor(file, loadCase).find((combination) => combination.id === id)?.gravity.D;
+  expect(combinationsFor(file, en).map(({ id }) => id)).toEqual(['D+E+0.3L', 'D+E']);
+  // 0.6 − 0.7·0.2·S_DS: ASCE 7-16 12.4.2.2
+  expect(dead(stated, '0.6D+0.7E')).toBeCloseTo(0.46, 12);
+  expect(dead(mild, '0.6D+0.7E')).toBeCloseTo(0.53, 12);
+  const gravity = gravityCombinations(file).map(({ id }) => id);
+  expect(gravity).toEqual(expect.arrayContaining(['D+0.7S', '1.35D+1.5L+0.75S']));
+  expect(new Set(gravity).size).toBe(gravity.length);
 });

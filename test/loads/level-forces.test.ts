@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
 import type { Building, LoadCase } from '@groundward/engine/building/definition';
-import { levelForces, weighedLevels } from '@groundward/engine/loads/level-forces';
+import { levelForces } from '@groundward/engine/loads/level-forces';
+import { weighedLevels } from '@groundward/engine/loads/seismic-weight';
 
 const byBasis: LoadCase = { id: 'EX', kind: 'seismic', direction: 0, from: 'basis' };
 
@@ -74,7 +75,7 @@ test('a floor weighs its net area, zones in place of it within the outline, and 
   const [level, roof] = weighedLevels(feet);
   expect(level?.weight).toBeCloseTo(floor, 10);
   expect(roof?.weight).toBeCloseTo(60 * 40 * 0.02, 10);
-  expect([level?.heightFt, roof?.heightFt]).toEqual([10, 20]);
+  expect([level?.height, roof?.height]).toEqual([10, 20]);
 });
 
 test('the basis gives base shear, vertical distribution and diaphragm forces', () => {

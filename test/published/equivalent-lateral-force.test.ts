@@ -5,7 +5,7 @@ import {
   diaphragmForces,
   upperLimit,
   verticalDistribution,
-} from '@groundward/engine/loads/equivalent-lateral-force';
+} from '@groundward/engine/loads/asce7/equivalent-lateral-force';
 
 const plain = { SDS: 1, SD1: 0.6, R: 6.5 };
 

@@ -3,30 +3,15 @@
  * the HTTP interface and the forms are made. Numbers are in the file's own units.
  */
 import { z } from 'zod';
+import { Basis, NamedBasis } from './basis.js';
+import { Combinations } from './combination.js';
+import { LoadCase } from './load-cases.js';
+import { Coordinate, GravityCase, Id, Name, Point, Positive, Ring, Weight } from './values.js';
 
-const LIMIT = 1e9;
-
-// Half a character pair and the zero character cannot be kept by every database and every program.
-const ID = /^[^\s/\p{Cc}\p{Cs}]+$/u;
-const TEXT = /^[^\p{Cc}\p{Cs}]*$/u;
-
-export const Id = z
-  .string()
-  .min(1)
-  .max(64)
-  .regex(ID, 'an id without white space, control characters and "/"')
-  .describe('Identity for life: goes from revision to revision with its member; unique in its collection.');
-const Name = z.string().min(1).max(200).regex(TEXT, 'text without control characters');
-const Coordinate = z.number().min(-LIMIT).max(LIMIT);
-const Weight = z.number().nonnegative().max(LIMIT);
-const Positive = z.number().positive().max(LIMIT);
-
-export const Point = z.tuple([Coordinate, Coordinate]).describe('[x, y] on plan [length]');
-export const Ring = z
-  .array(Point)
-  .min(3)
-  .max(2000)
-  .describe('Simple polygon without a repeated last point, in either direction [length]');
+export { GravityCase, Id, Point, Ring } from './values.js';
+export type { Basis, NamedBasis } from './basis.js';
+export type { Combination } from './combination.js';
+export type { LoadCase, StatedCase } from './load-cases.js';
 
 export const Units = z
   .discriminatedUnion('length', [
@@ -34,10 +19,6 @@ export const Units = z
     z.strictObject({ length: z.literal('m'), force: z.literal('kN') }),
   ])
   .describe('Every number in the file and in its results is in these units and their products.');
-
-export const GravityCase = z
-  .enum(['D', 'L', 'Lr', 'S'])
-  .describe('D dead, L live, Lr roof live, S snow: unfactored components of gravity load');
 
 export const WeightZone = z.strictObject({
   id: Id,
@@ -165,103 +146,6 @@ export const Assemblies = z.strictObject({
   holdDowns: z.array(HoldDownAssembly).max(2000).optional(),
 });
 
-export const SeismicBasis = z.strictObject({
-  SDS: Positive,
-  SD1: Positive,
-  S1: Weight.optional().describe('Default 0: the limit for S1 ≥ 0.6 does not apply'),
-  TL: Positive.optional().describe('Long-period transition [s]; default 8'),
-  R: Positive,
-  overstrength: Positive.optional().describe('Ω₀; default 1'),
-  Cd: Positive.optional().describe('Default R'),
-  importance: Positive.optional().describe('Iₑ; default 1'),
-  redundancy: z.number().min(1).max(1.3).optional().describe('ρ; default 1'),
-  designCategory: z.enum(['A', 'B', 'C', 'D', 'E', 'F']).optional(),
-  period: Positive.optional().describe('T [s]; default the approximate period Cₜ hₙˣ'),
-  Ct: Positive.optional().describe('Cₜ for hₙ in feet; default 0.02'),
-  x: Positive.optional().describe('Default 0.75'),
-});
-
-export const Basis = z.strictObject({
-  standard: z.enum(['ASCE 7-16', 'ASCE 7-22']),
-  seismic: SeismicBasis.optional(),
-});
-
-const Direction = z
-  .number()
-  .min(-360)
-  .max(360)
-  .describe('Direction in which the load acts, degrees anticlockwise from +x; both senses are run');
-
-export const Accidental = z.strictObject({
-  ratio: z.number().positive().max(0.5).describe('Accidental eccentricity over the plan dimension across the load'),
-  amplified: z
-    .boolean()
-    .optional()
-    .describe('Amplify by Aₓ where the diaphragm is torsionally irregular; default false'),
-});
-
-export const LevelForce = z.strictObject({
-  level: Id,
-  force: z.number().min(-LIMIT).max(LIMIT).describe('Storey force set: for walls and all that they hand down [force]'),
-  diaphragmForce: z
-    .number()
-    .min(-LIMIT)
-    .max(LIMIT)
-    .optional()
-    .describe('Diaphragm design force; default the level’s force [force]'),
-});
-
-const Spread = z
-  .enum(['weight', 'area', 'even'])
-  .optional()
-  .describe('How a level’s force lies on its diaphragms; default weight, and area where no weight is stated');
-
-const caseHead = {
-  id: z.string().min(1).max(32).regex(ID, 'an id without white space, control characters and "/"'),
-  name: Name.optional(),
-  direction: Direction,
-  accidental: Accidental.optional(),
-  spread: Spread,
-};
-
-export const StatedCase = z.strictObject({
-  ...caseHead,
-  kind: z.enum(['seismic', 'wind']),
-  from: z.literal('stated'),
-  forces: z.array(LevelForce).min(1).max(500),
-});
-
-export const BasisCase = z.strictObject({
-  ...caseHead,
-  kind: z.literal('seismic'),
-  from: z.literal('basis'),
-});
-
-export const LoadCase = z.discriminatedUnion('from', [StatedCase, BasisCase]);
-
-export const Combination = z.strictObject({
-  id: z.string().min(1).max(64).regex(TEXT, 'text without control characters'),
-  factors: z
-    .strictObject({
-      D: z.number().optional(),
-      L: z.number().optional(),
-      Lr: z.number().optional(),
-      S: z.number().optional(),
-      E: z.number().optional(),
-      W: z.number().optional(),
-    })
-    .describe('Factors taken as stated: E and W multiply the load case’s own effect'),
-});
-
-export const Combinations = z
-  .union([
-    z.enum(['ASCE 7-16 allowable', 'ASCE 7-16 strength', 'ASCE 7-22 allowable', 'ASCE 7-22 strength']),
-    z.array(Combination).max(500),
-  ])
-  .describe(
-    'A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it.',
-  );
-
 export const Building = z
   .strictObject({
     schema: z.literal('groundward.building/1'),
@@ -270,7 +154,14 @@ export const Building = z
     levels: z.array(Level).min(2).max(500),
     wallLines: z.array(WallLine).max(2000),
     assemblies: Assemblies.optional(),
-    basis: Basis.optional(),
+    basis: Basis.optional().describe('Basis of design of every load case that names none'),
+    bases: z
+      .array(NamedBasis)
+      .max(20)
+      .optional()
+      .describe(
+        'Further bases of design, side by side: a load case names the one that it takes; where the file has no other, the only one is every case’s',
+      ),
     loadCases: z.array(LoadCase).min(1).max(64),
     combinations: Combinations.optional(),
     postTolerance: Weight.optional().describe(
@@ -279,20 +170,11 @@ export const Building = z
   })
   .meta({ id: 'groundward.building/1', title: 'Groundward building file' });
 
-export type Id = z.infer<typeof Id>;
-export type Point = z.infer<typeof Point>;
-export type Ring = z.infer<typeof Ring>;
 export type Units = z.infer<typeof Units>;
-export type GravityCase = z.infer<typeof GravityCase>;
 export type Behaviour = z.infer<typeof Behaviour>;
 export type Opening = z.infer<typeof Opening>;
 export type Diaphragm = z.infer<typeof Diaphragm>;
 export type Level = z.infer<typeof Level>;
 export type Pier = z.infer<typeof Pier>;
 export type WallLine = z.infer<typeof WallLine>;
-export type LoadCase = z.infer<typeof LoadCase>;
-export type StatedCase = z.infer<typeof StatedCase>;
-export type Basis = z.infer<typeof Basis>;
-export type SeismicBasis = z.infer<typeof SeismicBasis>;
-export type Combination = z.infer<typeof Combination>;
 export type Building = z.infer<typeof Building>;

@@ -1,6 +1,9 @@
 /** The reader: from text or parsed JSON to a building, or every fault at once. */
 import { meetingFaults } from '../path/meeting-faults.js';
-import { Assemblies, Basis, Building, Combinations, Level, LoadCase, Units, WallLine } from './definition.js';
+import { Basis, NamedBasis } from './basis.js';
+import { Combinations } from './combination.js';
+import { Assemblies, Building, Level, Units, WallLine } from './definition.js';
+import { LoadCase } from './load-cases.js';
 import type { Fault, Result } from './fault.js';
 import { jsonBreak } from './json-place.js';
 import { levelFaults } from './plan-faults.js';
@@ -67,7 +70,7 @@ export function readBuilding(input: unknown): Result<Building> {
 }
 
 /** Faults that do not touch where walls and floors stand: whether they meet can be judged all the same. */
-const ASIDE = new Set(['unknown-assembly', 'no-basis', 'two-lateral-loads', 'reserved-id']);
+const ASIDE = new Set(['unknown-assembly', 'unknown-basis', 'no-basis', 'two-lateral-loads', 'reserved-id']);
 
 /** What can be read of a file, whatever the rest is like. */
 function partsOf(input: object): Parts {
@@ -81,6 +84,7 @@ function partsOf(input: object): Parts {
     loadCases: list(record['loadCases'], 64, (entry) => LoadCase.safeParse(entry).data),
     assemblies: Assemblies.safeParse(record['assemblies']).data,
     basis: Basis.safeParse(record['basis']).data,
+    bases: list(record['bases'], 20, (entry) => NamedBasis.safeParse(entry).data),
     combinations: Combinations.safeParse(record['combinations']).data,
     levelsComplete: levels.length > 0 && levels.every((level) => level !== undefined),
   };

@@ -1,5 +1,6 @@
 /** Faults between the parts of a file: identities, references, elevations. */
-import { GravityCase, type Building } from './definition.js';
+import { GravityCase, type Building, type Combination } from './definition.js';
+import { basisFaults } from './basis-faults.js';
 import type { Fault } from './fault.js';
 
 /** The parts of a file whose shape is right, each at its place. */
@@ -9,6 +10,7 @@ export type Parts = {
   readonly loadCases: readonly (Building['loadCases'][number] | undefined)[];
   readonly assemblies?: Building['assemblies'];
   readonly basis?: Building['basis'];
+  readonly bases?: readonly (NonNullable<Building['bases']>[number] | undefined)[] | undefined;
   readonly combinations?: Building['combinations'];
   /** Whether every level could be read: references to levels are judged only then. */
   readonly levelsComplete: boolean;
@@ -21,6 +23,7 @@ export function referenceFaults(parts: Parts): Fault[] {
     ...levelReferences(parts),
     ...assemblyReferences(parts),
     ...loadFaults(parts),
+    ...basisFaults(parts),
   ];
 }
 
@@ -65,11 +68,12 @@ function identityFaults(parts: Parts): Fault[] {
         duplicates(storey.piers, `wallLines[${l}].storeys[${s}].piers`, 'pier'),
       ),
     ),
+    ...duplicates(parts.bases ?? [], 'bases', 'basis'),
     ...duplicates(parts.loadCases, 'loadCases', 'load case'),
     ...duplicates(assemblies?.diaphragms ?? [], 'assemblies.diaphragms', 'assembly'),
     ...duplicates(assemblies?.walls ?? [], 'assemblies.walls', 'assembly'),
     ...duplicates(assemblies?.holdDowns ?? [], 'assemblies.holdDowns', 'assembly'),
-    ...(Array.isArray(parts.combinations) ? duplicates(parts.combinations, 'combinations', 'combination') : []),
+    ...lists(parts).flatMap(({ path, list }) => duplicates(list, path, 'combination')),
   ];
 }
 
@@ -222,18 +226,7 @@ function assemblyReferences(parts: Parts): Fault[] {
 const GRAVITY_CASES: ReadonlySet<string> = new Set(GravityCase.options);
 
 function loadFaults(parts: Parts): Fault[] {
-  const faults = parts.loadCases.flatMap((loadCase, c): Fault[] =>
-    loadCase?.from === 'basis' && parts.basis?.seismic === undefined
-      ? [
-          {
-            code: 'no-basis',
-            path: `loadCases[${c}].from`,
-            found: '"basis", but the file has no seismic basis of design',
-            expected: 'basis.seismic, or stated forces',
-          },
-        ]
-      : [],
-  );
+  const faults: Fault[] = [];
   parts.loadCases.forEach((loadCase, c) => {
     if (loadCase === undefined || !GRAVITY_CASES.has(loadCase.id)) return;
     faults.push({
@@ -243,16 +236,25 @@ function loadFaults(parts: Parts): Fault[] {
       expected: 'an id other than D, L, Lr and S',
     });
   });
-  if (Array.isArray(parts.combinations)) {
-    parts.combinations.forEach((combination, c) => {
+  for (const { path, list } of lists(parts)) {
+    list.forEach((combination, c) => {
       if (combination.factors.E === undefined || combination.factors.W === undefined) return;
       faults.push({
         code: 'two-lateral-loads',
-        path: `combinations[${c}].factors`,
+        path: `${path}[${c}].factors`,
         found: 'factors for both E and W',
         expected: 'at most one of E and W in a combination',
       });
     });
   }
   return faults;
+}
+
+/** The lists of combinations that are the file's own, each at its place. */
+function lists(parts: Parts): { readonly path: string; readonly list: readonly Combination[] }[] {
+  return [
+    { path: 'combinations', of: parts.combinations },
+    { path: 'basis.combinations', of: parts.basis?.combinations },
+    ...(parts.bases ?? []).map((basis, b) => ({ path: `bases[${b}].combinations`, of: basis?.combinations })),
+  ].flatMap(({ path, of }) => (Array.isArray(of) ? [{ path, list: of }] : []));
 }

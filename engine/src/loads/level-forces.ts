@@ -1,10 +1,9 @@
-/** The forces of a load case by level: stated in the file, or computed from the basis of design. */
-import type { Building, LoadCase } from '../building/definition.js';
+/** The forces of a load case by level: stated in the file, or computed from its basis of design. */
+import type { Building, LoadCase, StatedCase } from '../building/definition.js';
 import type { Fault, Result } from '../building/fault.js';
-import { massOf } from '../geometry/area.js';
-import { frameAlong } from '../geometry/frame.js';
-import { profileOf } from '../geometry/profile.js';
-import { baseShear, diaphragmForces, verticalDistribution, type WeighedLevel } from './equivalent-lateral-force.js';
+import { equivalentLateralForces } from './asce7/level-forces.js';
+import { basisOf } from './basis-of.js';
+import { lateralForces } from './en1998/level-forces.js';
 
 export type LevelForce = {
   readonly level: string;
@@ -14,62 +13,35 @@ export type LevelForce = {
   readonly diaphragmForce: number;
 };
 
-/** Exact: 1 ft = 0.3048 m. */
-const METRES_PER_FOOT = 0.3048;
-
 /**
  * @returns the levels that are pushed, ascending [force]
  */
 export function levelForces(building: Building, loadCase: LoadCase): Result<readonly LevelForce[]> {
-  if (loadCase.from === 'stated') {
-    const elevation = new Map(building.levels.map((level) => [level.id, level.elevation]));
-    const stated = loadCase.forces.map(({ level, force, diaphragmForce }) => ({
-      level,
-      force,
-      diaphragmForce: diaphragmForce ?? force,
-    }));
-    stated.sort((a, b) => (elevation.get(a.level) ?? 0) - (elevation.get(b.level) ?? 0));
-    return { ok: true, value: stated };
+  if (loadCase.from === 'stated') return { ok: true, value: statedForces(building, loadCase) };
+  const basis = basisOf(building, loadCase);
+  switch (basis?.standard) {
+    case 'ASCE 7-16':
+    case 'ASCE 7-22':
+      if (basis.seismic !== undefined) return equivalentLateralForces(building, basis.seismic, loadCase.id);
+      break;
+    case 'EN 1998-1':
+      return lateralForces(building, basis.seismic, loadCase.id);
   }
-  const basis = building.basis?.seismic;
-  if (basis === undefined)
-    return refused('no-basis', 'basis', 'no seismic basis of design', `basis.seismic for load case ${loadCase.id}`);
-  const levels = weighedLevels(building);
-  const total = levels.reduce((sum, level) => sum + level.weight, 0);
-  if (!(total > 0)) {
-    return refused(
-      'no-weight',
-      'levels',
-      'no seismic weight on any level',
-      `weights from which load case ${loadCase.id} takes its forces`,
-    );
-  }
-  const height = levels[levels.length - 1]?.heightFt ?? 0;
-  const { coefficient, k } = baseShear(basis, height);
-  const forces = verticalDistribution(levels, coefficient * total, k); // ASCE 7-16 Eq. 12.8-1
-  const design = diaphragmForces(levels, forces, basis);
-  return {
-    ok: true,
-    value: levels.map(({ level }, i) => ({ level, force: forces[i] as number, diaphragmForce: design[i] as number })),
-  };
+  return refused(
+    'no-basis',
+    'basis',
+    'no seismic basis of design',
+    `a basis with its seismic block for load case ${loadCase.id}`,
+  );
+}
+
+function statedForces(building: Building, loadCase: StatedCase): LevelForce[] {
+  const elevation = new Map(building.levels.map((level) => [level.id, level.elevation]));
+  return loadCase.forces
+    .map(({ level, force, diaphragmForce }) => ({ level, force, diaphragmForce: diaphragmForce ?? force }))
+    .sort((a, b) => (elevation.get(a.level) ?? 0) - (elevation.get(b.level) ?? 0));
 }
 
 function refused(code: string, path: string, found: string, expected: string): { ok: false; faults: readonly Fault[] } {
   return { ok: false, faults: [{ code, path, found, expected }] };
-}
-
-/** Levels above the base with the weight of their diaphragms, ascending. */
-export function weighedLevels(building: Building): WeighedLevel[] {
-  const sorted = [...building.levels].sort((a, b) => a.elevation - b.elevation);
-  const base = sorted[0]?.elevation ?? 0;
-  const perFoot = building.units.length === 'ft' ? 1 : METRES_PER_FOOT;
-  const frame = frameAlong([0, 1]);
-  return sorted.slice(1).map((level) => ({
-    level: level.id,
-    weight: (level.diaphragms ?? []).reduce(
-      (sum, diaphragm) => sum + massOf(diaphragm, profileOf(diaphragm, frame)).weight,
-      0,
-    ),
-    heightFt: (level.elevation - base) / perFoot,
-  }));
 }

@@ -2,7 +2,7 @@
 import type { Building } from '../building/definition.js';
 import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
-import { combinationsOf, type FactoredCombination } from '../loads/combinations.js';
+import { combinationsFor, gravityCombinations } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { bodiesOf, type Bodies } from './bodies.js';
 import { subCases } from './cases.js';
@@ -46,7 +46,6 @@ export type Prepared = {
   readonly bodies: Bodies;
   readonly runs: readonly CaseRun[];
   readonly descent: PostDescent;
-  readonly combinations: readonly FactoredCombination[];
 };
 
 /** @throws Refusal where no stable path is found */
@@ -55,11 +54,11 @@ export function prepare(building: Building): Prepared {
   const model = buildModel(building);
   const bodies = bodiesOf(model);
   const runs = subCases(building, model).map((subCase) => runCase(model, bodies, subCase));
-  return { building, model, bodies, runs, descent: descendAll(model, runs), combinations: combinationsOf(building) };
+  return { building, model, bodies, runs, descent: descendAll(model, runs) };
 }
 
 function analysisOf(building: Building): Analysis {
-  const { model, bodies, runs, descent, combinations } = prepare(building);
+  const { model, bodies, runs, descent } = prepare(building);
   const cases = runs.map((run) => run.subCase);
   const table: Table = { rows: [], units: unitNames(building) };
   const diagrams: Diagram[] = [];
@@ -84,7 +83,7 @@ function analysisOf(building: Building): Analysis {
   const lateral = cases.map(({ id, loadCase }, c): LateralComponent => ({
     id,
     component: GRAVITY.length + c,
-    combinations: combinations.filter((combination) => combination.applies === loadCase.kind),
+    combinations: combinationsFor(building, loadCase),
   }));
   pierEndDemands(table, descent, lateral);
   supportDemands(
@@ -95,7 +94,7 @@ function analysisOf(building: Building): Analysis {
       return (run?.outcomes[1]?.below[foot.line.index]?.[0] ?? 0) * foot.pier.share;
     },
     lateral,
-    combinations.filter((combination) => combination.applies === 'gravity'),
+    gravityCombinations(building),
   );
   addVertical(graph, model, descent, lateral);
   findings.push(...semiRigidFindings(bodies, runs), ...postFindings(model, descent));

@@ -1,5 +1,5 @@
 /** The equivalent lateral force procedure of ASCE 7-16 and 7-22, 12.8, and diaphragm design forces, 12.10. */
-import type { SeismicBasis } from '../building/definition.js';
+import type { AsceSeismic } from '../../building/basis.js';
 
 /** A level with the weight that goes with it. */
 export type WeighedLevel = {
@@ -26,7 +26,7 @@ export type BaseShear = {
  * @param heightFt structural height h_n [ft]
  * Source: ASCE 7-16 12.8.1.1, 12.8.2, 12.8.3 (the same in 7-22); the equations from memory, not checked against the document.
  */
-export function baseShear(basis: SeismicBasis, heightFt: number): BaseShear {
+export function baseShear(basis: AsceSeismic, heightFt: number): BaseShear {
   const importance = basis.importance ?? 1;
   const ratio = basis.R / importance;
   const approximate = (basis.Ct ?? 0.02) * heightFt ** (basis.x ?? 0.75); // Eq. 12.8-7

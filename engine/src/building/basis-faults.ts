@@ -1,0 +1,44 @@
+/** Faults between load cases and bases of design: a basis that is not there, or that does not give the loads of the case. */
+import { basisOf } from '../loads/basis-of.js';
+import type { Fault } from './fault.js';
+import type { Parts } from './reference-faults.js';
+
+export function basisFaults(parts: Parts): Fault[] {
+  const bases = (parts.bases ?? []).flatMap((basis) => (basis === undefined ? [] : [basis]));
+  const complete = bases.length === (parts.bases?.length ?? 0);
+  const file = { basis: parts.basis, bases };
+  return parts.loadCases.flatMap((loadCase, c): Fault[] => {
+    if (loadCase === undefined) return [];
+    const basis = basisOf(file, loadCase);
+    if (loadCase.basis !== undefined && basis === undefined) {
+      if (!complete) return [];
+      return [
+        {
+          code: 'unknown-basis',
+          path: `loadCases[${c}].basis`,
+          found: `"${loadCase.basis}"`,
+          expected: 'the id of one of the file’s bases',
+        },
+      ];
+    }
+    if (loadCase.from !== 'basis' || basis?.seismic !== undefined) return [];
+    if (basis === undefined && bases.length > 1) {
+      return [
+        {
+          code: 'basis-not-named',
+          path: `loadCases[${c}].basis`,
+          found: 'nothing, though the file has several bases of design',
+          expected: 'the id of one of them',
+        },
+      ];
+    }
+    return [
+      {
+        code: 'no-basis',
+        path: `loadCases[${c}].from`,
+        found: '"basis", but the file has no seismic basis of design',
+        expected: 'a basis with its seismic block, or stated forces',
+      },
+    ];
+  });
+}

@@ -1,0 +1,76 @@
+/** Bases of design: one block of keys for each standard and hazard. Several may stand side by side in one building. */
+import { z } from 'zod';
+import { Combinations } from './combination.js';
+import { Id, Name, Positive, Weight } from './values.js';
+
+export const AsceSeismic = z.strictObject({
+  SDS: Positive,
+  SD1: Positive,
+  S1: Weight.optional().describe('Default 0: the limit for S1 ≥ 0.6 does not apply'),
+  TL: Positive.optional().describe('Long-period transition [s]; default 8'),
+  R: Positive,
+  overstrength: Positive.optional().describe('Ω₀; default 1'),
+  Cd: Positive.optional().describe('Default R'),
+  importance: Positive.optional().describe('Iₑ; default 1'),
+  redundancy: z.number().min(1).max(1.3).optional().describe('ρ; default 1'),
+  designCategory: z.enum(['A', 'B', 'C', 'D', 'E', 'F']).optional(),
+  period: Positive.optional().describe('T [s]; default the approximate period Cₜ hₙˣ'),
+  Ct: Positive.optional().describe('Cₜ for hₙ in feet; default 0.02'),
+  x: Positive.optional().describe('Default 0.75'),
+});
+
+/** EN 1998-1 4.3.3.2, the lateral force method of analysis. */
+export const EnSeismic = z.strictObject({
+  agR: Positive.describe('Reference peak ground acceleration on ground of type A, over the acceleration of gravity'),
+  groundType: z.enum(['A', 'B', 'C', 'D', 'E']),
+  spectrum: z.enum(['type 1', 'type 2']).optional().describe('Default type 1'),
+  q: z.number().min(1).max(20).describe('Behaviour factor'),
+  importance: Positive.optional().describe('γI; default 1'),
+  period: Positive.optional().describe('T₁ [s]; default Cₜ·H^0.75'),
+  Ct: Positive.optional().describe('Cₜ for H in metres; default 0.05'),
+  lambda: z
+    .number()
+    .positive()
+    .max(1)
+    .optional()
+    .describe('λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1'),
+  beta: Weight.optional().describe('Lower bound of the design spectrum over a_g; default 0.2'),
+  diaphragmOverstrength: z
+    .number()
+    .min(1)
+    .max(5)
+    .optional()
+    .describe('γd on the forces of diaphragms; default 1.3, the value for brittle failure'),
+});
+
+const head = {
+  combinations: Combinations.optional().describe(
+    'Combinations of the load cases that take this basis; default the file’s `combinations`',
+  ),
+};
+
+const asce = { seismic: AsceSeismic.optional() };
+const asce716 = { standard: z.literal('ASCE 7-16'), ...asce, ...head };
+const asce722 = { standard: z.literal('ASCE 7-22'), ...asce, ...head };
+const en1998 = { standard: z.literal('EN 1998-1'), seismic: EnSeismic, ...head };
+
+export const Basis = z.discriminatedUnion('standard', [
+  z.strictObject(asce716),
+  z.strictObject(asce722),
+  z.strictObject(en1998),
+]);
+
+const named = { id: Id, name: Name.optional() };
+
+export const NamedBasis = z.discriminatedUnion('standard', [
+  z.strictObject({ ...named, ...asce716 }),
+  z.strictObject({ ...named, ...asce722 }),
+  z.strictObject({ ...named, ...en1998 }),
+]);
+
+export type Basis = z.infer<typeof Basis>;
+export type NamedBasis = z.infer<typeof NamedBasis>;
+export type AsceBasis = Extract<Basis, { standard: 'ASCE 7-16' | 'ASCE 7-22' }>;
+export type EnBasis = Extract<Basis, { standard: 'EN 1998-1' }>;
+export type AsceSeismic = z.infer<typeof AsceSeismic>;
+export type EnSeismic = z.infer<typeof EnSeismic>;

@@ -1,0 +1,21 @@
+/** Which basis of design a load case stands on. */
+import type { AsceBasis, Basis } from '../building/basis.js';
+import type { Building, LoadCase } from '../building/definition.js';
+
+type Bases = { readonly basis?: Building['basis']; readonly bases?: Building['bases'] };
+
+/**
+ * The basis that the case names; the file's `basis` where it names none; the only one of `bases` where the file has no other.
+ *
+ * @returns undefined where the case names one that is not there, or names none of several
+ */
+export function basisOf(file: Bases, { basis }: Pick<LoadCase, 'basis'>): Basis | undefined {
+  if (basis !== undefined) return file.bases?.find(({ id }) => id === basis);
+  if (file.basis !== undefined) return file.basis;
+  return file.bases?.length === 1 ? file.bases[0] : undefined;
+}
+
+/** Whether a basis is one of ASCE 7. */
+export function isAsce(basis: Basis | undefined): basis is AsceBasis {
+  return basis?.standard === 'ASCE 7-16' || basis?.standard === 'ASCE 7-22';
+}

@@ -1,0 +1,55 @@
+import { describe, expect, test } from 'vitest';
+import { baseShear } from '@groundward/engine/loads/en1998/lateral-force';
+import { designSpectrum } from '@groundward/engine/loads/en1998/spectrum';
+import { analysed, value } from './cases.js';
+
+/** The acceleration of gravity with which the masses of the example are weighed [m/s²]. */
+const g = 9.81;
+
+test('four storeys: period, design acceleration, base shear and storey forces', () => {
+  // EN 1998-1:2004 Eqs. 3.14, 4.5, 4.6, 4.11: derived by hand from the equations, masses 300, 300, 300 and 250 t at 3, 6, 9, 12 m
+  const basis = { agR: 0.25, groundType: 'B', q: 3.9 } as const;
+  const found = baseShear(basis, 12, 4);
+  expect(found.period).toBeCloseTo(0.3224, 4);
+  expect(found.spectrum.ratio * g).toBeCloseTo(1.8865, 4);
+  expect(found.lambda).toBe(0.85);
+  const building = analysed('lateral-force-method');
+  expect(value(building, 'L1', 'storey-shear', 'EX')).toBeCloseTo(1844.1, 1);
+  [197.6, 395.2, 592.7, 658.6].forEach((force, i) =>
+    expect(Math.abs(value(building, `L${i + 1}`, 'force', 'EX') - force)).toBeLessThanOrEqual(0.05),
+  );
+  // 4.4.2.5(2): γd = 1.3 on the forces of diaphragms; from memory, not checked against the document
+  expect(value(building, 'L4', 'diaphragm-force', 'EX')).toBeCloseTo(1.3 * value(building, 'L4', 'force', 'EX'), 9);
+});
+
+describe('design spectrum', () => {
+  // EN 1998-1:2004 3.2.2.5(4) Eqs. 3.13 to 3.16 with Tables 3.2 and 3.3 (from memory, not checked against the document)
+  const c1 = { agR: 0.2, groundType: 'C', q: 4, importance: 1.2 } as const;
+  const ground = 1.2 * 0.2;
+  test.each([
+    [0, '3.13', (ground * 1.15 * 2) / 3],
+    [0.3, '3.14', (ground * 1.15 * 2.5) / 4],
+    [1.2, '3.15', (((ground * 1.15 * 2.5) / 4) * 0.6) / 1.2],
+    [4, 'lower bound', 0.2 * ground],
+  ])('type 1, ground type C, T = %d s: %s', (period, governs, ratio) => {
+    const found = designSpectrum(c1, period);
+    expect(found.governs).toBe(governs);
+    expect(found.ratio).toBeCloseTo(ratio, 12);
+  });
+  test('type 2 falls with 1/T² beyond T_D = 1.2 s', () => {
+    const d2 = { agR: 0.3, groundType: 'D', q: 1.5, spectrum: 'type 2', beta: 0 } as const;
+    expect(designSpectrum(d2, 1.5)).toEqual({
+      governs: '3.16',
+      ratio: expect.closeTo((((0.3 * 1.8 * 2.5) / 1.5) * 0.3 * 1.2) / 1.5 ** 2, 12) as number,
+    });
+  });
+});
+
+test('λ is 0.85 only in a building of more than two storeys with T₁ ≤ 2·T_C', () => {
+  // EN 1998-1:2004 4.3.3.2.2(1)
+  const basis = { agR: 0.25, groundType: 'B', q: 3.9 } as const;
+  expect(baseShear(basis, 6, 2).lambda).toBe(1);
+  expect(baseShear({ ...basis, period: 1.01 }, 12, 4).lambda).toBe(1);
+  expect(baseShear({ ...basis, period: 1 }, 12, 4).lambda).toBe(0.85);
+  expect(baseShear({ ...basis, lambda: 1 }, 12, 4).coefficient).toBeCloseTo((0.25 * 1.2 * 2.5) / 3.9, 12);
+});
