@@ -19,14 +19,8 @@ export type LevelForce = {
 export function levelForces(building: Building, loadCase: LoadCase): Result<readonly LevelForce[]> {
   if (loadCase.from === 'stated') return { ok: true, value: statedForces(building, loadCase) };
   const basis = basisOf(building, loadCase);
-  switch (basis?.standard) {
-    case 'ASCE 7-16':
-    case 'ASCE 7-22':
-      if (basis.seismic !== undefined) return equivalentLateralForces(building, basis.seismic, loadCase.id);
-      break;
-    case 'EN 1998-1':
-      return lateralForces(building, basis.seismic, loadCase.id);
-  }
+  if (basis?.standard === 'EN 1998-1') return lateralForces(building, basis.seismic, loadCase.id);
+  if (basis?.seismic !== undefined) return equivalentLateralForces(building, basis.seismic, loadCase.id);
   return refused(
     'no-basis',
     'basis',
