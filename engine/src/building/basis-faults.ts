@@ -1,5 +1,6 @@
 /** Faults between load cases and bases of design: a basis that is not there, or that does not give the loads of the case. */
-import { basisOf } from '../loads/basis-of.js';
+import { basisOf, hasBlock } from '../loads/basis-of.js';
+import type { LoadCase } from './definition.js';
 import type { Fault } from './fault.js';
 import type { Parts } from './reference-faults.js';
 
@@ -21,7 +22,8 @@ export function basisFaults(parts: Parts): Fault[] {
         },
       ];
     }
-    if (loadCase.from !== 'basis' || basis?.seismic !== undefined) return [];
+    if (loadCase.from !== 'basis') return [];
+    if (hasBlock(basis, loadCase.kind)) return loadCase.kind === 'wind' ? windFaults(loadCase, c) : [];
     if (basis === undefined && bases.length > 1) {
       return [
         {
@@ -36,9 +38,21 @@ export function basisFaults(parts: Parts): Fault[] {
       {
         code: 'no-basis',
         path: `loadCases[${c}].from`,
-        found: '"basis", but the file has no seismic basis of design',
-        expected: 'a basis with its seismic block, or stated forces',
+        found: `"basis", but ${basis === undefined ? 'the file has no basis of design' : `the basis of design has no ${loadCase.kind} block`}`,
+        expected: `a basis of design that states ${loadCase.kind}, or stated forces`,
       },
     ];
   });
+}
+
+/** What wind from a basis brings with itself. */
+function windFaults(loadCase: LoadCase, c: number): Fault[] {
+  return (['spread', 'accidental'] as const)
+    .filter((key) => loadCase[key] !== undefined)
+    .map((key) => ({
+      code: 'not-with-wind',
+      path: `loadCases[${c}].${key}`,
+      found: `"${key}" of a wind case from a basis`,
+      expected: 'nothing: the load lies along the façade, and the torsional cases come with the basis',
+    }));
 }

@@ -1,7 +1,7 @@
 /** Bases of design: one block of keys for each standard and hazard. Several may stand side by side in one building. */
 import { z } from 'zod';
 import { Combinations } from './combination.js';
-import { Id, Name, Positive, Weight } from './values.js';
+import { Id, LIMIT, Name, Positive, Weight } from './values.js';
 
 export const AsceSeismic = z.strictObject({
   SDS: Positive,
@@ -17,6 +17,38 @@ export const AsceSeismic = z.strictObject({
   period: Positive.optional().describe('T [s]; default the approximate period Cₜ hₙˣ'),
   Ct: Positive.optional().describe('Cₜ for hₙ in feet; default 0.02'),
   x: Positive.optional().describe('Default 0.75'),
+});
+
+/** ASCE 7 chapters 26 and 27, directional procedure: main wind force resisting system, enclosed or partially enclosed. */
+export const AsceWind = z.strictObject({
+  V: Positive.describe('Basic wind speed: mi/h in a file in feet, m/s in a file in metres'),
+  exposure: z.enum(['B', 'C', 'D']),
+  Kzt: Positive.optional().describe('Topography, the same at all heights; default 1'),
+  Kd: Positive.optional().describe('Directionality; default 0.85'),
+  Ke: Positive.optional().describe('Ground elevation; default 1'),
+  G: Positive.optional().describe('Gust effect; default 0.85, the value for rigid buildings'),
+  ground: z
+    .number()
+    .min(-LIMIT)
+    .max(LIMIT)
+    .optional()
+    .describe('Elevation of the ground from which heights count [length]; default the lowest level'),
+  roofHeight: Positive.optional().describe(
+    'Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level',
+  ),
+  heightRule: z
+    .enum(['floor', 'mean'])
+    .optional()
+    .describe(
+      'Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor',
+    ),
+  parapet: Positive.optional().describe('Height of the parapet on every roof [length]; default none'),
+  torsion: z
+    .boolean()
+    .optional()
+    .describe(
+      'Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true',
+    ),
 });
 
 /** EN 1998-1 4.3.3.2, the lateral force method of analysis. */
@@ -49,7 +81,7 @@ const head = {
   ),
 };
 
-const asce = { seismic: AsceSeismic.optional() };
+const asce = { seismic: AsceSeismic.optional(), wind: AsceWind.optional() };
 const asce716 = { standard: z.literal('ASCE 7-16'), ...asce, ...head };
 const asce722 = { standard: z.literal('ASCE 7-22'), ...asce, ...head };
 const en1998 = { standard: z.literal('EN 1998-1'), seismic: EnSeismic, ...head };
@@ -73,4 +105,5 @@ export type NamedBasis = z.infer<typeof NamedBasis>;
 export type AsceBasis = Extract<Basis, { standard: 'ASCE 7-16' | 'ASCE 7-22' }>;
 export type EnBasis = Extract<Basis, { standard: 'EN 1998-1' }>;
 export type AsceSeismic = z.infer<typeof AsceSeismic>;
+export type AsceWind = z.infer<typeof AsceWind>;
 export type EnSeismic = z.infer<typeof EnSeismic>;

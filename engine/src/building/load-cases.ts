@@ -50,7 +50,11 @@ export const StatedCase = z.strictObject({
 
 export const BasisCase = z.strictObject({
   ...caseHead,
-  kind: z.literal('seismic'),
+  kind: z
+    .enum(['seismic', 'wind'])
+    .describe(
+      'Wind from a basis lies along the façade and makes its torsional sub-cases itself: no spread, no accidental',
+    ),
   from: z.literal('basis'),
 });
 

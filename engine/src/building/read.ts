@@ -70,7 +70,15 @@ export function readBuilding(input: unknown): Result<Building> {
 }
 
 /** Faults that do not touch where walls and floors stand: whether they meet can be judged all the same. */
-const ASIDE = new Set(['unknown-assembly', 'unknown-basis', 'no-basis', 'two-lateral-loads', 'reserved-id']);
+const ASIDE = new Set([
+  'unknown-assembly',
+  'unknown-basis',
+  'no-basis',
+  'basis-not-named',
+  'not-with-wind',
+  'two-lateral-loads',
+  'reserved-id',
+]);
 
 /** What can be read of a file, whatever the rest is like. */
 function partsOf(input: object): Parts {

@@ -6,7 +6,7 @@ import type { LoadPiece, PointLoad, SpanLoad } from '../statics/span-load.js';
 import { resultant } from '../statics/span-load.js';
 import type { DiaphragmModel } from './diaphragm.js';
 
-export type Spread = 'weight' | 'area' | 'even';
+export type Spread = 'weight' | 'area' | 'even' | 'facade';
 
 /** A load that lies along the cut at `s`, such as a façade that runs with the load. */
 export type AlongLoad = { readonly s: number; readonly t0: number; readonly t1: number; readonly force: number };
@@ -23,22 +23,37 @@ export type Inertia = {
   readonly share: number;
   /** Place of the resultant along s [length] */
   readonly centre: number;
-  /** How the load lies on the floor: `weight` by area weights, zones and lines. */
+  /** How the load lies on the floor: `weight` by area weights, zones and lines; `facade` as the load along its edge. */
   readonly spread: Spread;
-  /** Load for a level force of 1 on a unit of weight, of area, or of width across the load. */
+  /** Load for a level force of 1 on a unit of weight, of area, of width across the load, or of the façade's load. */
   readonly perUnit: number;
+  /** Of a façade: its load along s before the factor `perUnit` and any eccentricity [force/length] */
+  readonly facade?: readonly LoadPiece[];
   /** Eccentricity across the load that `load` and `centre` hold [length] */
   readonly offset: number;
 };
 
 /**
- * @param spread `weight` falls back on area where nothing on the level is weighed
+ * @param spread `weight` falls back on area where nothing on the level is weighed, `facade` on even where none reaches the level
+ * @param facade load along s that a level's façade gives it, for `facade` [force/length]
  * @returns one inertia for each diaphragm of the level
  */
-export function spreadOver(diaphragms: readonly DiaphragmModel[], frame: number, spread: Spread): Inertia[] {
+export function spreadOver(
+  diaphragms: readonly DiaphragmModel[],
+  frame: number,
+  spread: Spread,
+  facade: readonly LoadPiece[] = [],
+): Inertia[] {
   const weighed = diaphragms.some((d) => d.mass.weight > 0);
-  const how = spread === 'weight' && !weighed ? 'area' : spread;
-  const shapes = diaphragms.map((d) => shapeOf(d, d.profiles[frame] as Profile, how));
+  const idle = spread === 'facade' && facade.length === 0;
+  const how = spread === 'weight' && !weighed ? 'area' : idle ? 'even' : spread;
+  const shapes =
+    how === 'facade'
+      ? facadeShapes(
+          diaphragms.map((d) => d.profiles[frame] as Profile),
+          facade,
+        )
+      : diaphragms.map((d) => shapeOf(d, d.profiles[frame] as Profile, how));
   const totals = shapes.map((shape) => resultant(shape.load));
   const whole = totals.reduce((sum, total) => sum + total.force, 0);
   return diaphragms.map((diaphragm, i) => {
@@ -58,13 +73,14 @@ export function spreadOver(diaphragms: readonly DiaphragmModel[], frame: number,
       spread: how,
       perUnit: factor,
       offset: 0,
+      ...(how === 'facade' ? { facade: shape.load.pieces } : {}),
     };
   });
 }
 
 type Shape = { load: SpanLoad; along: AlongLoad[] };
 
-function shapeOf(diaphragm: DiaphragmModel, profile: Profile, spread: Spread): Shape {
+function shapeOf(diaphragm: DiaphragmModel, profile: Profile, spread: Exclude<Spread, 'facade'>): Shape {
   if (spread === 'even') {
     return { load: { pieces: [{ from: profile.from, to: profile.to, w: [1] }], points: [] }, along: [] };
   }
@@ -84,6 +100,30 @@ function shapeOf(diaphragm: DiaphragmModel, profile: Profile, spread: Spread): S
   if (spread === 'weight') addLines(diaphragm, profile, pieces, along);
   const points: PointLoad[] = along.map(({ s, force }) => ({ s, force }));
   return { load: { pieces, points }, along };
+}
+
+/** Each part of the façade lies on the diaphragms behind it, in equal parts where there are several. */
+function facadeShapes(profiles: readonly Profile[], facade: readonly LoadPiece[]): Shape[] {
+  const reaches = ({ from, to, tolerance }: Profile, piece: LoadPiece): boolean =>
+    from <= piece.from + tolerance && to >= piece.to - tolerance;
+  const behind = facade.map((piece) => profiles.filter((profile) => reaches(profile, piece)).length);
+  return profiles.map((profile) => ({
+    load: {
+      pieces: facade.flatMap((piece, i) =>
+        reaches(profile, piece)
+          ? [
+              {
+                from: within(piece.from, profile),
+                to: within(piece.to, profile),
+                w: piece.w.map((w) => w / (behind[i] as number)),
+              },
+            ]
+          : [],
+      ),
+      points: [],
+    },
+    along: [],
+  }));
 }
 
 /** A line across the load spreads over its length in `s`; one along it is a point load at its `s`. */

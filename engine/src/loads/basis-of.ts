@@ -19,3 +19,9 @@ export function basisOf(file: Bases, { basis }: Pick<LoadCase, 'basis'>): Basis 
 export function isAsce(basis: Basis | undefined): basis is AsceBasis {
   return basis?.standard === 'ASCE 7-16' || basis?.standard === 'ASCE 7-22';
 }
+
+/** Whether a basis states what a load case from it needs. */
+export function hasBlock(basis: Basis | undefined, kind: 'seismic' | 'wind'): boolean {
+  if (kind === 'seismic') return basis?.seismic !== undefined;
+  return isAsce(basis) && basis.wind !== undefined;
+}

@@ -1,8 +1,11 @@
 /** The forces of a load case by level: stated in the file, or computed from its basis of design. */
 import type { Building, LoadCase, StatedCase } from '../building/definition.js';
 import type { Fault, Result } from '../building/fault.js';
+import { unitVector } from '../geometry/frame.js';
+import type { LoadPiece } from '../statics/span-load.js';
 import { equivalentLateralForces } from './asce7/level-forces.js';
-import { basisOf } from './basis-of.js';
+import { windOn } from './asce7/wind-forces.js';
+import { basisOf, isAsce } from './basis-of.js';
 import { lateralForces } from './en1998/level-forces.js';
 
 export type LevelForce = {
@@ -11,6 +14,8 @@ export type LevelForce = {
   readonly force: number;
   /** Diaphragm design force [force] */
   readonly diaphragmForce: number;
+  /** How the force lies along s of the case's frame where it does not follow the weight: wind on a façade [force/length] */
+  readonly line?: readonly LoadPiece[];
 };
 
 /**
@@ -19,13 +24,21 @@ export type LevelForce = {
 export function levelForces(building: Building, loadCase: LoadCase): Result<readonly LevelForce[]> {
   if (loadCase.from === 'stated') return { ok: true, value: statedForces(building, loadCase) };
   const basis = basisOf(building, loadCase);
-  if (basis?.standard === 'EN 1998-1') return lateralForces(building, basis.seismic, loadCase.id);
-  if (basis?.seismic !== undefined) return equivalentLateralForces(building, basis.seismic, loadCase.id);
+  if (loadCase.kind === 'wind') {
+    if (isAsce(basis) && basis.wind !== undefined) {
+      const { levels } = windOn(building, basis.standard, basis.wind, unitVector(loadCase.direction));
+      return {
+        ok: true,
+        value: levels.map(({ facade: { level }, force, line }) => ({ level, force, diaphragmForce: force, line })),
+      };
+    }
+  } else if (basis?.standard === 'EN 1998-1') return lateralForces(building, basis.seismic, loadCase.id);
+  else if (basis?.seismic !== undefined) return equivalentLateralForces(building, basis.seismic, loadCase.id);
   return refused(
     'no-basis',
     'basis',
-    'no seismic basis of design',
-    `a basis with its seismic block for load case ${loadCase.id}`,
+    `no basis of design that states ${loadCase.kind}`,
+    `one for load case ${loadCase.id}`,
   );
 }
 

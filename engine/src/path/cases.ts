@@ -4,6 +4,8 @@ import { Refusal } from '../building/refusal.js';
 import { dot, unitVector } from '../geometry/frame.js';
 import { levelForces } from '../loads/level-forces.js';
 import type { Spread } from '../diaphragms/inertia.js';
+import { basisOf, isAsce } from '../loads/basis-of.js';
+import type { LoadPiece } from '../statics/span-load.js';
 import type { Model } from './model.js';
 
 export type SubCase = {
@@ -22,6 +24,8 @@ export type SubCase = {
   /** Storey force and diaphragm design force by level index [force] */
   readonly storeyForce: readonly number[];
   readonly diaphragmForce: readonly number[];
+  /** Load along s by level index where it lies along a façade [force/length] */
+  readonly facade?: readonly (readonly LoadPiece[])[];
 };
 
 /** @throws Refusal where the basis does not give the forces of a case */
@@ -33,11 +37,13 @@ export function subCases(building: Building, model: Model): SubCase[] {
     if (!stated.ok) throw new Refusal(stated.faults);
     const storeyForce = model.levels.map(() => 0);
     const diaphragmForce = model.levels.map(() => 0);
+    const facade: (readonly LoadPiece[])[] = model.levels.map(() => []);
     for (const entry of stated.value) {
       const level = model.levels.find((candidate) => candidate.id === entry.level);
       if (level === undefined) continue;
       storeyForce[level.index] = entry.force;
       diaphragmForce[level.index] = entry.diaphragmForce;
+      if (entry.line !== undefined) facade[level.index] = entry.line;
     }
     const t = model.frames[frame]?.t ?? direction;
     const whole: SubCase = {
@@ -46,12 +52,14 @@ export function subCases(building: Building, model: Model): SubCase[] {
       direction,
       frame,
       sign: dot([t[0], t[1]], [direction[0], direction[1]]) >= 0 ? 1 : -1,
-      spread: loadCase.spread ?? 'weight',
+      spread: windFromBasis(loadCase) ? 'facade' : (loadCase.spread ?? 'weight'),
       eccentricity: 0,
       amplified: false,
       storeyForce,
       diaphragmForce,
+      ...(windFromBasis(loadCase) ? { facade } : {}),
     };
+    if (windFromBasis(loadCase)) return windCases(building, model, whole);
     const accidental = loadCase.accidental;
     if (accidental === undefined) return [whole];
     const amplified = accidental.amplified ?? false;
@@ -61,4 +69,24 @@ export function subCases(building: Building, model: Model): SubCase[] {
       { ...whole, id: `${loadCase.id}/-e`, eccentricity: -accidental.ratio, amplified },
     ];
   });
+}
+
+function windFromBasis({ kind, from }: LoadCase): boolean {
+  return kind === 'wind' && from === 'basis';
+}
+
+/** Cases 1 and 2 of ASCE 7-16 Fig. 27.3-8: the whole wind, and 75 % of it with an eccentricity of ±15 % of the width. */
+function windCases(building: Building, model: Model, whole: SubCase): SubCase[] {
+  const basis = basisOf(building, whole.loadCase);
+  const turns = model.levels.some(({ diaphragms }) => diaphragms.some(({ behaviour }) => behaviour !== 'flexible'));
+  if (!turns || !isAsce(basis) || basis.wind?.torsion === false) return [whole];
+  const part = (forces: readonly number[]): number[] => forces.map((force) => 0.75 * force);
+  const eccentric = (id: string, eccentricity: number): SubCase => ({
+    ...whole,
+    id: `${whole.id}/${id}`,
+    eccentricity,
+    storeyForce: part(whole.storeyForce),
+    diaphragmForce: part(whole.diaphragmForce),
+  });
+  return [whole, eccentric('+e', 0.15), eccentric('-e', -0.15)];
 }

@@ -2,6 +2,7 @@
 import type { Point } from '../../building/definition.js';
 import { cross, dot } from '../../geometry/frame.js';
 import type { Profile, Slab } from '../../geometry/profile.js';
+import type { LoadPiece } from '../../statics/span-load.js';
 import type { Vector3 } from '../../statics/small-matrix.js';
 import type { Inertia } from '../inertia.js';
 import { fromLocal, toLocal, turned } from './axes.js';
@@ -9,8 +10,8 @@ import type { MembraneModel } from './membrane-model.js';
 import { integrationPoints, locate, shapesAt } from './shapes.js';
 
 /**
- * The load for a level force of 1: area weights over the elements, façades and partitions along their trace, an even spread evenly over
- * the depth of each cut, an eccentricity as a linear variation across the load. What numerical integration leaves of the resultant and
+ * The load for a level force of 1: area weights over the elements, façades and partitions along their trace, an even spread and
+ * a façade's load evenly over the depth of each cut, an eccentricity as a linear variation across the load. What numerical integration leaves of the resultant and
  * of its place across the load is spread over the floor, so that both are the inertia's own.
  */
 export function inertiaLoad(model: MembraneModel, inertia: Inertia): { load: Float64Array; resultant: Vector3 } {
@@ -66,9 +67,21 @@ function densityOf(inertia: Inertia, profile: Profile): (s: number, t: number) =
     const slab = slabAt(profile, s);
     if (slab === undefined) return 0;
     const depth = slab.depth0 + ((slab.depth1 - slab.depth0) * (s - slab.from)) / (slab.to - slab.from);
-    const own = spread === 'weight' ? weightAt(slab, s, t) : spread === 'area' ? 1 : depth > 0 ? 1 / depth : 0;
+    const perDepth = depth > 0 ? 1 / depth : 0;
+    const own =
+      spread === 'weight'
+        ? weightAt(slab, s, t)
+        : spread === 'area'
+          ? 1
+          : perDepth * (inertia.facade === undefined ? 1 : loadAt(inertia.facade, s));
     return own * perUnit + (depth > 0 ? (slope * (s - middle)) / depth : 0);
   };
+}
+
+/** Load along s of a façade at a place; between its parts there is none. */
+function loadAt(facade: readonly LoadPiece[], s: number): number {
+  const piece = facade.find(({ from, to }) => s >= from && s <= to);
+  return piece === undefined ? 0 : (piece.w[0] ?? 0) + (piece.w[1] ?? 0) * (s - piece.from);
 }
 
 function slabAt({ slabs }: Profile, s: number): Slab | undefined {

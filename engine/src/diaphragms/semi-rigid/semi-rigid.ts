@@ -80,7 +80,8 @@ function ofInertia(body: SemiRigidBody, inertia: Inertia): { unit: UnitResponse;
   const profile = inertia.diaphragm.profiles[inertia.frame] as Profile;
   const width = profile.to - profile.from;
   const centre = inertia.centre - inertia.offset;
-  const key = `${inertia.frame} ${inertia.spread} ${inertia.perUnit}`;
+  const shape = inertia.facade === undefined ? '' : JSON.stringify(inertia.facade);
+  const key = `${inertia.frame} ${inertia.spread} ${inertia.perUnit} ${shape}`;
   const at = (offset: number): UnitResponse =>
     solvedOnce(body, `${key} ${offset === 0 ? 'centred' : 'shifted'}`, () =>
       inertiaLoad(body.model, { ...inertia, offset, centre: centre + offset }),
