@@ -34,7 +34,7 @@ function all(of: Building) {
   return [
     ...gravityCombinations(of),
     ...combinationsFor(of, loadCase),
-    ...combinationsFor(of, { ...loadCase, kind: 'wind' } as typeof loadCase),
+    ...combinationsFor(of, { ...loadCase, kind: 'wind' }),
   ];
 }
 
