@@ -72,7 +72,7 @@ test('three storeys: storey forces from pressures at the floors', () => {
 test('three storeys: the wind lies along the façade of each floor', () => {
   // Same case: a simple span of 80 ft between the outer walls under p·(half storeys); V = wL/2, M = wL²/8
   const building = analysed('wind-three-storeys');
-  const w = (0.02189 * 12);
+  const w = 0.02189 * 12;
   const { after } = beside(building, 'L3/d', 'WY', 0);
   expect(after?.V).toBeCloseTo((w * 80) / 2, 3);
   expect(value(building, 'L3/d/W-E', 'moment', 'WY')).toBeCloseTo((w * 80 * 80) / 8, 1);
