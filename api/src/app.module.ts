@@ -4,6 +4,7 @@ import { AnalysesModule } from './analyses/analyses.module.js';
 import { AuthModule } from './auth/auth.module.js';
 import { ComparisonsModule } from './comparisons/comparisons.module.js';
 import { DatabaseModule } from './database/database.module.js';
+import { EngineModule } from './engine/engine.module.js';
 import { FoundationModule } from './foundation/foundation.module.js';
 import { HealthModule } from './health/health.module.js';
 import { HistoryModule } from './history/history.module.js';
@@ -22,6 +23,7 @@ export class AppModule {
       imports: [
         DatabaseModule.at(options.databaseUrl),
         AuthModule.with(options),
+        EngineModule,
         AccessModule,
         HealthModule,
         ProjectsModule,

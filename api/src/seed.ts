@@ -1,9 +1,9 @@
 /** The demo: one project with its revisions, put in once. */
 import { readFile } from 'node:fs/promises';
-import { readBuildingText } from '@groundward/engine/building/read';
 import { AccessService } from './access/access.service.js';
 import { DatabaseService } from './database/database.service.js';
-import { check, RevisionsService } from './revisions/revisions.service.js';
+import { EngineService } from './engine/engine.service.js';
+import { RevisionsService, sound } from './revisions/revisions.service.js';
 
 type Chapter = { readonly file: string; readonly name: string; readonly purpose: string; readonly remarks: string };
 
@@ -20,17 +20,19 @@ const LOCK = 7_426_911;
  */
 export async function seed({ databaseUrl }: { readonly databaseUrl: string }): Promise<void> {
   const database = new DatabaseService(databaseUrl);
+  const engine = new EngineService();
   try {
     if (await isSettled(database)) return;
     const lock = await database.pool.connect();
     try {
       await lock.query('SELECT pg_advisory_lock($1)', [LOCK]);
-      if (!(await isSettled(database))) await putIn(database);
+      if (!(await isSettled(database))) await putIn(database, engine);
     } finally {
       // Ends the session, and with it the lock.
       lock.release(true);
     }
   } finally {
+    await engine.onModuleDestroy();
     await database.onModuleDestroy();
   }
 }
@@ -40,7 +42,7 @@ async function isSettled({ prisma }: DatabaseService): Promise<boolean> {
   return (await prisma.user.count()) > 0 || (await prisma.project.count({ where: { demo: false } })) > 0;
 }
 
-async function putIn(database: DatabaseService): Promise<void> {
+async function putIn(database: DatabaseService, engine: EngineService): Promise<void> {
   const { prisma } = database;
   const story = JSON.parse(await readFile(new URL('revisions.json', DEMO), 'utf8')) as Chapter[];
   const project =
@@ -51,12 +53,13 @@ async function putIn(database: DatabaseService): Promise<void> {
     orderBy: { number: 'asc' },
     select: { id: true, state: true },
   });
-  const revisions = new RevisionsService(database, new AccessService(database));
+  const revisions = new RevisionsService(database, new AccessService(database), engine);
   let basedOn: string | null = null;
   for (const [i, { file, name, purpose, remarks }] of story.entries()) {
     let revision: { readonly id: string; readonly state: 'draft' | 'issued' } | undefined = there[i];
     if (revision === undefined) {
-      const checked = check(readBuildingText(await readFile(new URL(file, DEMO), 'utf8')));
+      const text = await readFile(new URL(file, DEMO), 'utf8');
+      const checked = sound(await engine.run('check', { text }));
       revision = await revisions.insert(project.id, { name, createdBy: 'Demo', basedOn }, checked);
     }
     const last = i === story.length - 1;

@@ -1,7 +1,9 @@
+import { readFileSync } from 'node:fs';
 import { Ajv2020 } from 'ajv/dist/2020.js';
 import request from 'supertest';
 import type TestAgent from 'supertest/lib/agent.js';
 import { afterAll, beforeAll, expect, test } from 'vitest';
+import { CLIENT_TYPES, clientTypes } from '../../scripts/openapi/client-types.mjs';
 import { demoFile, owner, PASSWORD, startService, type RevisionBody, type Service } from './service.js';
 
 type Media = { schema: object };
@@ -36,6 +38,10 @@ function fits(path: string, method: string, status: number, type: string, body: 
   const validate = ajv.compile(media.schema);
   expect(validate(body), `${method} ${path}: ${JSON.stringify(validate.errors?.slice(0, 3))}`).toBe(true);
 }
+
+test('the dashboard’s client types are those of this document: `npm run -w web types` renews them', async () => {
+  expect(readFileSync(CLIENT_TYPES, 'utf8') === (await clientTypes(document))).toBe(true);
+});
 
 test('the document names every route, and every route that it names is there', () => {
   const printed = service.app.getHttpAdapter().getInstance().printRoutes({ commonPrefix: false });

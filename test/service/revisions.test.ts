@@ -3,7 +3,9 @@ import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import type TestAgent from 'supertest/lib/agent.js';
 import { canonicalBuilding } from '@groundward/engine/building/canonical';
 import type { Building } from '@groundward/engine/building/definition';
+import { compareWithCauses } from '@groundward/engine/compare/causes';
 import { compare } from '@groundward/engine/compare/compare';
+import type { Change } from '@groundward/engine/compare/result';
 import { foundation } from '@groundward/engine/foundation/foundation';
 import { foundationCsv } from '@groundward/engine/foundation/csv';
 import { analyse } from '@groundward/engine/path/analyse';
@@ -114,8 +116,36 @@ describe('reading', () => {
         .expect(200)
     ).body as typeof comparison;
     expect(found.changes).toEqual(JSON.parse(JSON.stringify(comparison.changes)));
-    // The order of keys is the database's; what the edits say is the same.
     expect(found.edits.map((edit) => edit.what).sort()).toEqual(comparison.edits.map((edit) => edit.what).sort());
+  });
+
+  test('causes on request: the same shares as the engine’s own, asked twice and worked out once', async () => {
+    const [before, after] = ['2-client-changes', '3-engineers-answer'].map(
+      (name) => JSON.parse(demoFile(name)) as Building,
+    ) as [Building, Building];
+    const expected = compareWithCauses(
+      { building: before, analysis: analysed(before) },
+      { building: after, analysis: analysed(after) },
+    );
+    const ask = () =>
+      ada
+        .get(`/api/projects/${project}/compare`)
+        .query({ before: revisions[1]?.id, after: revisions[2]?.id, causes: 'true' })
+        .expect(200);
+    const [first, second] = await Promise.all([ask(), ask()]);
+    const found = first.body as typeof expected;
+    expect(found.method).toEqual({ kind: 'exact' });
+    expect(found.edits.map((edit) => edit.what).sort()).toEqual(expected.edits.map((edit) => edit.what).sort());
+    const told = new Map(found.edits.map(({ id, what }) => [id, what]));
+    const what = new Map(expected.edits.map(({ id, what: said }) => [id, said]));
+    const shares = (change: Change, edits: ReadonlyMap<string, string>) =>
+      new Map(change.causes.map(({ edit, share }) => [edits.get(edit), share]));
+    expect(found.changes.length).toBe(expected.changes.length);
+    found.changes.forEach((change, i) => {
+      const own = shares(expected.changes[i] as Change, what);
+      for (const [edit, share] of shares(change, told)) expect(share).toBeCloseTo(own.get(edit) ?? 0, 9);
+    });
+    expect(second.text).toBe(first.text);
   });
 
   test('history of a demand across all revisions', async () => {

@@ -2566,7 +2566,7 @@ export interface operations {
                             /** @constant */
                             from: "basis";
                         })[];
-                        /** @description A published set by name, or a list; default none, which leaves the unfactored components */
+                        /** @description A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it. */
                         combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength") | {
                             id: string;
                             /** @description Factors taken as stated: E and W multiply the load case’s own effect */
@@ -2913,7 +2913,7 @@ export interface operations {
                         /** @constant */
                         from: "basis";
                     })[];
-                    /** @description A published set by name, or a list; default none, which leaves the unfactored components */
+                    /** @description A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it. */
                     combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength") | {
                         id: string;
                         /** @description Factors taken as stated: E and W multiply the load case’s own effect */
@@ -4107,6 +4107,8 @@ export interface operations {
             query: {
                 before: string;
                 after: string;
+                /** @description Whether to share each change among the edits; default false */
+                causes?: "true" | "false";
             };
             header?: never;
             path: {
@@ -4132,6 +4134,16 @@ export interface operations {
                                 [key: string]: unknown;
                             }[];
                         }[];
+                        /** @description How the causes were found */
+                        method?: {
+                            /** @constant */
+                            kind: "exact";
+                        } | {
+                            /** @constant */
+                            kind: "sampled";
+                            pairs: number;
+                            seed: number;
+                        };
                         changes: {
                             member: string;
                             /** @enum {string} */
@@ -4148,7 +4160,10 @@ export interface operations {
                             class: "added" | "removed" | "moved" | "raised" | "lowered" | "unchanged";
                             causes: {
                                 edit: string;
+                                /** @description In the demand’s own unit; shares add up to after − before */
                                 share: number;
+                                /** @description Standard error of a share that was sampled */
+                                error?: number;
                             }[];
                         }[];
                     };
@@ -4208,6 +4223,32 @@ export interface operations {
             };
             /** @description Problem */
             404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };

@@ -1,12 +1,12 @@
 import { Inject, Injectable } from '@nestjs/common';
 import type { Building } from '@groundward/engine/building/definition';
 import type { Result } from '@groundward/engine/building/fault';
-import { readBuilding, readBuildingText } from '@groundward/engine/building/read';
-import { analyse } from '@groundward/engine/path/analyse';
 import type { Analysis } from '@groundward/engine/path/result';
 import { AccessService } from '../access/access.service.js';
 import { storeAnalysis } from '../analyses/store-analysis.js';
 import { DatabaseService, type Transaction } from '../database/database.service.js';
+import { EngineService } from '../engine/engine.service.js';
+import type { Checked } from '../engine/tasks.js';
 import { faulty, notFound, Problem } from '../faults/problem.js';
 import { hashOf } from './hash.js';
 import { REVISION_COLUMNS, revisionView, type RevisionRow } from './revision-view.js';
@@ -14,13 +14,12 @@ import type { LatestRevision, RevisionView, Summary } from './schemas.js';
 
 export type Author = { readonly id: string; readonly name: string };
 
-type Checked = { readonly building: Building; readonly analysis: Analysis };
-
 @Injectable()
 export class RevisionsService {
   constructor(
     @Inject(DatabaseService) private readonly database: DatabaseService,
     @Inject(AccessService) private readonly access: AccessService,
+    @Inject(EngineService) private readonly engine: EngineService,
   ) {}
 
   async list(userId: string, projectId: string): Promise<RevisionView[]> {
@@ -75,9 +74,8 @@ export class RevisionsService {
   ): Promise<RevisionView> {
     await this.access.require(author.id, projectId, 'write');
     if (from !== undefined) await this.find(projectId, from);
-    const checked = check(
-      from === undefined ? readBuilding(building) : { ok: true, value: await this.savedBuilding(from) },
-    );
+    const document = from === undefined ? building : await this.savedBuilding(from);
+    const checked = sound(await this.engine.run('check', { document }));
     return this.insert(projectId, { name, createdBy: author.name, basedOn: from ?? null }, checked);
   }
 
@@ -120,7 +118,7 @@ export class RevisionsService {
     const before = await this.find(projectId, revisionId);
     if (before.state === 'issued') throw issued();
     if (before.version !== version) throw await this.stale(projectId, revisionId);
-    const { building, analysis } = check(readBuildingText(text));
+    const { building, analysis } = sound(await this.engine.run('check', { text }));
     const saved = await this.inTransaction(async (transaction) => {
       const { count } = await transaction.revision.updateMany({
         where: { id: revisionId, version, state: 'draft' },
@@ -239,11 +237,9 @@ export class RevisionsService {
 }
 
 /** A building and its analysis, or the problem with every fault. */
-export function check(read: Result<Building>): Checked {
-  if (!read.ok) throw faulty(read.faults);
-  const analysis = analyse(read.value);
-  if (!analysis.ok) throw faulty(analysis.faults);
-  return { building: read.value, analysis: analysis.value };
+export function sound(checked: Result<Checked>): Checked {
+  if (!checked.ok) throw faulty(checked.faults);
+  return checked.value;
 }
 
 function summaryOf(building: Building, analysis: Analysis): Summary {

@@ -31,7 +31,8 @@ type Found = { readonly edits: MemberEdit[]; readonly units: Units | undefined }
 function walk(before: Json, after: Json, path: readonly Step[], names: readonly string[], found: Found): void {
   if (same(before, after)) return;
   if (isRecord(before) && isRecord(after)) {
-    for (const key of Object.keys(before)) {
+    // In one order whatever order a file's keys come in, so that the same difference is told in the same words.
+    for (const key of Object.keys(before).sort()) {
       if (key in after) continue;
       found.edits.push({
         path: [...path, key],
@@ -43,7 +44,8 @@ function walk(before: Json, after: Json, path: readonly Step[], names: readonly 
         said: ' removed',
       });
     }
-    for (const [key, value] of Object.entries(after)) {
+    for (const key of Object.keys(after).sort()) {
+      const value = after[key];
       if (key in before) walk(before[key], value, [...path, key], [...names, key], found);
       else {
         found.edits.push({

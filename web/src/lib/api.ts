@@ -106,6 +106,11 @@ export const api = {
   foundation: (projectId: string, id: string) => call(`${revision(projectId, id)}/foundation`) as Promise<Foundation>,
   compare: (projectId: string, before: string, after: string) =>
     call(`${project(projectId)}/compare?${new URLSearchParams({ before, after })}`) as Promise<Comparison>,
+  /** The comparison with the share of every edit in every change: many analyses, so it may take a while. */
+  causes: (projectId: string, before: string, after: string) =>
+    call(
+      `${project(projectId)}/compare?${new URLSearchParams({ before, after, causes: 'true' })}`,
+    ) as Promise<Comparison>,
   history: (
     projectId: string,
     query: { member: string; quantity: string; case: string; sense: string; combination?: string },

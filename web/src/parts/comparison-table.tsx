@@ -1,9 +1,10 @@
 'use client';
-import type { Change, ChangeClass, Comparison } from '@groundward/engine/compare/result';
+import type { Change, ChangeClass, Comparison, Edit } from '@groundward/engine/compare/result';
 import { useMemo, useState } from 'react';
 import { CLASSES, crosses, difference, SIGNS, sorted, type Order } from '@/lib/changes';
 import { count as tally, percent, quantity, senseSign, withSign, words } from '@/lib/format';
 import { useQueryPatch, useQueryState } from '@/lib/query-state';
+import { Causes } from './causes';
 import { Select } from './select';
 import { Table } from './table';
 
@@ -37,13 +38,14 @@ export function ComparisonTable({
   const [which, setWhich] = useQueryState('class', CHANGED);
   const [caseId, setCase] = useQueryState('case', ALL);
   const [wanted, setWanted] = useQueryState('member', '');
+  const [edit] = useQueryState('edit', '');
   const [order] = useQueryState('sort', 'size') as [Order, unknown];
   const [direction] = useQueryState('direction', 'falling');
   const [most, setMost] = useState(PAGE);
   const changes = comparison.changes;
   const rows = useMemo(
-    () => sorted(changes.filter(wants({ kind, what, which, caseId, wanted })), order, direction === 'falling'),
-    [changes, kind, what, which, caseId, wanted, order, direction],
+    () => sorted(changes.filter(wants({ kind, what, which, caseId, wanted, edit })), order, direction === 'falling'),
+    [changes, kind, what, which, caseId, wanted, edit, order, direction],
   );
   const quantities = changes.filter((change) => kind === ALL || change.kind === kind).map((change) => change.quantity);
   return (
@@ -101,11 +103,17 @@ export function ComparisonTable({
                 </button>
               </th>
             ))}
+            {comparison.method !== undefined && <th>Of which by</th>}
           </tr>
         </thead>
         <tbody>
           {rows.slice(0, most).map((change) => (
-            <ChangeRow key={keyOf(change)} change={change} onPick={onPick} />
+            <ChangeRow
+              key={keyOf(change)}
+              change={change}
+              edits={comparison.method === undefined ? undefined : comparison.edits}
+              onPick={onPick}
+            />
           ))}
         </tbody>
       </Table>
@@ -118,7 +126,15 @@ export function ComparisonTable({
   );
 }
 
-function ChangeRow({ change, onPick }: { readonly change: Change; readonly onPick: (member: string) => void }) {
+function ChangeRow({
+  change,
+  edits,
+  onPick,
+}: {
+  readonly change: Change;
+  readonly edits: readonly Edit[] | undefined;
+  readonly onPick: (member: string) => void;
+}) {
   return (
     <tr>
       <td>
@@ -137,6 +153,11 @@ function ChangeRow({ change, onPick }: { readonly change: Change; readonly onPic
       <td className="n">{change.after === null ? '–' : quantity(change.after, change.unit)}</td>
       <td className="n">{withSign(quantity(difference(change), change.unit), difference(change))}</td>
       <td className="n">{relative(change)}</td>
+      {edits !== undefined && (
+        <td>
+          <Causes change={change} edits={edits} />
+        </td>
+      )}
     </tr>
   );
 }
@@ -164,14 +185,16 @@ type Wants = {
   readonly which: string;
   readonly caseId: string;
   readonly wanted: string;
+  readonly edit: string;
 };
 
-function wants({ kind, what, which, caseId, wanted }: Wants): (change: Change) => boolean {
+function wants({ kind, what, which, caseId, wanted, edit }: Wants): (change: Change) => boolean {
   return (change) =>
     (kind === ALL || change.kind === kind) &&
     (what === ALL || change.quantity === what) &&
     (caseId === ALL || change.case === caseId) &&
     change.member.startsWith(wanted) &&
+    (edit === '' || change.causes.some((cause) => cause.edit === edit)) &&
     (which === ALL ||
       (which === CHANGED
         ? change.class !== 'unchanged'

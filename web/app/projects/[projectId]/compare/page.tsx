@@ -10,6 +10,7 @@ import { CLASSES } from '@/lib/changes';
 import { useQueryPatch, useQueryState } from '@/lib/query-state';
 import { ComparisonDrawings } from '@/parts/comparison-drawings';
 import { ClassTag, ComparisonTable } from '@/parts/comparison-table';
+import { EditList } from '@/parts/edit-list';
 import { Pending } from '@/parts/problem';
 import { Select } from '@/parts/select';
 
@@ -33,6 +34,13 @@ function ComparePage() {
     queryFn: () => api.compare(projectId, before, after),
     enabled: ready,
   });
+  const causes = useQuery({
+    queryKey: ['causes', before, after, versionOf(list, before), versionOf(list, after)],
+    queryFn: () => api.causes(projectId, before, after),
+    enabled: comparison.data !== undefined,
+    staleTime: Infinity,
+    retry: false,
+  });
   const first = useBuilding(projectId, before, list);
   const second = useBuilding(projectId, after, list);
   const options = list.map((revision) => ({ value: revision.id, name: `${revision.number} ${revision.name}` }));
@@ -50,7 +58,12 @@ function ComparePage() {
       ) : comparison.data === undefined || first.data === undefined || second.data === undefined ? (
         <Pending error={revisions.error ?? comparison.error ?? first.error ?? second.error} what="both revisions" />
       ) : (
-        <ComparisonView comparison={comparison.data} before={first.data} after={second.data} />
+        <ComparisonView
+          comparison={causes.data ?? comparison.data}
+          causes={causes.error === null ? (causes.data === undefined ? 'asked' : 'known') : 'failed'}
+          before={first.data}
+          after={second.data}
+        />
       )}
     </main>
   );
@@ -78,10 +91,12 @@ function versionOf(list: readonly Revision[], id: string): number | undefined {
 
 function ComparisonView({
   comparison,
+  causes,
   before,
   after,
 }: {
   readonly comparison: Comparison;
+  readonly causes: 'asked' | 'known' | 'failed';
   readonly before: Building;
   readonly after: Building;
 }) {
@@ -102,11 +117,7 @@ function ComparisonView({
     <div className="stack">
       <section className="panel">
         <h2>{`${comparison.edits.length} edit${comparison.edits.length === 1 ? ' lies' : 's lie'} between`}</h2>
-        <ul className="plain edits">
-          {comparison.edits.map((edit) => (
-            <li key={edit.id}>{edit.what}</li>
-          ))}
-        </ul>
+        <EditList comparison={comparison} causes={causes} />
         <p className="tags" aria-label="Demands by class">
           {CLASSES.map((name) => (
             <ClassTag key={name} name={name} count={counts.get(name) ?? 0} />
