@@ -10,9 +10,13 @@ import { foundation } from '../src/foundation/foundation.js';
 import { analyse } from '../src/path/analyse.js';
 import { analysisSchema } from '../src/path/json-schema.js';
 import type { Analysis } from '../src/path/result.js';
+import { workingContext } from '../src/working/context.js';
+import { demandFor, explain } from '../src/working/explain.js';
+import { workingSchema } from '../src/working/json-schema.js';
 import { analysisText } from './analysis-text.js';
 import { comparisonText } from './comparison-text.js';
 import { foundationText } from './foundation-text.js';
+import { workingText } from './working-text.js';
 
 export type Io = {
   readonly readFile: (path: string) => Promise<string>;
@@ -27,8 +31,11 @@ export type ExitCode = 0 | 1 | 2 | 3;
 const USAGE = `groundward analyse FILE [--json]              demands, findings and certificate of a building file
 groundward foundation FILE [--json | --csv]   what arrives at every support
 groundward compare BEFORE AFTER [--json] [--no-causes]   what changed, by member, and why
+groundward explain FILE MEMBER QUANTITY [--case C] [--sense 1 | -1] [--combination K] [--json]
+                                              the working behind one demand; the largest where several are meant
 groundward check FILE                         validates only
-groundward schema building | analysis         the JSON Schema
+groundward schema building | analysis | working
+                                              the JSON Schema
 
 FILE is a path, or - for standard input.
 Exit code: 0 done, 1 the file is at fault, 2 wrong use, 3 the analysis was refused.
@@ -91,6 +98,10 @@ async function run(argv: readonly string[], io: Io): Promise<void> {
       io.out(options.has('--json') ? json(comparison) : comparisonText(comparison));
       return;
     }
+    case 'explain': {
+      io.out(await explained(rest, io));
+      return;
+    }
     case 'check': {
       const { files, options } = words(rest, 1, ['--json']);
       const building = await read(files[0] as string, io);
@@ -107,11 +118,54 @@ async function run(argv: readonly string[], io: Io): Promise<void> {
         io.out(json(analysisSchema()));
         return;
       }
+      if (files[0] === 'working') {
+        io.out(json(workingSchema()));
+        return;
+      }
       throw wrong(`no schema "${files[0] as string}"`);
     }
     default:
       throw wrong(`no verb "${verb}"`);
   }
+}
+
+async function explained(rest: readonly string[], io: Io): Promise<string> {
+  const { rest: others, named } = namedWords(rest, ['--case', '--sense', '--combination']);
+  const { files, options } = words(others, 3, ['--json']);
+  const [file, member, quantity] = files as [string, string, string];
+  const sense = named.get('--sense') ?? '1';
+  if (sense !== '1' && sense !== '-1') throw wrong(`--sense is 1 or -1, not "${sense}"`);
+  const context = workingContext(await read(file, io));
+  if (!context.ok) throw refused(file, context.faults);
+  const demand = demandFor(context.value, {
+    member,
+    quantity,
+    case: named.get('--case'),
+    sense: Number(sense),
+    combination: named.get('--combination'),
+  });
+  if (!demand.ok) throw new Stop(2, `groundward: ${demand.faults.map(faultSentence).join('\n')}\n`);
+  const working = explain(context.value, demand.value);
+  return options.has('--json') ? json(working) : workingText(working);
+}
+
+/** Options with a value behind them, taken out of the words. */
+function namedWords(
+  rest: readonly string[],
+  names: readonly string[],
+): { rest: string[]; named: ReadonlyMap<string, string> } {
+  const left: string[] = [];
+  const named = new Map<string, string>();
+  for (let i = 0; i < rest.length; i++) {
+    const word = rest[i] as string;
+    if (!names.includes(word)) left.push(word);
+    else {
+      const value = rest[++i];
+      if (value === undefined) throw wrong(`${word} wants a word behind it`);
+      named.set(word, value);
+    }
+  }
+  return { rest: left, named };
 }
 
 function wrong(why: string): Stop {
@@ -150,8 +204,12 @@ async function read(file: string, io: Io): Promise<Building> {
 async function analysed(file: string, io: Io): Promise<{ building: Building; analysis: Analysis }> {
   const building = await read(file, io);
   const result = analyse(building);
-  if (!result.ok) throw new Stop(3, `the analysis is refused\n${faultList(file, result.faults)}`);
+  if (!result.ok) throw refused(file, result.faults);
   return { building, analysis: result.value };
+}
+
+function refused(file: string, faults: readonly Fault[]): Stop {
+  return new Stop(3, `the analysis is refused\n${faultList(file, faults)}`);
 }
 
 function faultList(file: string, faults: readonly Fault[]): string {

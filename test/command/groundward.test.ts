@@ -93,6 +93,53 @@ test('compare names edits and changed members', async () => {
   expect((await run(['compare', FIRST, SECOND])).out).toContain('pier Ac');
 });
 
+describe('explain', () => {
+  const words = ['explain', FIRST, '1/L3', 'shear', '--case', 'EY', '--sense', '-1'];
+
+  test('--json answers the working, valid against the schema that the command prints', async () => {
+    const { code, out, err } = await run([...words, '--json']);
+    expect([code, err]).toEqual([0, '']);
+    const schema = JSON.parse((await run(['schema', 'working'])).out) as object;
+    const validate = new Ajv2020({ strict: false }).compile(schema);
+    const working = JSON.parse(out) as { demand: { value: number }; steps: { result: number; formula: string }[] };
+    expect(validate(working), JSON.stringify(validate.errors)).toBe(true);
+    expect(working.steps.at(-1)?.result).toBeCloseTo(working.demand.value, 9);
+  });
+
+  test('the readable text has formula, values with their origin, and the law', async () => {
+    const { out } = await run(words);
+    expect(out).toContain('V = V_above + R = ');
+    expect(out).toContain('1/L4 shear EY -1');
+    expect(out).toContain('[equilibrium of the wall line]');
+  });
+
+  test('what is left out: sense 1, no combination, the case with the largest value', async () => {
+    const named = await run(['explain', FIRST, '1/L3/1a', 'end-tension', '--json']);
+    const analysis = JSON.parse((await run(['analyse', FIRST, '--json'])).out) as {
+      demands: { member: string; quantity: string; sense: number; combination?: string; value: number }[];
+    };
+    const rows = analysis.demands.filter(
+      (row) =>
+        row.member === '1/L3/1a' && row.quantity === 'end-tension' && row.sense === 1 && row.combination === undefined,
+    );
+    const { demand } = JSON.parse(named.out) as { demand: { value: number } };
+    expect(demand.value).toBe(Math.max(...rows.map((row) => row.value)));
+  });
+
+  test.each([
+    [['1/L3/1z', 'shear'], 'no demand of member 1/L3/1z'],
+    [['1/L3', 'uplift'], 'it has reaction, shear, overturning-moment'],
+    [['1/L3', 'shear', '--case', 'EZ'], 'under EZ with sense 1'],
+    [['1/L3', 'shear', '--combination', 'D'], 'with combination D'],
+    [['1/L3', 'shear', '--sense', '2'], '--sense is 1 or -1'],
+    [['1/L3', 'shear', '--case'], '--case wants a word'],
+  ])('2 for what is not in the table: %j', async (asked, why) => {
+    const { code, out, err } = await run(['explain', FIRST, ...asked]);
+    expect([code, out]).toEqual([2, '']);
+    expect(err).toContain(why);
+  });
+});
+
 describe('exit codes', () => {
   test('0 where a file is sound', async () => {
     expect(await run(['check', FIRST])).toMatchObject({ code: 0, err: '' });

@@ -32,7 +32,7 @@ import { lineDemands, pierEndDemands, supportDemands, type LateralComponent } fr
  */
 export function analyse(building: Building): Result<Analysis> {
   try {
-    return { ok: true, value: analysisOf(building) };
+    return { ok: true, value: analysisOf(prepare(building)) };
   } catch (error) {
     if (error instanceof Refusal) return { ok: false, faults: error.faults };
     throw error;
@@ -57,8 +57,8 @@ export function prepare(building: Building): Prepared {
   return { building, model, bodies, runs, descent: descendAll(model, runs) };
 }
 
-function analysisOf(building: Building): Analysis {
-  const { model, bodies, runs, descent } = prepare(building);
+/** @throws Refusal where the certificate is above its bound */
+export function analysisOf({ building, model, bodies, runs, descent }: Prepared): Analysis {
   const cases = runs.map((run) => run.subCase);
   const table: Table = { rows: [], units: unitNames(building) };
   const diagrams: Diagram[] = [];

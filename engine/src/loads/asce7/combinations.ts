@@ -3,7 +3,7 @@ import type { AsceSeismic } from '../../building/basis.js';
 import type { FactoredCombination } from '../combinations.js';
 
 type Term = { readonly D?: number; readonly L?: number; readonly Lr?: number; readonly S?: number };
-type Published = {
+export type Published = {
   readonly id: string;
   readonly applies: FactoredCombination['applies'];
   readonly gravity: Term;
@@ -31,6 +31,11 @@ export function asceCombinations(set: AsceSet, seismic: AsceSeismic | undefined)
     },
     lateral: applies === 'seismic' ? lateral * (seismic?.redundancy ?? 1) : lateral, // ASCE 7-16 Eq. 12.4-3
   }));
+}
+
+/** The terms of a published combination before a basis of design enters. */
+export function publishedTerms(set: AsceSet, id: string): Published | undefined {
+  return SETS[set].find((candidate) => candidate.id === id);
 }
 
 /** A factor as it stands in an id: 1 is not written. */

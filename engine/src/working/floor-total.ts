@@ -1,0 +1,87 @@
+/** The whole on which a level's force lies: the weight, area or width of all its diaphragms. */
+import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
+import type { Spread } from '../diaphragms/inertia.js';
+import type { Profile } from '../geometry/profile.js';
+import { fromFile, readOff, type Context } from './context.js';
+import { areaWeight } from './floor-parts.js';
+import type { Steps, Value } from './steps.js';
+
+/**
+ * @param spread how the level's force lies
+ * @param frame  index of the frame along the load
+ */
+export function totalStep(
+  context: Context,
+  diaphragms: readonly DiaphragmModel[],
+  spread: Spread,
+  frame: number,
+  steps: Steps,
+  symbol = 'N',
+): Value {
+  const { length, force } = context.units;
+  const terms: string[] = [];
+  const values: Value[] = [];
+  for (const diaphragm of diaphragms) {
+    const profile = diaphragm.profiles[frame] as Profile;
+    const outline = `${diaphragm.path}.outline`;
+    if (spread === 'even') {
+      const width = readOff(
+        context,
+        `B_${values.length + 1}`,
+        outline,
+        profile.to - profile.from,
+        length,
+        'width across the load',
+      );
+      terms.push(width.symbol);
+      values.push(width);
+      continue;
+    }
+    for (const [q, area] of areas(profile, spread)) {
+      const i = values.length + 1;
+      const a = readOff(context, `A_${i}`, outline, area, `${length}²`, 'floor area, less openings');
+      if (spread === 'area') {
+        terms.push(a.symbol);
+        values.push(a);
+        continue;
+      }
+      const weight = areaWeight(context, diaphragm, q, `q_${i}`);
+      terms.push(`${weight.symbol}·${a.symbol}`);
+      values.push(weight, a);
+    }
+    if (spread === 'area') continue;
+    (diaphragm.diaphragm.weight?.lines ?? []).forEach((line, l) => {
+      if (line.perLength === 0) return;
+      const path = `${diaphragm.path}.weight.lines[${l}]`;
+      const i = values.length + 1;
+      let own = 0;
+      line.along.forEach((b, j) => {
+        const a = line.along[j - 1];
+        if (a !== undefined) own += Math.hypot(b[0] - a[0], b[1] - a[1]);
+      });
+      const p = fromFile(context, `p_${i}`, `${path}.perLength`, context.units.perLength);
+      const l_ = readOff(context, `l_${i}`, `${path}.along`, own, length, `length of ${line.id}`);
+      terms.push(`${p.symbol}·${l_.symbol}`);
+      values.push(p, l_);
+    });
+  }
+  const unit = spread === 'weight' ? force : spread === 'area' ? `${length}²` : length;
+  const what = { weight: 'seismic weight', area: 'floor area', even: 'width across the load' }[spread];
+  return steps.add(steps.fresh(symbol), terms.length === 0 ? '0' : terms.join(' + '), values, unit, {
+    what: `${what} of the level`,
+  });
+}
+
+/** Net area by area weight; all in one for `area`. */
+function areas(profile: Profile, spread: Spread): Map<number, number> {
+  const sums = new Map<number, number>();
+  for (const slab of profile.slabs) {
+    for (const strip of slab.strips) {
+      if (spread === 'weight' && strip.area === 0) continue;
+      const key = spread === 'weight' ? strip.area : 0;
+      const area = ((strip.upper0 - strip.lower0 + strip.upper1 - strip.lower1) / 2) * (slab.to - slab.from);
+      sums.set(key, (sums.get(key) ?? 0) + area);
+    }
+  }
+  return sums;
+}

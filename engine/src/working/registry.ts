@@ -1,0 +1,32 @@
+/** The workings by kind of member and quantity: each fills the steps of one demand. */
+import type { Demand, DemandKind, Quantity } from '../path/result.js';
+import type { Context } from './context.js';
+import {
+  endCompression,
+  endTension,
+  supportBearing,
+  supportMoment,
+  supportShear,
+  supportUplift,
+} from './end-forces.js';
+import { pierShear, pierUnitShear } from './piers.js';
+import type { Steps } from './steps.js';
+import { lineOverturning, lineReaction, lineShear } from './wall-lines.js';
+
+/** Adds the steps of a demand; the last one gives it. */
+export type Explain = (context: Context, demand: Demand, steps: Steps) => void;
+
+const WORKINGS: Readonly<Partial<Record<DemandKind, Readonly<Partial<Record<Quantity, Explain>>>>>> = {
+  'wall-line': { reaction: lineReaction, shear: lineShear, 'overturning-moment': lineOverturning },
+  pier: {
+    shear: pierShear,
+    'unit-shear': pierUnitShear,
+    'end-tension': endTension,
+    'end-compression': endCompression,
+  },
+  support: { shear: supportShear, uplift: supportUplift, bearing: supportBearing, moment: supportMoment },
+};
+
+export function workingFor(kind: DemandKind, quantity: Quantity): Explain | undefined {
+  return WORKINGS[kind]?.[quantity];
+}
