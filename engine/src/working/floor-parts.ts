@@ -39,6 +39,7 @@ export function floorParts(context: Context, inertia: Inertia, reach: Reach, ste
     });
     return [{ size, at: steps.add(steps.fresh('s'), '(s_a + s_b)/2', [from, to], length) }];
   }
+  if (inertia.spread === 'facade') return facadeParts(context, inertia, reach, steps);
   for (const slab of profile.slabs) {
     const a = Math.max(slab.from, reach.from);
     const b = Math.min(slab.to, reach.to);
@@ -48,6 +49,41 @@ export function floorParts(context: Context, inertia: Inertia, reach: Reach, ste
   }
   if (inertia.spread === 'weight') parts.push(...lineParts(context, inertia, profile, reach, steps));
   return parts;
+}
+
+/** Stretches of a façade with one load per length. */
+function facadeParts(
+  context: Context,
+  { diaphragm, frame, facade = [] }: Inertia,
+  reach: Reach,
+  steps: Steps,
+): FloorPart[] {
+  const { tolerance } = diaphragm.profiles[frame] as Profile;
+  const { length, force, perLength } = context.units;
+  const read = (symbol: string, value: number, unit: string, what: string): Value =>
+    readOff(context, symbol, `${diaphragm.path}.outline`, value, unit, what);
+  return facade.flatMap((piece) => {
+    const a = Math.max(piece.from, reach.from);
+    const b = Math.min(piece.to, reach.to);
+    if (b - a <= tolerance) return [];
+    const from = read('s_a', a, length, 'place along the span');
+    const to = read('s_b', b, length, 'place along the span');
+    const load = (s: number): number => (piece.w[0] ?? 0) + (piece.w[1] ?? 0) * (s - piece.from);
+    const near = read('w_a', load(a), perLength, 'load of the façade per length');
+    const far = read('w_b', load(b), perLength, 'load of the façade per length');
+    const even = near.value === far.value;
+    const size = steps.add(
+      steps.fresh('n'),
+      even ? 'w_a·(s_b − s_a)' : '(w_a + w_b)/2·(s_b − s_a)',
+      even ? [near, to, from] : [near, far, to, from],
+      force,
+    );
+    const centre = even ? '(s_a + s_b)/2' : 's_a + (s_b − s_a)·(w_a + 2·w_b)/(3·(w_a + w_b))';
+    const at = steps.add(steps.fresh('s'), centre, even ? [from, to] : [from, to, near, far], length, {
+      what: 'its centre',
+    });
+    return [{ size, at }];
+  });
 }
 
 /** A stretch in which every depth is linear: its size is its mean load per length times its length. */

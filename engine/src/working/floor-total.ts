@@ -1,27 +1,18 @@
 /** The whole on which a level's force lies: the weight, area or width of all its diaphragms. */
-import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
-import type { Spread } from '../diaphragms/inertia.js';
+import type { Inertia } from '../diaphragms/inertia.js';
 import type { Profile } from '../geometry/profile.js';
-import { fromFile, readOff, type Context } from './context.js';
+import type { Demand } from '../path/result.js';
+import { fromFile, readOff, runOf, type Context } from './context.js';
 import { areaWeight } from './floor-parts.js';
 import type { Steps, Value } from './steps.js';
 
-/**
- * @param spread how the level's force lies
- * @param frame  index of the frame along the load
- */
-export function totalStep(
-  context: Context,
-  diaphragms: readonly DiaphragmModel[],
-  spread: Spread,
-  frame: number,
-  steps: Steps,
-  symbol = 'N',
-): Value {
+/** @param inertias how the level's force lies on each of the diaphragms that count */
+export function totalStep(context: Context, inertias: readonly Inertia[], steps: Steps, symbol = 'N'): Value {
   const { length, force } = context.units;
   const terms: string[] = [];
   const values: Value[] = [];
-  for (const diaphragm of diaphragms) {
+  const spread = inertias[0]?.spread ?? 'even';
+  for (const { diaphragm, frame, facade = [] } of inertias) {
     const profile = diaphragm.profiles[frame] as Profile;
     const outline = `${diaphragm.path}.outline`;
     if (spread === 'even') {
@@ -35,6 +26,24 @@ export function totalStep(
       );
       terms.push(width.symbol);
       values.push(width);
+      continue;
+    }
+    if (spread === 'facade') {
+      for (const { from, to, w } of facade) {
+        const mean = (w[0] ?? 0) + ((w[1] ?? 0) * (to - from)) / 2;
+        const i = values.length + 1;
+        const load = readOff(
+          context,
+          `w_${i}`,
+          outline,
+          mean,
+          context.units.perLength,
+          'mean load of the façade per length',
+        );
+        const width = readOff(context, `B_${i}`, outline, to - from, length, 'width across the load');
+        terms.push(`${load.symbol}·${width.symbol}`);
+        values.push(load, width);
+      }
       continue;
     }
     for (const [q, area] of areas(profile, spread)) {
@@ -65,15 +74,25 @@ export function totalStep(
       values.push(p, l_);
     });
   }
-  const unit = spread === 'weight' ? force : spread === 'area' ? `${length}²` : length;
-  const what = { weight: 'seismic weight', area: 'floor area', even: 'width across the load' }[spread];
+  const unit = { weight: force, facade: force, area: `${length}²`, even: length }[spread];
+  const what = {
+    weight: 'seismic weight',
+    area: 'floor area',
+    even: 'width across the load',
+    facade: 'load of the façade',
+  }[spread];
   return steps.add(steps.fresh(symbol), terms.length === 0 ? '0' : terms.join(' + '), values, unit, {
     what: `${what} of the level`,
   });
 }
 
+/** How a level's force lies on all of its diaphragms. */
+export function levelInertias(context: Context, of: Pick<Demand, 'case'>, level: number): Inertia[] {
+  return (runOf(context, of.case).outcomes[level]?.diaphragms ?? []).map(({ pushed }) => pushed.inertia);
+}
+
 /** Net area by area weight; all in one for `area`. */
-function areas(profile: Profile, spread: Spread): Map<number, number> {
+function areas(profile: Profile, spread: Inertia['spread']): Map<number, number> {
   const sums = new Map<number, number>();
   for (const slab of profile.slabs) {
     for (const strip of slab.strips) {

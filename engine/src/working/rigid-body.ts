@@ -6,7 +6,7 @@ import type { Demand } from '../path/result.js';
 import type { LineModel } from '../walls/wall-line.js';
 import { casePath, fromDemand, fromFile, readOff, runOf, type Context } from './context.js';
 import { flexibleGives } from './flexible-reaction.js';
-import { totalStep } from './floor-total.js';
+import { levelInertias, totalStep } from './floor-total.js';
 import { pushStep, type ForceSet } from './level-push.js';
 import { alongAxis, armStep, cosinesOf, cosineValues, joined, stiffnessStep, type Cosines } from './plan-arms.js';
 import type { Steps, Value } from './steps.js';
@@ -61,9 +61,8 @@ export function resultantSteps(
   if (level === undefined) throw new Error(`no level of ${diaphragm.key}`);
   let force = pushStep(context, of, level.id, set, 1, steps);
   if (level.diaphragms.length > 1) {
-    const { spread, frame } = pushed.inertia;
-    const own = totalStep(context, [diaphragm], spread, frame, steps, 'n');
-    const whole = totalStep(context, level.diaphragms, spread, frame, steps);
+    const own = totalStep(context, [pushed.inertia], steps, 'n');
+    const whole = totalStep(context, levelInertias(context, of, level.index), steps);
     force = steps.add('F_d', `F·${own.symbol}/${whole.symbol}`, [force, own, whole], force.unit, {
       what: `part of the level’s force on diaphragm ${diaphragm.key}`,
     });
@@ -265,7 +264,11 @@ export function placeOfPush(
   } else place = readOff(context, 's_M', outline, centre, length, 'centre of the load across it');
   if (inertia.offset === 0) return place;
   const { subCase, amplification } = runOf(context, of.case);
-  const ratio = fromFile(context, 'ε', `${casePath(context, of.case)}.accidental.ratio`, '1');
+  const path = casePath(context, of.case);
+  const accidental = subCase.loadCase.accidental !== undefined;
+  const ratio = accidental
+    ? fromFile(context, 'ε', `${path}.accidental.ratio`, '1')
+    : readOff(context, 'ε', path, Math.abs(subCase.eccentricity), '1', 'eccentricity of wind over the width');
   const width = readOff(context, 'B', outline, profile.to - profile.from, length, 'width across the load');
   const sign = subCase.eccentricity < 0 ? '−' : '+';
   const amplified =
@@ -280,7 +283,7 @@ export function placeOfPush(
     length,
     {
       what: 'place of the level’s force across the load',
-      clause: 'accidental eccentricity: ASCE 7-16 12.8.4.2, 12.8.4.3',
+      clause: accidental ? 'accidental eccentricity: ASCE 7-16 12.8.4.2, 12.8.4.3' : 'ASCE 7-16 Fig. 27.3-8, case 2',
     },
   );
 }

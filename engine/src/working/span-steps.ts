@@ -5,7 +5,7 @@ import type { DiaphragmOutcome } from '../path/descent.js';
 import type { Demand } from '../path/result.js';
 import { fromDemand, linePath, readOff, type Context } from './context.js';
 import { floorParts, type Reach } from './floor-parts.js';
-import { totalStep } from './floor-total.js';
+import { levelInertias, totalStep } from './floor-total.js';
 import { pushStep, type ForceSet } from './level-push.js';
 import type { Steps, Value } from './steps.js';
 
@@ -43,7 +43,7 @@ export function spanSource(
   const push = acts
     ? {
         force: pushStep(context, of, level.id, set, along, steps, steps.fresh('F')),
-        whole: totalStep(context, level.diaphragms, pushed.inertia.spread, frame, steps),
+        whole: totalStep(context, levelInertias(context, of, level.index), steps),
       }
     : undefined;
   const profile = diaphragm.profiles[frame] as Profile;
