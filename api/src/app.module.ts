@@ -1,6 +1,7 @@
 import { Module, type DynamicModule } from '@nestjs/common';
 import { AccessModule } from './access/access.module.js';
 import { AnalysesModule } from './analyses/analyses.module.js';
+import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
 import { ComparisonsModule } from './comparisons/comparisons.module.js';
 import { DatabaseModule } from './database/database.module.js';
@@ -32,6 +33,7 @@ export class AppModule {
         FoundationModule,
         ComparisonsModule,
         HistoryModule,
+        AuditModule,
       ],
     };
   }

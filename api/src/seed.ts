@@ -1,6 +1,7 @@
 /** The demo: one project with its revisions, put in once. */
 import { readFile } from 'node:fs/promises';
 import { AccessService } from './access/access.service.js';
+import { asRequest, setActor } from './database/actor.js';
 import { DatabaseService } from './database/database.service.js';
 import { EngineService } from './engine/engine.service.js';
 import { RevisionsService, sound } from './revisions/revisions.service.js';
@@ -26,7 +27,12 @@ export async function seed({ databaseUrl }: { readonly databaseUrl: string }): P
     const lock = await database.pool.connect();
     try {
       await lock.query('SELECT pg_advisory_lock($1)', [LOCK]);
-      if (!(await isSettled(database))) await putIn(database, engine);
+      if (!(await isSettled(database))) {
+        await asRequest(() => {
+          setActor({ id: '', name: 'Demo' });
+          return putIn(database, engine);
+        });
+      }
     } finally {
       // Ends the session, and with it the lock.
       lock.release(true);
@@ -47,7 +53,9 @@ async function putIn(database: DatabaseService, engine: EngineService): Promise<
   const story = JSON.parse(await readFile(new URL('revisions.json', DEMO), 'utf8')) as Chapter[];
   const project =
     (await prisma.project.findFirst({ where: { demo: true } })) ??
-    (await prisma.project.create({ data: { name: 'Demo: Ropewalk Yard, House 2', demo: true } }));
+    (await database.write((transaction) =>
+      transaction.project.create({ data: { name: 'Demo: Ropewalk Yard, House 2', demo: true } }),
+    ));
   const there = await prisma.revision.findMany({
     where: { projectId: project.id },
     orderBy: { number: 'asc' },
@@ -64,10 +72,13 @@ async function putIn(database: DatabaseService, engine: EngineService): Promise<
     }
     const last = i === story.length - 1;
     if (revision.state === 'draft') {
-      await prisma.revision.update({
-        where: { id: revision.id },
-        data: last ? { remarks } : { state: 'issued', issuedAt: new Date(), purpose, remarks },
-      });
+      const { id } = revision;
+      await database.write((transaction) =>
+        transaction.revision.update({
+          where: { id },
+          data: last ? { remarks } : { state: 'issued', issuedAt: new Date(), purpose, remarks },
+        }),
+      );
     }
     basedOn = revision.id;
   }

@@ -303,6 +303,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/projects/{projectId}/audit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["AuditController_page"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/auth/sign-in/email": {
         parameters: {
             query?: never;
@@ -2488,9 +2504,10 @@ export interface operations {
                                 deflectionAtAllowable?: number;
                             }[];
                         };
+                        /** @description Basis of design of every load case that names none */
                         basis?: {
-                            /** @enum {string} */
-                            standard: "ASCE 7-16" | "ASCE 7-22";
+                            /** @constant */
+                            standard: "ASCE 7-16";
                             seismic?: {
                                 SDS: number;
                                 SD1: number;
@@ -2516,10 +2533,349 @@ export interface operations {
                                 /** @description Default 0.75 */
                                 x?: number;
                             };
+                            wind?: {
+                                /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                                V: number;
+                                /** @enum {string} */
+                                exposure: "B" | "C" | "D";
+                                /** @description Topography, the same at all heights; default 1 */
+                                Kzt?: number;
+                                /** @description Directionality; default 0.85 */
+                                Kd?: number;
+                                /** @description Ground elevation; default 1 */
+                                Ke?: number;
+                                /** @description Gust effect; default 0.85, the value for rigid buildings */
+                                G?: number;
+                                /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                                ground?: number;
+                                /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                                roofHeight?: number;
+                                /**
+                                 * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                                 * @enum {string}
+                                 */
+                                heightRule?: "floor" | "mean";
+                                /** @description Height of the parapet on every roof [length]; default none */
+                                parapet?: number;
+                                /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                                torsion?: boolean;
+                            };
+                            /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                            combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                                id: string;
+                                /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                                factors: {
+                                    D?: number;
+                                    L?: number;
+                                    Lr?: number;
+                                    S?: number;
+                                    E?: number;
+                                    W?: number;
+                                };
+                            }[];
+                        } | {
+                            /** @constant */
+                            standard: "ASCE 7-22";
+                            seismic?: {
+                                SDS: number;
+                                SD1: number;
+                                /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                                S1?: number;
+                                /** @description Long-period transition [s]; default 8 */
+                                TL?: number;
+                                R: number;
+                                /** @description Ω₀; default 1 */
+                                overstrength?: number;
+                                /** @description Default R */
+                                Cd?: number;
+                                /** @description Iₑ; default 1 */
+                                importance?: number;
+                                /** @description ρ; default 1 */
+                                redundancy?: number;
+                                /** @enum {string} */
+                                designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                                /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                                period?: number;
+                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                Ct?: number;
+                                /** @description Default 0.75 */
+                                x?: number;
+                            };
+                            wind?: {
+                                /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                                V: number;
+                                /** @enum {string} */
+                                exposure: "B" | "C" | "D";
+                                /** @description Topography, the same at all heights; default 1 */
+                                Kzt?: number;
+                                /** @description Directionality; default 0.85 */
+                                Kd?: number;
+                                /** @description Ground elevation; default 1 */
+                                Ke?: number;
+                                /** @description Gust effect; default 0.85, the value for rigid buildings */
+                                G?: number;
+                                /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                                ground?: number;
+                                /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                                roofHeight?: number;
+                                /**
+                                 * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                                 * @enum {string}
+                                 */
+                                heightRule?: "floor" | "mean";
+                                /** @description Height of the parapet on every roof [length]; default none */
+                                parapet?: number;
+                                /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                                torsion?: boolean;
+                            };
+                            /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                            combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                                id: string;
+                                /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                                factors: {
+                                    D?: number;
+                                    L?: number;
+                                    Lr?: number;
+                                    S?: number;
+                                    E?: number;
+                                    W?: number;
+                                };
+                            }[];
+                        } | {
+                            /** @constant */
+                            standard: "EN 1998-1";
+                            seismic: {
+                                /** @description Reference peak ground acceleration on ground of type A, over the acceleration of gravity */
+                                agR: number;
+                                /** @enum {string} */
+                                groundType: "A" | "B" | "C" | "D" | "E";
+                                /**
+                                 * @description Default type 1
+                                 * @enum {string}
+                                 */
+                                spectrum?: "type 1" | "type 2";
+                                /** @description Behaviour factor */
+                                q: number;
+                                /** @description γI; default 1 */
+                                importance?: number;
+                                /** @description T₁ [s]; default Cₜ·H^0.75 */
+                                period?: number;
+                                /** @description Cₜ for H in metres; default 0.05 */
+                                Ct?: number;
+                                /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
+                                lambda?: number;
+                                /** @description Lower bound of the design spectrum over a_g; default 0.2 */
+                                beta?: number;
+                                /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
+                                diaphragmOverstrength?: number;
+                            };
+                            /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                            combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                                id: string;
+                                /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                                factors: {
+                                    D?: number;
+                                    L?: number;
+                                    Lr?: number;
+                                    S?: number;
+                                    E?: number;
+                                    W?: number;
+                                };
+                            }[];
                         };
+                        /** @description Further bases of design, side by side: a load case names the one that it takes; where the file has no other, the only one is every case’s */
+                        bases?: ({
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @constant */
+                            standard: "ASCE 7-16";
+                            seismic?: {
+                                SDS: number;
+                                SD1: number;
+                                /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                                S1?: number;
+                                /** @description Long-period transition [s]; default 8 */
+                                TL?: number;
+                                R: number;
+                                /** @description Ω₀; default 1 */
+                                overstrength?: number;
+                                /** @description Default R */
+                                Cd?: number;
+                                /** @description Iₑ; default 1 */
+                                importance?: number;
+                                /** @description ρ; default 1 */
+                                redundancy?: number;
+                                /** @enum {string} */
+                                designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                                /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                                period?: number;
+                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                Ct?: number;
+                                /** @description Default 0.75 */
+                                x?: number;
+                            };
+                            wind?: {
+                                /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                                V: number;
+                                /** @enum {string} */
+                                exposure: "B" | "C" | "D";
+                                /** @description Topography, the same at all heights; default 1 */
+                                Kzt?: number;
+                                /** @description Directionality; default 0.85 */
+                                Kd?: number;
+                                /** @description Ground elevation; default 1 */
+                                Ke?: number;
+                                /** @description Gust effect; default 0.85, the value for rigid buildings */
+                                G?: number;
+                                /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                                ground?: number;
+                                /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                                roofHeight?: number;
+                                /**
+                                 * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                                 * @enum {string}
+                                 */
+                                heightRule?: "floor" | "mean";
+                                /** @description Height of the parapet on every roof [length]; default none */
+                                parapet?: number;
+                                /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                                torsion?: boolean;
+                            };
+                            /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                            combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                                id: string;
+                                /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                                factors: {
+                                    D?: number;
+                                    L?: number;
+                                    Lr?: number;
+                                    S?: number;
+                                    E?: number;
+                                    W?: number;
+                                };
+                            }[];
+                        } | {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @constant */
+                            standard: "ASCE 7-22";
+                            seismic?: {
+                                SDS: number;
+                                SD1: number;
+                                /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                                S1?: number;
+                                /** @description Long-period transition [s]; default 8 */
+                                TL?: number;
+                                R: number;
+                                /** @description Ω₀; default 1 */
+                                overstrength?: number;
+                                /** @description Default R */
+                                Cd?: number;
+                                /** @description Iₑ; default 1 */
+                                importance?: number;
+                                /** @description ρ; default 1 */
+                                redundancy?: number;
+                                /** @enum {string} */
+                                designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                                /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                                period?: number;
+                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                Ct?: number;
+                                /** @description Default 0.75 */
+                                x?: number;
+                            };
+                            wind?: {
+                                /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                                V: number;
+                                /** @enum {string} */
+                                exposure: "B" | "C" | "D";
+                                /** @description Topography, the same at all heights; default 1 */
+                                Kzt?: number;
+                                /** @description Directionality; default 0.85 */
+                                Kd?: number;
+                                /** @description Ground elevation; default 1 */
+                                Ke?: number;
+                                /** @description Gust effect; default 0.85, the value for rigid buildings */
+                                G?: number;
+                                /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                                ground?: number;
+                                /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                                roofHeight?: number;
+                                /**
+                                 * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                                 * @enum {string}
+                                 */
+                                heightRule?: "floor" | "mean";
+                                /** @description Height of the parapet on every roof [length]; default none */
+                                parapet?: number;
+                                /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                                torsion?: boolean;
+                            };
+                            /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                            combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                                id: string;
+                                /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                                factors: {
+                                    D?: number;
+                                    L?: number;
+                                    Lr?: number;
+                                    S?: number;
+                                    E?: number;
+                                    W?: number;
+                                };
+                            }[];
+                        } | {
+                            /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                            id: string;
+                            name?: string;
+                            /** @constant */
+                            standard: "EN 1998-1";
+                            seismic: {
+                                /** @description Reference peak ground acceleration on ground of type A, over the acceleration of gravity */
+                                agR: number;
+                                /** @enum {string} */
+                                groundType: "A" | "B" | "C" | "D" | "E";
+                                /**
+                                 * @description Default type 1
+                                 * @enum {string}
+                                 */
+                                spectrum?: "type 1" | "type 2";
+                                /** @description Behaviour factor */
+                                q: number;
+                                /** @description γI; default 1 */
+                                importance?: number;
+                                /** @description T₁ [s]; default Cₜ·H^0.75 */
+                                period?: number;
+                                /** @description Cₜ for H in metres; default 0.05 */
+                                Ct?: number;
+                                /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
+                                lambda?: number;
+                                /** @description Lower bound of the design spectrum over a_g; default 0.2 */
+                                beta?: number;
+                                /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
+                                diaphragmOverstrength?: number;
+                            };
+                            /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                            combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                                id: string;
+                                /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                                factors: {
+                                    D?: number;
+                                    L?: number;
+                                    Lr?: number;
+                                    S?: number;
+                                    E?: number;
+                                    W?: number;
+                                };
+                            }[];
+                        })[];
                         loadCases: ({
                             id: string;
                             name?: string;
+                            /** @description The basis of design of this case, one of `bases`; default the file’s `basis` */
+                            basis?: string;
                             /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
                             direction: number;
                             accidental?: {
@@ -2548,6 +2904,8 @@ export interface operations {
                         } | {
                             id: string;
                             name?: string;
+                            /** @description The basis of design of this case, one of `bases`; default the file’s `basis` */
+                            basis?: string;
                             /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
                             direction: number;
                             accidental?: {
@@ -2561,13 +2919,16 @@ export interface operations {
                              * @enum {string}
                              */
                             spread?: "weight" | "area" | "even";
-                            /** @constant */
-                            kind: "seismic";
+                            /**
+                             * @description Wind from a basis lies along the façade and makes its torsional sub-cases itself: no spread, no accidental
+                             * @enum {string}
+                             */
+                            kind: "seismic" | "wind";
                             /** @constant */
                             from: "basis";
                         })[];
                         /** @description A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it. */
-                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength") | {
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
                             id: string;
                             /** @description Factors taken as stated: E and W multiply the load case’s own effect */
                             factors: {
@@ -2835,9 +3196,10 @@ export interface operations {
                             deflectionAtAllowable?: number;
                         }[];
                     };
+                    /** @description Basis of design of every load case that names none */
                     basis?: {
-                        /** @enum {string} */
-                        standard: "ASCE 7-16" | "ASCE 7-22";
+                        /** @constant */
+                        standard: "ASCE 7-16";
                         seismic?: {
                             SDS: number;
                             SD1: number;
@@ -2863,10 +3225,349 @@ export interface operations {
                             /** @description Default 0.75 */
                             x?: number;
                         };
+                        wind?: {
+                            /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                            V: number;
+                            /** @enum {string} */
+                            exposure: "B" | "C" | "D";
+                            /** @description Topography, the same at all heights; default 1 */
+                            Kzt?: number;
+                            /** @description Directionality; default 0.85 */
+                            Kd?: number;
+                            /** @description Ground elevation; default 1 */
+                            Ke?: number;
+                            /** @description Gust effect; default 0.85, the value for rigid buildings */
+                            G?: number;
+                            /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                            ground?: number;
+                            /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                            roofHeight?: number;
+                            /**
+                             * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                             * @enum {string}
+                             */
+                            heightRule?: "floor" | "mean";
+                            /** @description Height of the parapet on every roof [length]; default none */
+                            parapet?: number;
+                            /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                            torsion?: boolean;
+                        };
+                        /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
+                    } | {
+                        /** @constant */
+                        standard: "ASCE 7-22";
+                        seismic?: {
+                            SDS: number;
+                            SD1: number;
+                            /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                            S1?: number;
+                            /** @description Long-period transition [s]; default 8 */
+                            TL?: number;
+                            R: number;
+                            /** @description Ω₀; default 1 */
+                            overstrength?: number;
+                            /** @description Default R */
+                            Cd?: number;
+                            /** @description Iₑ; default 1 */
+                            importance?: number;
+                            /** @description ρ; default 1 */
+                            redundancy?: number;
+                            /** @enum {string} */
+                            designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                            /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                            period?: number;
+                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            Ct?: number;
+                            /** @description Default 0.75 */
+                            x?: number;
+                        };
+                        wind?: {
+                            /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                            V: number;
+                            /** @enum {string} */
+                            exposure: "B" | "C" | "D";
+                            /** @description Topography, the same at all heights; default 1 */
+                            Kzt?: number;
+                            /** @description Directionality; default 0.85 */
+                            Kd?: number;
+                            /** @description Ground elevation; default 1 */
+                            Ke?: number;
+                            /** @description Gust effect; default 0.85, the value for rigid buildings */
+                            G?: number;
+                            /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                            ground?: number;
+                            /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                            roofHeight?: number;
+                            /**
+                             * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                             * @enum {string}
+                             */
+                            heightRule?: "floor" | "mean";
+                            /** @description Height of the parapet on every roof [length]; default none */
+                            parapet?: number;
+                            /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                            torsion?: boolean;
+                        };
+                        /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
+                    } | {
+                        /** @constant */
+                        standard: "EN 1998-1";
+                        seismic: {
+                            /** @description Reference peak ground acceleration on ground of type A, over the acceleration of gravity */
+                            agR: number;
+                            /** @enum {string} */
+                            groundType: "A" | "B" | "C" | "D" | "E";
+                            /**
+                             * @description Default type 1
+                             * @enum {string}
+                             */
+                            spectrum?: "type 1" | "type 2";
+                            /** @description Behaviour factor */
+                            q: number;
+                            /** @description γI; default 1 */
+                            importance?: number;
+                            /** @description T₁ [s]; default Cₜ·H^0.75 */
+                            period?: number;
+                            /** @description Cₜ for H in metres; default 0.05 */
+                            Ct?: number;
+                            /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
+                            lambda?: number;
+                            /** @description Lower bound of the design spectrum over a_g; default 0.2 */
+                            beta?: number;
+                            /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
+                            diaphragmOverstrength?: number;
+                        };
+                        /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
                     };
+                    /** @description Further bases of design, side by side: a load case names the one that it takes; where the file has no other, the only one is every case’s */
+                    bases?: ({
+                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                        id: string;
+                        name?: string;
+                        /** @constant */
+                        standard: "ASCE 7-16";
+                        seismic?: {
+                            SDS: number;
+                            SD1: number;
+                            /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                            S1?: number;
+                            /** @description Long-period transition [s]; default 8 */
+                            TL?: number;
+                            R: number;
+                            /** @description Ω₀; default 1 */
+                            overstrength?: number;
+                            /** @description Default R */
+                            Cd?: number;
+                            /** @description Iₑ; default 1 */
+                            importance?: number;
+                            /** @description ρ; default 1 */
+                            redundancy?: number;
+                            /** @enum {string} */
+                            designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                            /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                            period?: number;
+                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            Ct?: number;
+                            /** @description Default 0.75 */
+                            x?: number;
+                        };
+                        wind?: {
+                            /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                            V: number;
+                            /** @enum {string} */
+                            exposure: "B" | "C" | "D";
+                            /** @description Topography, the same at all heights; default 1 */
+                            Kzt?: number;
+                            /** @description Directionality; default 0.85 */
+                            Kd?: number;
+                            /** @description Ground elevation; default 1 */
+                            Ke?: number;
+                            /** @description Gust effect; default 0.85, the value for rigid buildings */
+                            G?: number;
+                            /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                            ground?: number;
+                            /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                            roofHeight?: number;
+                            /**
+                             * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                             * @enum {string}
+                             */
+                            heightRule?: "floor" | "mean";
+                            /** @description Height of the parapet on every roof [length]; default none */
+                            parapet?: number;
+                            /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                            torsion?: boolean;
+                        };
+                        /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
+                    } | {
+                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                        id: string;
+                        name?: string;
+                        /** @constant */
+                        standard: "ASCE 7-22";
+                        seismic?: {
+                            SDS: number;
+                            SD1: number;
+                            /** @description Default 0: the limit for S1 ≥ 0.6 does not apply */
+                            S1?: number;
+                            /** @description Long-period transition [s]; default 8 */
+                            TL?: number;
+                            R: number;
+                            /** @description Ω₀; default 1 */
+                            overstrength?: number;
+                            /** @description Default R */
+                            Cd?: number;
+                            /** @description Iₑ; default 1 */
+                            importance?: number;
+                            /** @description ρ; default 1 */
+                            redundancy?: number;
+                            /** @enum {string} */
+                            designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
+                            /** @description T [s]; default the approximate period Cₜ hₙˣ */
+                            period?: number;
+                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            Ct?: number;
+                            /** @description Default 0.75 */
+                            x?: number;
+                        };
+                        wind?: {
+                            /** @description Basic wind speed: mi/h in a file in feet, m/s in a file in metres */
+                            V: number;
+                            /** @enum {string} */
+                            exposure: "B" | "C" | "D";
+                            /** @description Topography, the same at all heights; default 1 */
+                            Kzt?: number;
+                            /** @description Directionality; default 0.85 */
+                            Kd?: number;
+                            /** @description Ground elevation; default 1 */
+                            Ke?: number;
+                            /** @description Gust effect; default 0.85, the value for rigid buildings */
+                            G?: number;
+                            /** @description Elevation of the ground from which heights count [length]; default the lowest level */
+                            ground?: number;
+                            /** @description Mean roof height h above the ground, for the leeward wall [length]; default that of the highest level */
+                            roofHeight?: number;
+                            /**
+                             * @description Height at which a floor takes K_z: its own, or the mean over the half storeys that it carries; default floor
+                             * @enum {string}
+                             */
+                            heightRule?: "floor" | "mean";
+                            /** @description Height of the parapet on every roof [length]; default none */
+                            parapet?: number;
+                            /** @description Run 75 % of the wind with an eccentricity of ±15 % of the width where a diaphragm is rigid; default true */
+                            torsion?: boolean;
+                        };
+                        /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
+                    } | {
+                        /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
+                        id: string;
+                        name?: string;
+                        /** @constant */
+                        standard: "EN 1998-1";
+                        seismic: {
+                            /** @description Reference peak ground acceleration on ground of type A, over the acceleration of gravity */
+                            agR: number;
+                            /** @enum {string} */
+                            groundType: "A" | "B" | "C" | "D" | "E";
+                            /**
+                             * @description Default type 1
+                             * @enum {string}
+                             */
+                            spectrum?: "type 1" | "type 2";
+                            /** @description Behaviour factor */
+                            q: number;
+                            /** @description γI; default 1 */
+                            importance?: number;
+                            /** @description T₁ [s]; default Cₜ·H^0.75 */
+                            period?: number;
+                            /** @description Cₜ for H in metres; default 0.05 */
+                            Ct?: number;
+                            /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
+                            lambda?: number;
+                            /** @description Lower bound of the design spectrum over a_g; default 0.2 */
+                            beta?: number;
+                            /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
+                            diaphragmOverstrength?: number;
+                        };
+                        /** @description Combinations of the load cases that take this basis; default the file’s `combinations` */
+                        combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
+                            id: string;
+                            /** @description Factors taken as stated: E and W multiply the load case’s own effect */
+                            factors: {
+                                D?: number;
+                                L?: number;
+                                Lr?: number;
+                                S?: number;
+                                E?: number;
+                                W?: number;
+                            };
+                        }[];
+                    })[];
                     loadCases: ({
                         id: string;
                         name?: string;
+                        /** @description The basis of design of this case, one of `bases`; default the file’s `basis` */
+                        basis?: string;
                         /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
                         direction: number;
                         accidental?: {
@@ -2895,6 +3596,8 @@ export interface operations {
                     } | {
                         id: string;
                         name?: string;
+                        /** @description The basis of design of this case, one of `bases`; default the file’s `basis` */
+                        basis?: string;
                         /** @description Direction in which the load acts, degrees anticlockwise from +x; both senses are run */
                         direction: number;
                         accidental?: {
@@ -2908,13 +3611,16 @@ export interface operations {
                          * @enum {string}
                          */
                         spread?: "weight" | "area" | "even";
-                        /** @constant */
-                        kind: "seismic";
+                        /**
+                         * @description Wind from a basis lies along the façade and makes its torsional sub-cases itself: no spread, no accidental
+                         * @enum {string}
+                         */
+                        kind: "seismic" | "wind";
                         /** @constant */
                         from: "basis";
                     })[];
                     /** @description A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it. */
-                    combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength") | {
+                    combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
                         id: string;
                         /** @description Factors taken as stated: E and W multiply the load case’s own effect */
                         factors: {
@@ -4347,6 +5053,146 @@ export interface operations {
             };
             /** @description Problem */
             401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AuditController_page: {
+        parameters: {
+            query?: {
+                /** @description Entries before this one; default from the latest */
+                before?: string;
+                /** @description Default 100 */
+                limit?: number;
+            };
+            header?: never;
+            path: {
+                projectId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        entries: {
+                            id: string;
+                            at: string;
+                            /** @description null where it was written outside the service */
+                            by: string | null;
+                            what: string;
+                        }[];
+                        next: string | null;
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            403: {
                 headers: {
                     [name: string]: unknown;
                 };

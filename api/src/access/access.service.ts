@@ -45,14 +45,16 @@ export class AccessService {
 
   /** Makes the first owner the owner of all that was there before anybody. */
   async grantEverything(userId: string): Promise<void> {
-    await this.database.prisma.$executeRaw`
-      INSERT INTO "membership" ("project_id", "user_id", "role") SELECT "id", ${userId}, 'owner' FROM "project"
-      ON CONFLICT DO NOTHING`;
+    await this.database.write(
+      (transaction) => transaction.$executeRaw`
+        INSERT INTO "membership" ("project_id", "user_id", "role") SELECT "id", ${userId}, 'owner' FROM "project"
+        ON CONFLICT DO NOTHING`,
+    );
   }
 
   /** A project's members are part of what its version stands for; one change of them at a time. */
   private async change(projectId: string, work: (transaction: Transaction) => Promise<void>): Promise<void> {
-    await this.database.prisma.$transaction(async (transaction) => {
+    await this.database.write(async (transaction) => {
       await transaction.project.update({ where: { id: projectId }, data: { version: { increment: 1 } } });
       await work(transaction);
     });

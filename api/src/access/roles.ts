@@ -5,12 +5,12 @@ import type { Role as DatabaseRole } from '../generated/enums.js';
 export const Role = z.enum(['owner', 'engineer', 'checker', 'foundation-designer', 'reader']);
 export type Role = z.infer<typeof Role>;
 
-export type Right = 'read' | 'write' | 'manage';
+export type Right = 'read' | 'write' | 'manage' | 'audit';
 
 const RIGHTS: Readonly<Record<Role, readonly Right[]>> = {
-  owner: ['read', 'write', 'manage'],
-  engineer: ['read', 'write'],
-  checker: ['read'],
+  owner: ['read', 'write', 'manage', 'audit'],
+  engineer: ['read', 'write', 'audit'],
+  checker: ['read', 'audit'],
   'foundation-designer': ['read'],
   reader: ['read'],
 };

@@ -4,6 +4,7 @@ import { Inject, Injectable } from '@nestjs/common';
 import { isAPIError } from 'better-auth/api';
 import { AccessService } from '../access/access.service.js';
 import { fromDatabaseRole, toDatabaseRole, type Role } from '../access/roles.js';
+import { setActor } from '../database/actor.js';
 import { DatabaseService } from '../database/database.service.js';
 import { Problem } from '../faults/problem.js';
 import type { Link } from '../generated/client.js';
@@ -28,7 +29,9 @@ export class LinksService {
   /** A new owner link, as long as nobody has an account; earlier ones are withdrawn. */
   async ownerToken(): Promise<string | undefined> {
     if (await this.somebodyIsIn()) return undefined;
-    await this.database.prisma.link.deleteMany({ where: { projectId: null, usedAt: null } });
+    await this.database.write((transaction) =>
+      transaction.link.deleteMany({ where: { projectId: null, usedAt: null } }),
+    );
     return this.make({ projectId: null, email: null, role: 'owner', hours: OWNER_LINK_HOURS });
   }
 
@@ -41,13 +44,16 @@ export class LinksService {
     const link = await this.find(token);
     if (link?.projectId !== null || (await this.somebodyIsIn())) throw linkGone();
     // All owner links are used up with the first: of several people with one each, one becomes the owner.
-    const used = await this.database.prisma.link.updateManyAndReturn({
-      where: { projectId: null, usedAt: null },
-      data: { usedAt: new Date() },
-      select: { id: true },
-    });
+    const used = await this.database.write((transaction) =>
+      transaction.link.updateManyAndReturn({
+        where: { projectId: null, usedAt: null },
+        data: { usedAt: new Date() },
+        select: { id: true },
+      }),
+    );
     if (!used.some(({ id }) => id === link.id)) throw linkGone();
     const { headers, userId } = await this.signUp(account, link.id);
+    setActor({ id: userId, name: account.name });
     await this.access.grantEverything(userId);
     return headers;
   }
@@ -56,12 +62,13 @@ export class LinksService {
   async acceptInvitation(token: string, name: string, password: string): Promise<Headers> {
     const link = await this.find(token);
     if (!isInvitation(link)) throw linkGone();
-    const { count } = await this.database.prisma.link.updateMany({
-      where: { id: link.id, usedAt: null },
-      data: { usedAt: new Date() },
-    });
+    setActor({ id: '', name: `${name} (by invitation)` });
+    const { count } = await this.database.write((transaction) =>
+      transaction.link.updateMany({ where: { id: link.id, usedAt: null }, data: { usedAt: new Date() } }),
+    );
     if (count === 0) throw linkGone();
     const { headers, userId } = await this.signUp({ name, email: link.email, password }, link.id);
+    setActor({ id: userId, name });
     await this.access.grant(link.projectId, userId, fromDatabaseRole(link.role));
     return headers;
   }
@@ -77,15 +84,17 @@ export class LinksService {
     readonly hours: number;
   }): Promise<string> {
     const token = randomBytes(32).toString('base64url');
-    await this.database.prisma.link.create({
-      data: {
-        tokenHash: hashOf(token),
-        projectId: link.projectId,
-        email: link.email?.toLowerCase() ?? null,
-        role: toDatabaseRole(link.role),
-        expiresAt: new Date(Date.now() + link.hours * 3_600_000),
-      },
-    });
+    await this.database.write((transaction) =>
+      transaction.link.create({
+        data: {
+          tokenHash: hashOf(token),
+          projectId: link.projectId,
+          email: link.email?.toLowerCase() ?? null,
+          role: toDatabaseRole(link.role),
+          expiresAt: new Date(Date.now() + link.hours * 3_600_000),
+        },
+      }),
+    );
     return token;
   }
 
@@ -108,7 +117,9 @@ export class LinksService {
       return { headers, userId: response.user.id };
     } catch (error) {
       // The link is given back: whatever was wrong with the account can be mended and tried again.
-      await this.database.prisma.link.update({ where: { id: linkId }, data: { usedAt: null } });
+      await this.database.write((transaction) =>
+        transaction.link.update({ where: { id: linkId }, data: { usedAt: null } }),
+      );
       if (isAPIError(error) && error.statusCode < 500) throw new Problem(422, 'account-refused', error.message);
       throw error;
     }

@@ -10,6 +10,7 @@ import {
 import { Reflector } from '@nestjs/core';
 import { fromNodeHeaders } from 'better-auth/node';
 import type { FastifyRequest } from 'fastify';
+import { setActor } from '../database/actor.js';
 import { Problem } from '../faults/problem.js';
 import { ACCOUNTS } from './tokens.js';
 import type { Accounts } from './accounts.js';
@@ -44,6 +45,7 @@ export class SessionGuard implements CanActivate {
     const session = await this.accounts.api.getSession({ headers: fromNodeHeaders(request.headers) });
     if (session === null) throw new Problem(401, 'not-signed-in', 'Sign in first.');
     request.user = { id: session.user.id, name: session.user.name, email: session.user.email };
+    setActor(request.user);
     return true;
   }
 }

@@ -3,6 +3,7 @@ import { Injectable, type OnModuleDestroy } from '@nestjs/common';
 import { PrismaPg } from '@prisma/adapter-pg';
 import pg from 'pg';
 import { PrismaClient } from '../generated/client.js';
+import { actor } from './actor.js';
 
 @Injectable()
 export class DatabaseService implements OnModuleDestroy {
@@ -14,6 +15,21 @@ export class DatabaseService implements OnModuleDestroy {
     // An idle connection that the server closes is not an error of a request; the pool opens another.
     this.pool.on('error', () => undefined);
     this.prisma = new PrismaClient({ adapter: new PrismaPg(this.pool) });
+  }
+
+  /** A write: one transaction, which the audit trail tells by the one whose request it is. */
+  write<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
+    return this.prisma.$transaction(
+      async (transaction) => {
+        const by = actor();
+        if (by !== undefined) {
+          await transaction.$queryRaw`
+            SELECT set_config('groundward.actor', ${by.id}, true), set_config('groundward.actor_name', ${by.name}, true)`;
+        }
+        return work(transaction);
+      },
+      { timeout: 60_000, maxWait: 10_000 },
+    );
   }
 
   /** Whether the database answers and is migrated. */

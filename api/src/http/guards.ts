@@ -1,6 +1,7 @@
 /** What holds for every request: security headers, and no write from another site. */
 import helmet from '@fastify/helmet';
 import type { FastifyInstance } from 'fastify';
+import { asRequest } from '../database/actor.js';
 import { sendProblem } from '../faults/problem.filter.js';
 import { Problem } from '../faults/problem.js';
 
@@ -24,6 +25,7 @@ export async function guardRequests(fastify: FastifyInstance): Promise<void> {
     },
     strictTransportSecurity: false,
   });
+  fastify.addHook('onRequest', (_request, _reply, done) => asRequest(done));
   fastify.addHook('onRequest', async (request, reply) => {
     if (request.url.startsWith('/api')) void reply.header('cache-control', 'no-store');
     const { origin, host } = request.headers;

@@ -35,9 +35,9 @@ export class ProjectsService {
   }
 
   async create(userId: string, name: string): Promise<ProjectDetail> {
-    const { id } = await this.database.prisma.project.create({
-      data: { name, memberships: { create: { userId, role: 'owner' } } },
-    });
+    const { id } = await this.database.write((transaction) =>
+      transaction.project.create({ data: { name, memberships: { create: { userId, role: 'owner' } } } }),
+    );
     return this.detail(userId, id);
   }
 
@@ -64,10 +64,12 @@ export class ProjectsService {
 
   async rename(userId: string, projectId: string, name: string, version: number): Promise<ProjectDetail> {
     await this.access.require(userId, projectId, 'manage');
-    const { count } = await this.database.prisma.project.updateMany({
-      where: { id: projectId, version },
-      data: { name, version: { increment: 1 }, updatedAt: new Date() },
-    });
+    const { count } = await this.database.write((transaction) =>
+      transaction.project.updateMany({
+        where: { id: projectId, version },
+        data: { name, version: { increment: 1 }, updatedAt: new Date() },
+      }),
+    );
     const current = await this.detail(userId, projectId);
     if (count === 0) throw new Problem(412, 'stale', 'Someone else changed the project in the meantime.', { current });
     return current;

@@ -4,7 +4,7 @@ import type { Result } from '@groundward/engine/building/fault';
 import type { Analysis } from '@groundward/engine/path/result';
 import { AccessService } from '../access/access.service.js';
 import { storeAnalysis } from '../analyses/store-analysis.js';
-import { DatabaseService, type Transaction } from '../database/database.service.js';
+import { DatabaseService } from '../database/database.service.js';
 import { EngineService } from '../engine/engine.service.js';
 import type { Checked } from '../engine/tasks.js';
 import { faulty, notFound, Problem } from '../faults/problem.js';
@@ -85,7 +85,7 @@ export class RevisionsService {
     head: { readonly name: string; readonly createdBy: string; readonly basedOn: string | null },
     { building, analysis }: Checked,
   ): Promise<RevisionView> {
-    return this.inTransaction(async (transaction) => {
+    return this.database.write(async (transaction) => {
       // One numbering at a time in a project.
       await transaction.$queryRaw`SELECT 1 AS "locked" FROM "project" WHERE "id" = ${projectId}::uuid FOR UPDATE`;
       const last = await transaction.revision.aggregate({ where: { projectId }, _max: { number: true } });
@@ -119,7 +119,7 @@ export class RevisionsService {
     if (before.state === 'issued') throw issued();
     if (before.version !== version) throw await this.stale(projectId, revisionId);
     const { building, analysis } = sound(await this.engine.run('check', { text }));
-    const saved = await this.inTransaction(async (transaction) => {
+    const saved = await this.database.write(async (transaction) => {
       const { count } = await transaction.revision.updateMany({
         where: { id: revisionId, version, state: 'draft' },
         data: {
@@ -176,9 +176,9 @@ export class RevisionsService {
         `The issued revision ${follower.number} was made from this draft, so it stays.`,
       );
     }
-    const { count } = await this.database.prisma.revision.deleteMany({
-      where: { id: revisionId, version, state: 'draft' },
-    });
+    const { count } = await this.database.write((transaction) =>
+      transaction.revision.deleteMany({ where: { id: revisionId, version, state: 'draft' } }),
+    );
     if (count === 0) throw await this.stale(projectId, revisionId);
   }
 
@@ -192,10 +192,12 @@ export class RevisionsService {
     await this.access.require(author.id, projectId, 'write');
     const before = await this.find(projectId, revisionId);
     if (before.state === 'issued') throw issued();
-    const { count } = await this.database.prisma.revision.updateMany({
-      where: { id: revisionId, version, state: 'draft' },
-      data: { ...data, version: { increment: 1 }, updatedAt: new Date() },
-    });
+    const { count } = await this.database.write((transaction) =>
+      transaction.revision.updateMany({
+        where: { id: revisionId, version, state: 'draft' },
+        data: { ...data, version: { increment: 1 }, updatedAt: new Date() },
+      }),
+    );
     if (count === 0) throw await this.stale(projectId, revisionId);
     return revisionView(await this.find(projectId, revisionId));
   }
@@ -229,10 +231,6 @@ export class RevisionsService {
       'Someone else saved this draft in the meantime. Nothing of yours was saved, nothing of theirs was lost.',
       { current },
     );
-  }
-
-  private inTransaction<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
-    return this.database.prisma.$transaction(work, { timeout: 60_000, maxWait: 10_000 });
   }
 }
 

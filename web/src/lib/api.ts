@@ -22,6 +22,7 @@ export type ProjectSummary = Json<'/api/projects', 'get', 200>[number];
 export type ProjectDetail = Json<'/api/projects/{projectId}', 'get', 200>;
 export type Revision = Json<'/api/projects/{projectId}/revisions/{revisionId}', 'get', 200>;
 export type History = Json<'/api/projects/{projectId}/history', 'get', 200>;
+export type AuditPage = Json<'/api/projects/{projectId}/audit', 'get', 200>;
 export type MemberAnswer = Json<'/api/projects/{projectId}/members', 'post', 200>;
 export type Role = ProjectDetail['role'];
 
@@ -87,6 +88,8 @@ export const api = {
     call(`${project(id)}/members`, { method: 'POST', body: { email, role } }) as Promise<MemberAnswer>,
   removeMember: (id: string, userId: string) =>
     call(`${project(id)}/members/${encodeURIComponent(userId)}`, { method: 'DELETE' }),
+  audit: (id: string, before: string) =>
+    call(`${project(id)}/audit?limit=30${before === '' ? '' : `&before=${before}`}`) as Promise<AuditPage>,
   revisions: (id: string) => call(`${project(id)}/revisions`) as Promise<Revision[]>,
   createRevision: (id: string, body: { name: string; from?: string; building?: unknown }) =>
     call(`${project(id)}/revisions`, { method: 'POST', body }) as Promise<Revision>,

@@ -4,6 +4,7 @@ import Link from 'next/link';
 import { useParams, useRouter } from 'next/navigation';
 import { useState, type ChangeEvent } from 'react';
 import { api, type Revision } from '@/lib/api';
+import { AuditTrail } from '@/parts/audit-trail';
 import { IssueForm } from '@/parts/issue-form';
 import { Members } from '@/parts/members';
 import { NameForm } from '@/parts/name-form';
@@ -132,6 +133,7 @@ export default function Project() {
         />
       )}
       <Members project={project.data} />
+      <AuditTrail project={project.data} />
     </main>
   );
 }
