@@ -19,34 +19,6 @@ describe('two levels onto one wall line, and a chord', () => {
   });
 });
 
-describe('a diaphragm with a notch', () => {
-  // R. T. Malone and R. W. Rice, The Analysis of Irregular Shaped Structures: Diaphragms and Shear Walls (2012), Ch. 4, Figs. 4.1-4.2;
-  // printed in lb and plf, tolerance 0.1 plf. Shears and chord forces; the transfer diaphragms' net shears are not built.
-  const building = analysed('notched-diaphragm');
-  const at = (x: number) => beside(building, 'roof/d', 'EY', x);
-
-  test('reaction and shear at the first line', () => {
-    expect(value(building, '1/roof', 'reaction', 'EY')).toBeCloseTo(15, 9);
-    expect(at(0).after?.v).toBeCloseTo(0.3, 9);
-  });
-
-  test.each([
-    [15, 12, 0.24, 0.3],
-    [35, 8, 0.2, 0.16],
-  ])('unit shears on both sides of the step at x = %d ft', (x, shear, left, right) => {
-    expect(at(x).before?.V).toBeCloseTo(shear, 9);
-    expect(at(x).before?.v).toBeCloseTo(left, 9);
-    expect(at(x).after?.v).toBeCloseTo(right, 9);
-  });
-
-  test('chord forces of the shallow part at both ends of the notch', () => {
-    expect(at(15).after?.M).toBeCloseTo(202.5, 9);
-    expect(at(15).after?.chord).toBeCloseTo(5.0625, 9);
-    expect(at(35).before?.M).toBeCloseTo(402.5, 9);
-    expect(at(35).before?.chord).toBeCloseTo(10.0625, 9);
-  });
-});
-
 describe('two diaphragms on a common line, five depths', () => {
   // Malone and Rice, Ch. 8, Fig. 8.7 (lb, plf). The printed depths are kept: 40, 80, 50, 60, 90 ft, and 90 ft for the second diaphragm.
   const building = analysed('two-diaphragms-five-depths');

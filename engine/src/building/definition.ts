@@ -54,6 +54,9 @@ export const Diaphragm = z.strictObject({
   meshSize: Positive.optional().describe(
     'Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area',
   ),
+  transferLength: Positive.optional().describe(
+    'Greatest length, across the load, over which a chord that ends at a step of the outline gives its force to the floor beside it [length]; default up to the next wall line or step',
+  ),
   weight: DiaphragmWeight.optional(),
 });
 

@@ -3,6 +3,7 @@ import type { Behaviour, Diaphragm } from '../building/definition.js';
 import { massOf, type Mass } from '../geometry/area.js';
 import type { Frame } from '../geometry/frame.js';
 import { cutAt, profileOf, type Cut, type Interval, type Profile } from '../geometry/profile.js';
+import { stepsOf, type StepPlan } from './steps/step.js';
 import { tOn, type LineModel } from '../walls/wall-line.js';
 
 /** A wall line where it runs through, or along the edge of, a diaphragm. */
@@ -20,6 +21,8 @@ export type DiaphragmModel = {
   readonly profiles: readonly Profile[];
   readonly mass: Mass;
   readonly touches: readonly Touch[];
+  /** Steps of the outline by index of the frame. */
+  readonly steps: readonly (readonly StepPlan[])[];
 };
 
 export function diaphragmModel(
@@ -45,6 +48,14 @@ export function diaphragmModel(
     profiles,
     mass: massOf(diaphragm, profiles[0] as Profile),
     touches,
+    steps: profiles.map((profile, frame) =>
+      stepsOf(
+        profile,
+        diaphragm.outline,
+        touches.flatMap(({ line }) => (line.family === frame ? [line.s] : [])).sort((a, b) => a - b),
+        diaphragm.transferLength,
+      ),
+    ),
   };
 }
 

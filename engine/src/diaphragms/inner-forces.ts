@@ -5,6 +5,7 @@ import { beamAlong } from '../statics/beam.js';
 import type { LoadPiece, PointLoad, SpanLoad } from '../statics/span-load.js';
 import type { LineModel } from '../walls/wall-line.js';
 import type { DiaphragmModel } from './diaphragm.js';
+import { linear, transfersOf, type Transfer } from './steps/transfer.js';
 
 export type InnerPiece = {
   readonly from: number;
@@ -17,6 +18,8 @@ export type InnerPiece = {
   readonly chordDepth: readonly number[];
   /** t at mid-depth [length] */
   readonly middle: readonly number[];
+  /** The slab of the profile in which it lies. */
+  readonly slab: Slab;
 };
 
 export type InnerForces = {
@@ -24,6 +27,8 @@ export type InnerForces = {
   readonly frame: number;
   readonly profile: Profile;
   readonly pieces: readonly InnerPiece[];
+  /** What interrupted chords give to the floor beside the steps of the outline. */
+  readonly transfers: readonly Transfer[];
   readonly closingShear: number;
   readonly closingMoment: number;
 };
@@ -56,39 +61,38 @@ export function innerForces(
   }
   const breaks = profile.slabs.map((slab) => slab.from);
   breaks.push(profile.to);
+  const steps = diaphragm.steps[frame] ?? [];
+  for (const step of steps) for (const { end } of step.transfers) breaks.push(end);
   const beam = beamAlong({ pieces, points }, breaks, reactions, profile.tolerance);
   let next = 0;
+  const inner = beam.pieces.map((piece): InnerPiece => {
+    const middle = (piece.from + piece.to) / 2;
+    while (next + 1 < profile.slabs.length && (profile.slabs[next] as Slab).to < middle) next += 1;
+    const slab = profile.slabs[next] as Slab;
+    const first = slab.strips[0];
+    const last = slab.strips[slab.strips.length - 1];
+    return {
+      ...piece,
+      depth: linear(slab, slab.depth0, slab.depth1, piece.from),
+      chordDepth: linear(slab, slab.chord0, slab.chord1, piece.from),
+      middle: linear(
+        slab,
+        ((first?.lower0 ?? 0) + (last?.upper0 ?? 0)) / 2,
+        ((first?.lower1 ?? 0) + (last?.upper1 ?? 0)) / 2,
+        piece.from,
+      ),
+      slab,
+    };
+  });
   return {
     diaphragm,
     frame,
     profile,
-    pieces: beam.pieces.map((piece) => {
-      const middle = (piece.from + piece.to) / 2;
-      while (next + 1 < profile.slabs.length && (profile.slabs[next] as Slab).to < middle) next += 1;
-      const slab = profile.slabs[next] as Slab;
-      const first = slab.strips[0];
-      const last = slab.strips[slab.strips.length - 1];
-      return {
-        ...piece,
-        depth: linear(slab, slab.depth0, slab.depth1, piece.from),
-        chordDepth: linear(slab, slab.chord0, slab.chord1, piece.from),
-        middle: linear(
-          slab,
-          ((first?.lower0 ?? 0) + (last?.upper0 ?? 0)) / 2,
-          ((first?.lower1 ?? 0) + (last?.upper1 ?? 0)) / 2,
-          piece.from,
-        ),
-      };
-    }),
+    pieces: inner,
+    transfers: transfersOf(steps, inner, profile.tolerance),
     closingShear: beam.closingShear,
     closingMoment: beam.closingMoment,
   };
-}
-
-/** A linear function of a slab as a polynomial from `from` on. */
-function linear(slab: Slab, v0: number, v1: number, from: number): number[] {
-  const slope = (v1 - v0) / (slab.to - slab.from);
-  return [v0 + slope * (from - slab.from), slope];
 }
 
 /** A force along a line that does not run with the load, spread evenly along its cut. `force` is along the line's family. */

@@ -24,11 +24,19 @@ export type Slab = {
   /** Net depth d at start and end [length] */
   readonly depth0: number;
   readonly depth1: number;
-  /** Chord depth D at start and end [length] */
+  /** Chord depth D at start and end: between the outermost edges, of several wings the sum [length] */
   readonly chord0: number;
   readonly chord1: number;
-  /** Parts of the outline that the cut consists of; more than one where wings stand side by side. */
-  readonly parts: number;
+  /** Parts of the outline that the cut consists of, openings left out of account; more than one where wings stand side by side. */
+  readonly wings: readonly Wing[];
+};
+
+/** A part of the outline between two of its edges, linear over its slab: t at start and end [length] */
+export type Wing = {
+  readonly lower0: number;
+  readonly lower1: number;
+  readonly upper0: number;
+  readonly upper1: number;
 };
 
 export type Profile = {
@@ -170,18 +178,16 @@ function slabOf(
     .sort((a, b) => a.t0 + a.t1 - (b.t0 + b.t1) || a.ring - b.ring);
   const strips: Strip[] = [];
   let inOutline = false;
-  let parts = 0;
+  const wings: Wing[] = [];
   const within = new Set<number>();
   let holes = 0;
-  let first: { t0: number; t1: number } | undefined;
-  let last: { t0: number; t1: number } | undefined;
+  let open: { t0: number; t1: number } | undefined;
   for (let i = 0; i < crossing.length; i++) {
     const edge = crossing[i] as { ring: number; t0: number; t1: number };
     if (edge.ring === OUTLINE) {
       inOutline = !inOutline;
-      if (inOutline) parts += 1;
-      first ??= edge;
-      last = edge;
+      if (inOutline) open = edge;
+      else if (open !== undefined) wings.push({ lower0: open.t0, lower1: open.t1, upper0: edge.t0, upper1: edge.t1 });
     } else if (within.has(edge.ring)) {
       within.delete(edge.ring);
       if (edge.ring < firstZone) holes -= 1;
@@ -196,14 +202,20 @@ function slabOf(
     for (const ring of within) if (ring >= firstZone) area = zoneArea(ring);
     strips.push({ lower0: edge.t0, lower1: edge.t1, upper0: next.t0, upper1: next.t1, area });
   }
-  if (first === undefined || last === undefined) return undefined;
+  if (wings.length === 0) return undefined;
   let depth0 = 0;
   let depth1 = 0;
+  let chord0 = 0;
+  let chord1 = 0;
   for (const strip of strips) {
     depth0 += strip.upper0 - strip.lower0;
     depth1 += strip.upper1 - strip.lower1;
   }
-  return { from, to, strips, depth0, depth1, chord0: last.t0 - first.t0, chord1: last.t1 - first.t1, parts };
+  for (const wing of wings) {
+    chord0 += wing.upper0 - wing.lower0;
+    chord1 += wing.upper1 - wing.lower1;
+  }
+  return { from, to, strips, depth0, depth1, chord0, chord1, wings };
 }
 
 export type Interval = readonly [number, number];

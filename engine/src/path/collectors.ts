@@ -3,6 +3,7 @@ import { Refusal } from '../building/refusal.js';
 import { axialAlong, flowsOver, type Axial, type Flow } from '../diaphragms/collector.js';
 import type { DiaphragmModel, Touch } from '../diaphragms/diaphragm.js';
 import { cutOf, shearAt, type InnerForces } from '../diaphragms/inner-forces.js';
+import { transferFlows } from '../diaphragms/steps/transfer.js';
 import { totalLength, type Interval } from '../geometry/profile.js';
 import { distanceAt, pointOn, tOn, type LineModel } from '../walls/wall-line.js';
 import type { DiaphragmOutcome, LevelOutcome } from './descent.js';
@@ -78,6 +79,8 @@ function floorFlows(
   const flows = [
     ...into(clip(cut.left, lines, level), negligible(before, scale) ? 0 : -before, diaphragm, line),
     ...into(clip(cut.right, lines, level), negligible(after, scale) ? 0 : after, diaphragm, line),
+    ...transferFlows(within, line.s, -1, cut.left),
+    ...transferFlows(within, line.s, 1, cut.right),
   ];
   const { inertia, force } = outcome.pushed;
   if (inertia.frame === frame) {

@@ -12,6 +12,7 @@ import { openingDemands } from './opening-demands.js';
 import type { Diagram } from './result.js';
 import { pushedBy, type CaseRun } from './run.js';
 import { diaphragmDiagram, spanDemands, spansOf, type SpanRange } from './span-demands.js';
+import { stepDemands } from './step-demands.js';
 import type { Table } from './table.js';
 
 export function diaphragmDemands(
@@ -82,6 +83,14 @@ export function diaphragmDemands(
         ),
       );
     }
+  }
+  for (const each of outcome.diaphragms) {
+    const frames = [...(inner.get(each.diaphragm)?.values() ?? [])];
+    stepDemands(table, diagrams, ledger, each, frames, {
+      level: level.id,
+      case: subCase.id,
+      sign: (frame) => (frame === subCase.frame ? subCase.sign : 1),
+    });
   }
   for (const collector of collectorsOf(model, outcome, inner)) {
     const where = `collector ${level.id}/${collector.lines.map((line) => line.line.id).join('+')}, case ${subCase.id}`;

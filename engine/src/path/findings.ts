@@ -5,6 +5,7 @@ import type { Model } from './model.js';
 import { edgeDrifts, torsionalRatio } from './level-demands.js';
 import type { Finding } from './result.js';
 import type { CaseRun } from './run.js';
+import { stepFindings } from './step-findings.js';
 import { cross, dot, frameAlong } from '../geometry/frame.js';
 import type { Profile } from '../geometry/profile.js';
 import type { Landing, PostDescent } from '../walls/posts.js';
@@ -15,17 +16,7 @@ export function planFindings(model: Model, bodies: Bodies, loadFrames: ReadonlyS
   const findings: Finding[] = [];
   for (const level of model.levels) {
     for (const diaphragm of level.diaphragms) {
-      const profiles = diaphragm.profiles.filter((_, frame) => loadFrames.has(frame));
-      const parts = Math.max(...profiles.flatMap((profile) => profile.slabs.map((slab) => slab.parts)), 1);
-      if (parts > 1) {
-        findings.push({
-          code: 'cut-in-parts',
-          severity: 'warning',
-          member: diaphragm.key,
-          sentence: `A cut through diaphragm ${diaphragm.key} meets ${parts} wings; their depths are added as if they were one. Draw the wings as diaphragms of their own.`,
-          numbers: { parts },
-        });
-      }
+      findings.push(...stepFindings(diaphragm, loadFrames));
       const body = bodies.get(diaphragm);
       if (body !== undefined && !body.absolute) {
         findings.push({

@@ -5,7 +5,17 @@
 import { z } from 'zod';
 import { Point, Units } from '../building/definition.js';
 
-export const DemandKind = z.enum(['level', 'diaphragm-span', 'opening', 'collector', 'wall-line', 'pier', 'support']);
+export const DemandKind = z.enum([
+  'level',
+  'diaphragm-span',
+  'opening',
+  'transfer-diaphragm',
+  'strut',
+  'collector',
+  'wall-line',
+  'pier',
+  'support',
+]);
 
 export const Quantity = z.enum([
   'force',
@@ -22,6 +32,7 @@ export const Quantity = z.enum([
   'torsional-amplification',
   'shear',
   'unit-shear',
+  'net-unit-shear',
   'moment',
   'chord-force',
   'secondary-moment',
@@ -93,7 +104,63 @@ export const CollectorDiagram = z.strictObject({
     .describe('Axial force, tension positive, linear between points; `at` is the distance along the line’s axis'),
 });
 
-export const Diagram = z.discriminatedUnion('kind', [DiaphragmDiagram, CollectorDiagram]);
+export const StrutDiagram = z.strictObject({
+  kind: z.literal('strut'),
+  member: z
+    .string()
+    .describe('`level/diaphragm/corner/strut`, `drag` along the step or `end` along the end of a transfer diaphragm'),
+  level: z.string(),
+  case: z.string(),
+  from: Point.describe('On plan [length]'),
+  to: Point,
+  points: z
+    .array(z.strictObject({ at: z.number(), axial: z.number() }))
+    .describe('Axial force, tension positive, linear between points; `at` is the distance from `from` towards `to`'),
+});
+
+export const TransferDiagram = z.strictObject({
+  kind: z.literal('transfer-diaphragm'),
+  member: z.string().describe('`level/diaphragm/corner`'),
+  level: z.string(),
+  case: z.string(),
+  along: Point.describe('Unit vector t along the load'),
+  across: Point.describe('Unit vector s across the load'),
+  step: z.number().describe('s of the step [length]'),
+  end: z.number().describe('s of the end away from it [length]'),
+  chords: z
+    .array(
+      z.strictObject({
+        corner: z.number().describe('Corner of the outline where the chord ends, counted from 1'),
+        t: z.number(),
+        axial: z.number().describe('At the step, tension positive [force]'),
+      }),
+    )
+    .describe('The interrupted chords that it takes'),
+  edges: z
+    .array(z.strictObject({ t: z.number().describe('At the step [length]'), axial: z.number() }))
+    .describe('What its edges take of the chords at the step, lower and upper in t, tension positive [force]'),
+  panels: z
+    .array(
+      z.strictObject({
+        from: z.number().describe('s at the start [length]'),
+        to: z.number(),
+        lower: z.array(z.number()).describe('t of its edges, as coefficients of (s − from) [length]'),
+        upper: z.array(z.number()),
+        shear: z
+          .array(z.number())
+          .describe('Over `depth` the net unit shear: V/d with what the interrupted chords give off [force]'),
+        depth: z.array(z.number()).describe('Net depth d of the whole cut [length]'),
+      }),
+    )
+    .describe('The floor between edges and interrupted chords, piece by piece'),
+});
+
+export const Diagram = z.discriminatedUnion('kind', [
+  DiaphragmDiagram,
+  CollectorDiagram,
+  StrutDiagram,
+  TransferDiagram,
+]);
 
 export const PathNode = z.strictObject({
   id: z.string(),
@@ -147,6 +214,8 @@ export type Demand = z.infer<typeof Demand>;
 export type SpanPiece = z.infer<typeof SpanPiece>;
 export type DiaphragmDiagram = z.infer<typeof DiaphragmDiagram>;
 export type CollectorDiagram = z.infer<typeof CollectorDiagram>;
+export type StrutDiagram = z.infer<typeof StrutDiagram>;
+export type TransferDiagram = z.infer<typeof TransferDiagram>;
 export type Diagram = z.infer<typeof Diagram>;
 export type PathNode = z.infer<typeof PathNode>;
 export type PathEdge = z.infer<typeof PathEdge>;

@@ -3,6 +3,7 @@ import type { Point } from '../building/definition.js';
 import { Refusal } from '../building/refusal.js';
 import type { Support } from '../diaphragms/flexible.js';
 import type { InnerForces, InnerPiece } from '../diaphragms/inner-forces.js';
+import { between, netPanels, type NetPanel } from '../diaphragms/steps/transfer.js';
 import { toPlan } from '../geometry/profile.js';
 import { largest, largestRatio, valueAt, type Extreme } from '../statics/polynomial.js';
 import type { DiaphragmDiagram, Quantity } from './result.js';
@@ -24,6 +25,8 @@ export function spansOf(inner: InnerForces, supports: readonly Support[]): SpanR
 }
 
 /**
+ * `unit-shear` is V/d; `net-unit-shear` holds what interrupted chords add to it beside the steps of the outline.
+ *
  * @param collectorShear unit shear along the collectors at the ends of a span, where one runs over less than the whole cut
  */
 export function spanDemands(
@@ -34,6 +37,7 @@ export function spanDemands(
   collectorShear: (span: SpanRange) => number,
 ): void {
   const { units } = table;
+  const panels = inner.transfers.length === 0 ? [] : netPanels(inner);
   for (const span of spans) {
     const shear = new Largest();
     const unitShear = new Largest();
@@ -64,9 +68,38 @@ export function spanDemands(
     };
     add('shear', shear, units.force);
     add('unit-shear', unitShear, units.perLength, atCollector);
+    const net = largestNetUnitShear(inner, panels, span);
+    if (net !== undefined) {
+      const value = Math.max(net.value, Math.abs(unitShear.value));
+      addBoth(table, {
+        member: span.member,
+        kind: 'diaphragm-span',
+        quantity: 'net-unit-shear',
+        case: caseId,
+        value,
+        unit: units.perLength,
+        at: value === net.value ? net.at : unitShear.place(inner),
+      });
+    }
     add('moment', moment, units.moment);
     add('chord-force', chord, units.force);
   }
+}
+
+/** With what interrupted chords give off beside the steps of the outline; nothing where no transfer acts in the span. */
+function largestNetUnitShear(
+  inner: InnerForces,
+  panels: readonly NetPanel[],
+  span: SpanRange,
+): { value: number; at: Point } | undefined {
+  let best: { value: number; at: Point } | undefined;
+  for (const { piece, lower, upper, shear } of between(panels, span.from, span.to, inner.profile.tolerance)) {
+    const { x, value } = largestRatio(shear, piece.depth, piece.to - piece.from);
+    if (best !== undefined && Math.abs(value) <= best.value) continue;
+    const t = (valueAt(lower, x) + valueAt(upper, x)) / 2;
+    best = { value: Math.abs(value), at: toPlan(inner.profile.frame, piece.from + x, t) };
+  }
+  return best;
 }
 
 class Largest {
