@@ -2372,6 +2372,8 @@ export interface operations {
                                 assembly?: string;
                                 /** @description Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area */
                                 meshSize?: number;
+                                /** @description Greatest length, across the load, over which a chord that ends at a step of the outline gives its force to the floor beside it [length]; default up to the next wall line or step */
+                                transferLength?: number;
                                 weight?: {
                                     /** @description Seismic weight of floor or roof [force/length²]; default 0 */
                                     area?: number;
@@ -3064,6 +3066,8 @@ export interface operations {
                             assembly?: string;
                             /** @description Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area */
                             meshSize?: number;
+                            /** @description Greatest length, across the load, over which a chord that ends at a step of the outline gives its force to the floor beside it [length]; default up to the next wall line or step */
+                            transferLength?: number;
                             weight?: {
                                 /** @description Seismic weight of floor or roof [force/length²]; default 0 */
                                 area?: number;
@@ -4167,9 +4171,9 @@ export interface operations {
                             /** @description Key of the member, such as `1/L2/1a` */
                             member: string;
                             /** @enum {string} */
-                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4240,6 +4244,76 @@ export interface operations {
                             points: {
                                 at: number;
                                 axial: number;
+                            }[];
+                        } | {
+                            /** @constant */
+                            kind: "strut";
+                            /** @description `level/diaphragm/corner/strut`, `drag` along the step or `end` along the end of a transfer diaphragm */
+                            member: string;
+                            level: string;
+                            case: string;
+                            /** @description On plan [length] */
+                            from: [
+                                number,
+                                number
+                            ];
+                            /** @description [x, y] on plan [length] */
+                            to: [
+                                number,
+                                number
+                            ];
+                            /** @description Axial force, tension positive, linear between points; `at` is the distance from `from` towards `to` */
+                            points: {
+                                at: number;
+                                axial: number;
+                            }[];
+                        } | {
+                            /** @constant */
+                            kind: "transfer-diaphragm";
+                            /** @description `level/diaphragm/corner` */
+                            member: string;
+                            level: string;
+                            case: string;
+                            /** @description Unit vector t along the load */
+                            along: [
+                                number,
+                                number
+                            ];
+                            /** @description Unit vector s across the load */
+                            across: [
+                                number,
+                                number
+                            ];
+                            /** @description s of the step [length] */
+                            step: number;
+                            /** @description s of the end away from it [length] */
+                            end: number;
+                            /** @description The interrupted chords that it takes */
+                            chords: {
+                                /** @description Corner of the outline where the chord ends, counted from 1 */
+                                corner: number;
+                                t: number;
+                                /** @description At the step, tension positive [force] */
+                                axial: number;
+                            }[];
+                            /** @description What its edges take of the chords at the step, lower and upper in t, tension positive [force] */
+                            edges: {
+                                /** @description At the step [length] */
+                                t: number;
+                                axial: number;
+                            }[];
+                            /** @description The floor between edges and interrupted chords, piece by piece */
+                            panels: {
+                                /** @description s at the start [length] */
+                                from: number;
+                                to: number;
+                                /** @description t of its edges, as coefficients of (s − from) [length] */
+                                lower: number[];
+                                upper: number[];
+                                /** @description Over `depth` the net unit shear: V/d with what the interrupted chords give off [force] */
+                                shear: number[];
+                                /** @description Net depth d of the whole cut [length] */
+                                depth: number[];
                             }[];
                         })[];
                         path: {
@@ -4346,8 +4420,8 @@ export interface operations {
         parameters: {
             query?: {
                 member?: string;
-                kind?: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
-                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                kind?: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
+                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                 level?: string;
                 case?: string;
                 sense?: "1" | "-1";
@@ -4377,9 +4451,9 @@ export interface operations {
                             /** @description Key of the member, such as `1/L2/1a` */
                             member: string;
                             /** @enum {string} */
-                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4853,9 +4927,9 @@ export interface operations {
                         changes: {
                             member: string;
                             /** @enum {string} */
-                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             case: string;
                             sense: 1 | -1;
                             combination?: string;
@@ -4985,7 +5059,7 @@ export interface operations {
         parameters: {
             query: {
                 member: string;
-                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                 case: string;
                 sense: "1" | "-1";
                 combination?: string;
@@ -5007,7 +5081,7 @@ export interface operations {
                     "application/json": {
                         member: string;
                         /** @enum {string} */
-                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                         case: string;
                         /** @enum {string} */
                         sense: "1" | "-1";

@@ -24,6 +24,10 @@ function memberName({ kind, member }: Demand, { building }: Facts): string {
       return `${levelName(building, first)}, span ${third}`;
     case 'opening':
       return `${levelName(building, first)}, opening ${third}`;
+    case 'transfer-diaphragm':
+      return `${levelName(building, first)}, transfer diaphragm at ${third} of ${second}`;
+    case 'strut':
+      return `${levelName(building, first)}, ${STRUTS[parts[3] ?? ''] ?? 'strut'} at ${third} of ${second}`;
     case 'collector':
       return `${levelName(building, first)}, collector on line ${second}`;
     case 'wall-line':
@@ -34,6 +38,12 @@ function memberName({ kind, member }: Demand, { building }: Facts): string {
       return parts.length === 2 ? `Foot of pier ${second}, line ${first}` : `End post at the foundation, line ${first}`;
   }
 }
+
+const STRUTS: Readonly<Record<string, string>> = {
+  strut: 'strut of the interrupted chord',
+  drag: 'drag strut along the step',
+  end: 'drag strut along the end of the transfer diaphragm',
+};
 
 const PLAIN: Partial<Record<`${Demand['kind']}/${Quantity}`, string>> = {
   'level/diaphragm-force': 'the diaphragm design forces of the load case',
@@ -46,6 +56,15 @@ const PLAIN: Partial<Record<`${Demand['kind']}/${Quantity}`, string>> = {
   'diaphragm-span/shear':
     'the diaphragm design force and transfers, carried to the wall lines: the largest V of the span',
   'diaphragm-span/unit-shear': 'the largest V over the net depth of the cut where it occurs',
+  'diaphragm-span/net-unit-shear':
+    'V over the net depth with what interrupted chords give off in the transfer diaphragms beside the steps of the outline',
+  'transfer-diaphragm/shear':
+    'the chord forces that end at the step, carried to the edges of the floor as by a beam that lies across',
+  'transfer-diaphragm/net-unit-shear':
+    'V over the net depth with the shear of the transfer diaphragm over its length, panel by panel',
+  'transfer-diaphragm/chord-force': 'M over the depth with the part of the interrupted chords that the edge takes',
+  'strut/axial-tension': 'net unit shears on both sides, summed along the strut',
+  'strut/axial-compression': 'net unit shears on both sides, summed along the strut',
   'diaphragm-span/moment': 'the area under V: the largest M of the span',
   'diaphragm-span/chord-force': 'the largest M over the distance between the outermost edges where it occurs',
   'opening/secondary-moment': 'the shear of the strip beside the opening times half its length',

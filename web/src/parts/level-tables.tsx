@@ -47,26 +47,30 @@ export function LevelFigures({ index, level, caseId, sense }: At & { readonly in
   );
 }
 
-const SPAN = ['shear', 'unit-shear', 'moment', 'chord-force'] as const;
+const SPAN = ['shear', 'unit-shear', 'net-unit-shear', 'moment', 'chord-force'] as const;
+const TRANSFER = ['shear', 'net-unit-shear', 'chord-force'] as const;
+const STRUT = ['axial-tension', 'axial-compression'] as const;
 const OPENING = ['secondary-moment', 'chord-force', 'corner-force'] as const;
+
+const OF_DIAPHRAGM: ReadonlySet<Demand['kind']> = new Set(['diaphragm-span', 'opening', 'transfer-diaphragm', 'strut']);
 
 export function SpanTable({ analysis, level, caseId, sense }: At & { readonly analysis: Analysis }) {
   const members = new Map<string, Map<Quantity, Demand>>();
   for (const row of analysis.demands) {
-    if ((row.kind !== 'diaphragm-span' && row.kind !== 'opening') || row.case !== caseId || row.sense !== sense)
-      continue;
+    if (!OF_DIAPHRAGM.has(row.kind) || row.case !== caseId || row.sense !== sense) continue;
     if (!row.member.startsWith(`${level}/`)) continue;
     const known = members.get(row.member) ?? new Map<Quantity, Demand>();
     known.set(row.quantity, row);
     members.set(row.member, known);
   }
+  const netShears = [...members.values()].some((rows) => rows.get('net-unit-shear')?.kind === 'diaphragm-span');
   return (
     <section className="panel">
       <h2>Diaphragm</h2>
       <Quantities
         label="Spans between wall lines"
-        heads={['Span', 'Shear V', 'Unit shear', 'Moment M', 'Chord']}
-        quantities={SPAN}
+        heads={['Span', 'Shear V', 'Unit shear', ...(netShears ? ['Net unit shear'] : []), 'Moment M', 'Chord']}
+        quantities={SPAN.filter((what) => what !== 'net-unit-shear' || netShears)}
         members={[...members].filter(([, rows]) => rows.has('unit-shear'))}
       />
       <Quantities
@@ -74,6 +78,18 @@ export function SpanTable({ analysis, level, caseId, sense }: At & { readonly an
         heads={['Opening', 'Secondary M', 'Chord', 'Corner tie']}
         quantities={OPENING}
         members={[...members].filter(([, rows]) => rows.has('secondary-moment'))}
+      />
+      <Quantities
+        label="Transfer diaphragms at steps"
+        heads={['At', 'Transfer shear', 'Net unit shear', 'Chord']}
+        quantities={TRANSFER}
+        members={[...members].filter(([, rows]) => rows.get('net-unit-shear')?.kind === 'transfer-diaphragm')}
+      />
+      <Quantities
+        label="Struts at steps"
+        heads={['At', 'Tension +', 'Compression −']}
+        quantities={STRUT}
+        members={[...members].filter(([, rows]) => rows.get('axial-tension')?.kind === 'strut')}
       />
     </section>
   );
