@@ -42,7 +42,10 @@ export function transfersOf(
   if (steps.length === 0) return NONE;
   const out: Transfer[] = [];
   let largest = 0;
-  for (const piece of pieces) largest = Math.max(largest, Math.abs(valueAt(piece.moment, piece.to - piece.from)));
+  for (const piece of pieces) {
+    const length = piece.to - piece.from;
+    for (const x of [length / 2, length]) largest = Math.max(largest, Math.abs(valueAt(piece.moment, x)));
+  }
   let next = 0;
   for (const step of steps) {
     while (next + 1 < pieces.length && (pieces[next] as InnerPiece).to < step.s - tolerance) next += 1;
