@@ -53,7 +53,9 @@ const turned = (building: Building, move: (point: Point) => Point, turn: number)
     }
   }
   for (const line of copy.wallLines) line.axis = [move(line.axis[0]), move(line.axis[1])];
-  for (const loadCase of copy.loadCases) loadCase.direction = (((loadCase.direction + turn) % 360) + 360) % 360;
+  for (const loadCase of copy.loadCases) {
+    if (loadCase.from !== 'combined') loadCase.direction = (((loadCase.direction + turn) % 360) + 360) % 360;
+  }
   return copy;
 };
 

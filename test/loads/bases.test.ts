@@ -69,11 +69,19 @@ test('the only basis of a list is every case’s', () => {
 test('the basis of a case: named, the file’s, or the only one', () => {
   const one = { id: 'one', ...american };
   const two = { id: 'two', ...european };
-  expect(basisOf({ basis: american, bases: [two] }, { basis: 'two' })).toBe(two);
-  expect(basisOf({ basis: american, bases: [two] }, {})).toBe(american);
-  expect(basisOf({ bases: [one] }, {})).toBe(one);
-  expect(basisOf({ bases: [one, two] }, {})).toBeUndefined();
-  expect(basisOf({ basis: american, bases: [one] }, { basis: 'three' })).toBeUndefined();
+  const loadCases = [byBasis('E', 'two'), byBasis('W')];
+  const of = (file: Pick<Building, 'basis' | 'bases'>, loadCase: LoadCase) => basisOf({ ...file, loadCases }, loadCase);
+  expect(of({ basis: american, bases: [two] }, byBasis('E', 'two'))).toBe(two);
+  expect(of({ basis: american, bases: [two] }, byBasis('E'))).toBe(american);
+  expect(of({ bases: [one] }, byBasis('E'))).toBe(one);
+  expect(of({ bases: [one, two] }, byBasis('E'))).toBeUndefined();
+  expect(of({ basis: american, bases: [one] }, byBasis('E', 'three'))).toBeUndefined();
+  const parts = [
+    { case: 'E', factor: 1 },
+    { case: 'W', factor: 0.3 },
+  ];
+  const both: LoadCase = { id: 'both', kind: 'seismic', from: 'combined', parts };
+  expect(of({ basis: american, bases: [two] }, both)).toBe(two);
 });
 
 test.each([

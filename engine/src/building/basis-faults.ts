@@ -1,13 +1,13 @@
 /** Faults between load cases and bases of design: a basis that is not there, or that does not give the loads of the case. */
 import { basisOf, hasBlock } from '../loads/basis-of.js';
-import type { LoadCase } from './definition.js';
+import type { PlainCase } from './definition.js';
 import type { Fault } from './fault.js';
 import type { Parts } from './reference-faults.js';
 
 export function basisFaults(parts: Parts): Fault[] {
   const bases = (parts.bases ?? []).flatMap((basis) => (basis === undefined ? [] : [basis]));
   const complete = bases.length === (parts.bases?.length ?? 0);
-  const file = { basis: parts.basis, bases };
+  const file = { basis: parts.basis, bases, loadCases: parts.loadCases };
   return parts.loadCases.flatMap((loadCase, c): Fault[] => {
     if (loadCase === undefined) return [];
     const basis = basisOf(file, loadCase);
@@ -46,7 +46,7 @@ export function basisFaults(parts: Parts): Fault[] {
 }
 
 /** What wind from a basis brings with itself. */
-function windFaults(loadCase: LoadCase, c: number): Fault[] {
+function windFaults(loadCase: PlainCase, c: number): Fault[] {
   return (['spread', 'accidental'] as const)
     .filter((key) => loadCase[key] !== undefined)
     .map((key) => ({

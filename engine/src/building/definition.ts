@@ -11,7 +11,7 @@ import { Coordinate, GravityCase, Id, Name, Point, Positive, Ring, Weight } from
 export { GravityCase, Id, Point, Ring } from './values.js';
 export type { Basis, NamedBasis } from './basis.js';
 export type { Combination } from './combination.js';
-export type { LoadCase, StatedCase } from './load-cases.js';
+export type { CombinedCase, LoadCase, PlainCase, StatedCase } from './load-cases.js';
 
 export const Units = z
   .discriminatedUnion('length', [

@@ -58,7 +58,29 @@ export const BasisCase = z.strictObject({
   from: z.literal('basis'),
 });
 
-export const LoadCase = z.discriminatedUnion('from', [StatedCase, BasisCase]);
+export const CombinedPart = z.strictObject({
+  case: caseHead.id.describe('A load case of the file that has its own forces'),
+  factor: z.number().min(-10).max(10).describe('Factor on its effects, not 0'),
+});
+
+/** EN 1998-1 4.3.3.5.1(3), E_x “+” 0.3 E_y; ASCE 7-16 12.5.3, 100 % and 30 %; Fig. 27.3-8, cases 3 and 4. */
+export const CombinedCase = z
+  .strictObject({
+    id: caseHead.id,
+    name: Name.optional(),
+    basis: Id.optional().describe('The basis whose combinations it enters; default that of its first part'),
+    kind: z.enum(['seismic', 'wind']),
+    from: z.literal('combined'),
+    parts: z.array(CombinedPart).min(2).max(3),
+  })
+  .describe(
+    'Load cases that act together: walls, posts and supports with every combination of their signs and eccentricities',
+  );
+
+export const LoadCase = z.discriminatedUnion('from', [StatedCase, BasisCase, CombinedCase]);
 
 export type LoadCase = z.infer<typeof LoadCase>;
 export type StatedCase = z.infer<typeof StatedCase>;
+export type CombinedCase = z.infer<typeof CombinedCase>;
+/** A load case with forces of its own. */
+export type PlainCase = Exclude<LoadCase, CombinedCase>;

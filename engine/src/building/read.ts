@@ -76,6 +76,8 @@ const ASIDE = new Set([
   'no-basis',
   'basis-not-named',
   'not-with-wind',
+  'unknown-part',
+  'part-twice',
   'two-lateral-loads',
   'reserved-id',
 ]);

@@ -1,6 +1,7 @@
 /** Faults between the parts of a file: identities, references, elevations. */
 import { GravityCase, type Building, type Combination } from './definition.js';
 import { basisFaults } from './basis-faults.js';
+import { combinedFaults } from './combined-faults.js';
 import type { Fault } from './fault.js';
 
 /** The parts of a file whose shape is right, each at its place. */
@@ -24,6 +25,7 @@ export function referenceFaults(parts: Parts): Fault[] {
     ...assemblyReferences(parts),
     ...loadFaults(parts),
     ...basisFaults(parts),
+    ...combinedFaults(parts.loadCases),
   ];
 }
 

@@ -2,15 +2,25 @@
 import type { AsceBasis, Basis } from '../building/basis.js';
 import type { Building, LoadCase } from '../building/definition.js';
 
-type Bases = { readonly basis?: Building['basis']; readonly bases?: Building['bases'] };
+type Bases = {
+  readonly basis?: Building['basis'];
+  readonly bases?: Building['bases'];
+  readonly loadCases: readonly (LoadCase | undefined)[];
+};
 
 /**
- * The basis that the case names; the file's `basis` where it names none; the only one of `bases` where the file has no other.
+ * The basis that the case names; that of its first part where a combined case names none; else the file's `basis`, or the only one of
+ * `bases` where the file has no other.
  *
  * @returns undefined where the case names one that is not there, or names none of several
  */
-export function basisOf(file: Bases, { basis }: Pick<LoadCase, 'basis'>): Basis | undefined {
+export function basisOf(file: Bases, loadCase: LoadCase): Basis | undefined {
+  const { basis } = loadCase;
   if (basis !== undefined) return file.bases?.find(({ id }) => id === basis);
+  if (loadCase.from === 'combined') {
+    const first = file.loadCases.find((each) => each?.id === loadCase.parts[0]?.case);
+    if (first !== undefined && first.from !== 'combined') return basisOf(file, first);
+  }
   if (file.basis !== undefined) return file.basis;
   return file.bases?.length === 1 ? file.bases[0] : undefined;
 }

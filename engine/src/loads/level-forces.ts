@@ -1,5 +1,5 @@
 /** The forces of a load case by level: stated in the file, or computed from its basis of design. */
-import type { Building, LoadCase, StatedCase } from '../building/definition.js';
+import type { Building, PlainCase, StatedCase } from '../building/definition.js';
 import type { Fault, Result } from '../building/fault.js';
 import { unitVector } from '../geometry/frame.js';
 import type { LoadPiece } from '../statics/span-load.js';
@@ -21,7 +21,7 @@ export type LevelForce = {
 /**
  * @returns the levels that are pushed, ascending [force]
  */
-export function levelForces(building: Building, loadCase: LoadCase): Result<readonly LevelForce[]> {
+export function levelForces(building: Building, loadCase: PlainCase): Result<readonly LevelForce[]> {
   if (loadCase.from === 'stated') return { ok: true, value: statedForces(building, loadCase) };
   const basis = basisOf(building, loadCase);
   if (loadCase.kind === 'wind') {

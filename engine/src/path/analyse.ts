@@ -6,6 +6,7 @@ import { combinationsFor, gravityCombinations } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { bodiesOf, type Bodies } from './bodies.js';
 import { subCases } from './cases.js';
+import { addCombined, combinedRuns, type CombinedRun } from './combined.js';
 import {
   BOUND,
   MEMBRANE_BOUND,
@@ -45,6 +46,7 @@ export type Prepared = {
   readonly model: Model;
   readonly bodies: Bodies;
   readonly runs: readonly CaseRun[];
+  readonly combined: readonly CombinedRun[];
   readonly descent: PostDescent;
 };
 
@@ -54,11 +56,12 @@ export function prepare(building: Building): Prepared {
   const model = buildModel(building);
   const bodies = bodiesOf(model);
   const runs = subCases(building, model).map((subCase) => runCase(model, bodies, subCase));
-  return { building, model, bodies, runs, descent: descendAll(model, runs) };
+  const combined = combinedRuns(building, model, runs);
+  return { building, model, bodies, runs, combined, descent: descendAll(model, [...runs, ...combined]) };
 }
 
 /** @throws Refusal where the certificate is above its bound */
-export function analysisOf({ building, model, bodies, runs, descent }: Prepared): Analysis {
+export function analysisOf({ building, model, bodies, runs, combined, descent }: Prepared): Analysis {
   const cases = runs.map((run) => run.subCase);
   const table: Table = { rows: [], units: unitNames(building) };
   const diagrams: Diagram[] = [];
@@ -76,11 +79,25 @@ export function analysisOf({ building, model, bodies, runs, descent }: Prepared)
     findings.push(...torsionFindings(run));
     lineDemands(table, model, run.outcomes, subCase.id);
     checkLevels(ledger, model, run.outcomes, subCase.id);
-    checkBase(ledger, model, run.outcomes, subCase);
+    checkBase(ledger, model, run.outcomes, subCase.id);
     addHorizontal(graph, model, run.outcomes, subCase.id);
   }
 
-  const lateral = cases.map(({ id, loadCase }, c): LateralComponent => ({
+  for (const { id, outcomes } of combined) {
+    lineDemands(table, model, outcomes, id);
+    checkLevels(ledger, model, outcomes, id);
+    checkBase(ledger, model, outcomes, id);
+  }
+  addCombined(graph, combined);
+
+  const carried = [
+    ...runs.map((run) => ({ ...run.subCase, outcomes: run.outcomes, parts: [{ subCase: run.subCase, factor: 1 }] })),
+    ...combined.map(({ parts, ...rest }) => ({
+      ...rest,
+      parts: parts.map(({ run, factor }) => ({ subCase: run.subCase, factor })),
+    })),
+  ];
+  const lateral = carried.map(({ id, loadCase }, c): LateralComponent => ({
     id,
     component: GRAVITY.length + c,
     combinations: combinationsFor(building, loadCase),
@@ -90,7 +107,7 @@ export function analysisOf({ building, model, bodies, runs, descent }: Prepared)
     table,
     descent,
     (foot, component) => {
-      const run = runs[component - GRAVITY.length];
+      const run = carried[component - GRAVITY.length];
       return (run?.outcomes[1]?.below[foot.line.index]?.[0] ?? 0) * foot.pier.share;
     },
     lateral,
@@ -102,7 +119,7 @@ export function analysisOf({ building, model, bodies, runs, descent }: Prepared)
     ledger,
     model,
     descent,
-    cases.map((subCase, c) => ({ subCase, component: GRAVITY.length + c })),
+    carried.map(({ id, parts }, c) => ({ id, parts, component: GRAVITY.length + c })),
   );
   const membranes = checkMembranes(ledger, bodies);
   const certificate = certificateOf(ledger, membranes ? MEMBRANE_BOUND : BOUND);

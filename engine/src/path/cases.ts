@@ -1,5 +1,5 @@
 /** Load cases and their sub-cases: each accidental eccentricity is run beside the case itself. */
-import type { Building, LoadCase } from '../building/definition.js';
+import type { Building, PlainCase } from '../building/definition.js';
 import { Refusal } from '../building/refusal.js';
 import { dot, unitVector } from '../geometry/frame.js';
 import { levelForces } from '../loads/level-forces.js';
@@ -11,7 +11,7 @@ import type { Model } from './model.js';
 export type SubCase = {
   /** `EX`, `EX/+e`, `EX/-e` */
   readonly id: string;
-  readonly loadCase: LoadCase;
+  readonly loadCase: PlainCase;
   readonly direction: readonly [number, number];
   readonly frame: number;
   /** 1 where the load acts along the frame's t, −1 against it. */
@@ -31,6 +31,7 @@ export type SubCase = {
 /** @throws Refusal where the basis does not give the forces of a case */
 export function subCases(building: Building, model: Model): SubCase[] {
   return building.loadCases.flatMap((loadCase) => {
+    if (loadCase.from === 'combined') return [];
     const direction = unitVector(loadCase.direction);
     const frame = model.frameOf(direction);
     const stated = levelForces(building, loadCase);
@@ -71,7 +72,7 @@ export function subCases(building: Building, model: Model): SubCase[] {
   });
 }
 
-function windFromBasis({ kind, from }: LoadCase): boolean {
+function windFromBasis({ kind, from }: PlainCase): boolean {
   return kind === 'wind' && from === 'basis';
 }
 

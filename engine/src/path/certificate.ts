@@ -87,7 +87,7 @@ export function checkBase(
   ledger: Ledger,
   model: Model,
   outcomes: readonly (LevelOutcome | undefined)[],
-  subCase: SubCase,
+  caseId: string,
 ): void {
   const about = middleOf(model);
   const sum = { x: 0, y: 0, torsion: 0, scale: 0 };
@@ -111,26 +111,28 @@ export function checkBase(
       add(share * (pushed.force[0] as number), frame.t, [frame.s[0] * centre, frame.s[1] * centre]);
     }
   }
-  const where = `building, case ${subCase.id}`;
+  const where = `building, case ${caseId}`;
   enter(ledger, 'building: base shear', where, Math.hypot(sum.x, sum.y), sum.scale);
   enter(ledger, 'building: torsion at the base', where, sum.torsion, sum.scale * model.extent);
 }
+
+/** A component of the vertical way, with the sub-cases that push it, each with its factor. */
+export type PostCheck = {
+  readonly id: string;
+  readonly component: number;
+  readonly parts: readonly { readonly subCase: SubCase; readonly factor: number }[];
+};
 
 /**
  * The vertical way: at every storey what stands on it and its own gravity is what its posts carry; at the base the moment of all post
  * forces is the overturning moment of the applied forces.
  */
-export function checkPosts(
-  ledger: Ledger,
-  model: Model,
-  descent: PostDescent,
-  subCases: readonly { readonly subCase: SubCase; readonly component: number }[],
-): void {
+export function checkPosts(ledger: Ledger, model: Model, descent: PostDescent, cases: readonly PostCheck[]): void {
   const about = middleOf(model);
-  for (let component = 0; component < GRAVITY.length + subCases.length; component++) {
-    const lateral = subCases.find((entry) => entry.component === component);
+  for (let component = 0; component < GRAVITY.length + cases.length; component++) {
+    const lateral = cases.find((entry) => entry.component === component);
     const what = lateral === undefined ? 'gravity' : 'overturning';
-    const where = `base, ${lateral?.subCase.id ?? GRAVITY[component] ?? ''}`;
+    const where = `base, ${lateral?.id ?? GRAVITY[component] ?? ''}`;
     const sum = { z: 0, mx: 0, my: 0, scale: 0 };
     const add = (force: number, [x, y]: Point): void => {
       sum.z += force;
@@ -156,10 +158,13 @@ export function checkPosts(
     }
     let applied = 0;
     if (lateral !== undefined) {
-      for (const level of model.levels) applied += overturningOf(model, level, lateral.subCase);
-      const [ux, uy] = lateral.subCase.direction;
-      sum.mx -= applied * ux;
-      sum.my -= applied * uy;
+      for (const { subCase, factor } of lateral.parts) {
+        let moment = 0;
+        for (const level of model.levels) moment += factor * overturningOf(model, level, subCase);
+        applied += Math.abs(moment);
+        sum.mx -= moment * subCase.direction[0];
+        sum.my -= moment * subCase.direction[1];
+      }
     }
     const scale = Math.max(sum.scale, Math.abs(applied) / model.extent);
     enter(ledger, `building: vertical, ${what}`, where, sum.z, scale);

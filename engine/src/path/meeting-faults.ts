@@ -26,6 +26,7 @@ export function meetingFaults(building: Building): Fault[] {
   }
   for (const line of model.lines) faults.push(...collectorFaults(model, line));
   building.loadCases.forEach((loadCase, c) => {
+    if (loadCase.from === 'combined') return;
     const direction = unitVector(loadCase.direction);
     for (const level of model.levels) {
       const pushed =

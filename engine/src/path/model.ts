@@ -47,7 +47,7 @@ export function buildModel(building: Building): Model {
     const family = frameOf([(b[0] - a[0]) / length, (b[1] - a[1]) / length]);
     return lineModel(building, line, i, family, frames[family] as Frame, { index, elevations });
   });
-  for (const loadCase of building.loadCases) frameOf(unitVector(loadCase.direction));
+  for (const loadCase of building.loadCases) if (loadCase.from !== 'combined') frameOf(unitVector(loadCase.direction));
 
   const levels = order.map(({ level, position }, i) => ({
     id: level.id,

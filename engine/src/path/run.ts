@@ -68,7 +68,7 @@ export function pushedBy(
 }
 
 /** The vertical way of all sub-cases at once: gravity first, then one component for each run. */
-export function descendAll(model: Model, runs: readonly CaseRun[]): PostDescent {
+export function descendAll(model: Model, runs: readonly Pick<CaseRun, 'outcomes'>[]): PostDescent {
   const size = GRAVITY.length + runs.length;
   return descendPosts(
     model,

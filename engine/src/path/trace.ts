@@ -46,7 +46,9 @@ function traceOf(building: Building, member: string, caseId: string): Trace {
   const bodies = bodiesOf(model);
   const subCase = subCases(building, model).find((candidate) => candidate.id === caseId);
   if (subCase === undefined)
-    throw new Refusal([unknown('unknown-case', caseId, 'a load case or sub-case of the building')]);
+    throw new Refusal([
+      unknown('unknown-case', caseId, 'a load case or sub-case of the building; of a combined case one of its parts'),
+    ]);
   const { inertias } = runCase(model, bodies, subCase);
   const masses = [...model.levels]
     .reverse()
