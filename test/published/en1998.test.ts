@@ -53,3 +53,15 @@ test('λ is 0.85 only in a building of more than two storeys with T₁ ≤ 2·T_
   expect(baseShear({ ...basis, period: 1 }, 12, 4).lambda).toBe(0.85);
   expect(baseShear({ ...basis, lambda: 1 }, 12, 4).coefficient).toBeCloseTo((0.25 * 1.2 * 2.5) / 3.9, 12);
 });
+
+test('100 % and 30 % together: each line gets both directions with its torsion, posts at corners get both', () => {
+  // EN 1998-1:2004 4.3.3.5.1(3), E_Edx “+” 0.30 E_Edy; 4.3.2: eccentricities of ±5 % in every combination of signs
+  const building = analysed('lateral-force-method');
+  const south = value(building, 'S/L1', 'shear', 'EX/+e') - 0.3 * value(building, 'S/L1', 'shear', 'EY/-e');
+  expect(value(building, 'S/L1', 'shear', 'EXY/+-/+e-e')).toBeCloseTo(south, 9);
+  expect(value(building, 'W/L1', 'shear', 'EXY')).toBeCloseTo(0.3 * value(building, 'W/L1', 'shear', 'EY'), 9);
+  const uplift = (caseId: string) => value(building, 'S/a/from', 'uplift', caseId, 1, 'D+E');
+  const eccentric = ['+e+e', '+e-e', '-e+e', '-e-e'].map((signs) => uplift(`EXY/${signs}`));
+  expect(Math.max(...eccentric)).toBeGreaterThan(uplift('EXY'));
+  expect(Math.min(...eccentric)).toBeLessThan(uplift('EXY'));
+});

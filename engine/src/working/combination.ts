@@ -4,7 +4,7 @@ import { publishedTerms, type Published } from '../loads/asce7/combinations.js';
 import { isAsce } from '../loads/basis-of.js';
 import { combinationsFor, gravityCombinations, type FactoredCombination } from '../loads/combinations.js';
 import { basisPlace } from './basis-path.js';
-import { fromFile, fromFileOr, type Context } from './context.js';
+import { carriedCase, fromFile, fromFileOr, type Context } from './context.js';
 import type { Steps, Value } from './steps.js';
 
 export type Factors = {
@@ -22,8 +22,8 @@ const GRAVITY: readonly GravityCase[] = ['D', 'L', 'Lr', 'S'];
  */
 export function factorsOf(context: Context, caseId: string, id: string, steps: Steps): Factors {
   const { building } = context;
-  const run = context.runs.find((candidate) => candidate.subCase.id === caseId);
-  const loadCase = run?.subCase.loadCase ?? caseOfGravity(building, id);
+  const run = carriedCase(context, caseId);
+  const loadCase = run?.loadCase ?? caseOfGravity(building, id);
   const place = basisPlace(building, loadCase);
   const ofBasis = place?.basis.combinations;
   const named = ofBasis ?? building.combinations;

@@ -1,6 +1,6 @@
 /** What a working goes back to: the prepared building, its demands by key, and where the file says a number. */
 import type { Result } from '../building/fault.js';
-import type { Building } from '../building/definition.js';
+import type { Building, LoadCase } from '../building/definition.js';
 import { Refusal } from '../building/refusal.js';
 import { analysisOf, prepare, type Prepared } from '../path/analyse.js';
 import type { LevelModel } from '../path/model.js';
@@ -11,6 +11,9 @@ import type { LineModel, PierModel } from '../walls/wall-line.js';
 import { atPath } from './file-path.js';
 import { referenceOf, type DemandKey } from './reference.js';
 import type { Value } from './steps.js';
+
+/** What a load case does to walls and posts. */
+export type Carried = { readonly loadCase: LoadCase; readonly outcomes: CaseRun['outcomes'] };
 
 export type Context = Prepared & {
   readonly analysis: Analysis;
@@ -35,6 +38,13 @@ export function runOf(context: Context, caseId: string): CaseRun {
   const run = context.runs.find((candidate) => candidate.subCase.id === caseId);
   if (run === undefined) throw new Error(`no load case ${caseId}`);
   return run;
+}
+
+/** A load case or sub-case as walls and posts carry it, made of others or not; undefined for gravity. */
+export function carriedCase(context: Context, caseId: string): Carried | undefined {
+  const run = context.runs.find((candidate) => candidate.subCase.id === caseId);
+  if (run !== undefined) return { loadCase: run.subCase.loadCase, outcomes: run.outcomes };
+  return context.combined.find((candidate) => candidate.id === caseId);
 }
 
 /** Another demand of the same case and sense as a value; undefined where the table has no such row: it is zero throughout. */

@@ -2,13 +2,15 @@
 import type { DiaphragmOutcome } from '../path/descent.js';
 import type { Demand } from '../path/result.js';
 import { bodyShear } from './body-shear.js';
-import { fromDemand, runOf, type Context } from './context.js';
+import { addedUp } from './combined.js';
+import { carriedCase, fromDemand, runOf, type Context } from './context.js';
 import { flexibleGives } from './flexible-reaction.js';
 import { storeyPlace, type StoreyPlace } from './members.js';
 import { storeyHeight } from './piers.js';
 import { sumOf, type Steps, type Value } from './steps.js';
 
 export function lineShear(context: Context, demand: Demand, steps: Steps): void {
+  if (addedUp(context, demand, 'V', steps)) return;
   const place = storeyPlace(context, demand.member);
   const body = bodyHolding(context, demand, place);
   if (body !== undefined) {
@@ -21,6 +23,7 @@ export function lineShear(context: Context, demand: Demand, steps: Steps): void 
 }
 
 export function lineReaction(context: Context, demand: Demand, steps: Steps): void {
+  if (addedUp(context, demand, 'R', steps)) return;
   const place = storeyPlace(context, demand.member);
   if (bodyHolding(context, demand, place) !== undefined) {
     const shear = fromDemand(context, 'V', demand, demand.member, 'shear');
@@ -71,7 +74,7 @@ function signedMoment(
   let sum = 0;
   for (const storey of line.storeys.slice(level)) {
     const height = storey === undefined ? 0 : (context.model.levels[storey.level]?.height ?? 0);
-    const shear = runOf(context, demand.case).outcomes[storey?.level ?? 0]?.below[line.index]?.[0] ?? 0;
+    const shear = carriedCase(context, demand.case)?.outcomes[storey?.level ?? 0]?.below[line.index]?.[0] ?? 0;
     sum += shear * height * demand.sense;
   }
   return { text: sum < 0 ? '−M_above' : 'M_above', values: [moment] };
