@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import type { Building, Diaphragm, PlainCase, Point } from '@groundward/engine/building/definition';
 import { readBuilding } from '@groundward/engine/building/read';
+import { basisFindings } from '@groundward/engine/loads/basis-findings';
 import { facadeAcross } from '@groundward/engine/loads/facade';
 import { levelForces } from '@groundward/engine/loads/level-forces';
 import { windOn } from '@groundward/engine/loads/asce7/wind-forces';
@@ -128,6 +129,7 @@ test('the least pressure governs in light wind: 16 lb/ft² on every wall', () =>
   const found = levelForces(calm, calm.loadCases[0] as PlainCase);
   if (!found.ok) throw new Error('refused');
   expect(found.value[0]?.force).toBeCloseTo((16 * 60 * 10) / 1000, 12);
+  expect(basisFindings(calm)).toMatchObject([{ code: 'least-wind-pressure', severity: 'note', member: 'roof' }]);
 });
 
 test('a parapet adds 2.5·q_p over its height to the roof under it', () => {

@@ -1,13 +1,17 @@
 import { describe, expect, test } from 'vitest';
+import type { Building } from '@groundward/engine/building/definition';
+import { basisFindings } from '@groundward/engine/loads/basis-findings';
 import { baseShear } from '@groundward/engine/loads/en1998/lateral-force';
 import { designSpectrum } from '@groundward/engine/loads/en1998/spectrum';
+import { analyse } from '@groundward/engine/path/analyse';
 import { analysed, value } from './cases.js';
 
 /** The acceleration of gravity with which the masses of the example are weighed [m/s²]. */
 const g = 9.81;
 
 test('four storeys: period, design acceleration, base shear and storey forces', () => {
-  // EN 1998-1:2004 Eqs. 3.14, 4.5, 4.6, 4.11: derived by hand from the equations, masses 300, 300, 300 and 250 t at 3, 6, 9, 12 m
+  // EN 1998-1:2004 Eqs. 3.14, 4.5, 4.6, 4.11: derived by hand from the equations, masses 300, 300, 300 and 250 t at 3, 6, 9, 12 m;
+  // in the file they are G + ψ_E·Q with ψ_E = 0.3 (Eq. 3.17)
   const basis = { agR: 0.25, groundType: 'B', q: 3.9 } as const;
   const found = baseShear(basis, 12, 4);
   expect(found.period).toBeCloseTo(0.3224, 4);
@@ -64,4 +68,100 @@ test('100 % and 30 % together: each line gets both directions with its torsion, 
   const eccentric = ['+e+e', '+e-e', '-e+e', '-e-e'].map((signs) => uplift(`EXY/${signs}`));
   expect(Math.max(...eccentric)).toBeGreaterThan(uplift('EXY'));
   expect(Math.min(...eccentric)).toBeLessThan(uplift('EXY'));
+});
+
+test('live load moves with its part ψ_E, where it lies', () => {
+  // EN 1998-1:2004 3.2.4(2), Eq. 3.17: half of a floor of 20 × 10 m carries 4 kN/m² of live load, all of it 2 kN/m² of its own;
+  // with ψ_E = 0.5 the halves weigh 400 and 200 kN, and their centre lies at (400·5 + 200·15)/600 from the loaded end
+  const outline: [number, number][] = [
+    [0, 0],
+    [20, 0],
+    [20, 10],
+    [0, 10],
+  ];
+  const wall = (id: string, a: [number, number], b: [number, number]): Building['wallLines'][number] => ({
+    id,
+    axis: [a, b],
+    storeys: [{ under: 'roof', piers: [{ id: 'p', from: 1, to: 9 }] }],
+  });
+  const building: Building = {
+    schema: 'groundward.building/1',
+    name: 'Half loaded',
+    units: { length: 'm', force: 'kN' },
+    levels: [
+      { id: 'base', elevation: 0 },
+      {
+        id: 'roof',
+        elevation: 4,
+        diaphragms: [
+          {
+            id: 'd',
+            outline,
+            behaviour: 'rigid',
+            weight: {
+              area: 2,
+              zones: [
+                {
+                  id: 'store',
+                  area: 2,
+                  live: 4,
+                  outline: [
+                    [0, 0],
+                    [10, 0],
+                    [10, 10],
+                    [0, 10],
+                  ],
+                },
+              ],
+            },
+          },
+        ],
+      },
+    ],
+    wallLines: [
+      wall('W', [0, 0], [0, 10]),
+      wall('E', [20, 0], [20, 10]),
+      wall('S', [0, 0], [20, 0]),
+      wall('N', [0, 10], [20, 10]),
+    ],
+    basis: { standard: 'EN 1998-1', seismic: { agR: 0.2, groundType: 'A', q: 2, period: 0.3, psiE: 0.5 } },
+    loadCases: [
+      { id: 'EY', kind: 'seismic', direction: 90, from: 'basis' },
+      {
+        id: 'stated',
+        kind: 'seismic',
+        direction: 90,
+        from: 'stated',
+        basis: 'us',
+        forces: [{ level: 'roof', force: 100 }],
+      },
+    ],
+    bases: [{ id: 'us', standard: 'ASCE 7-22' }],
+  };
+  const result = analyse(building);
+  if (!result.ok) throw new Error(JSON.stringify(result.faults));
+  const c = { building, analysis: result.value };
+  const force = 600 * 0.2 * (2.5 / 2);
+  const centre = (400 * 5 + 200 * 15) / 600;
+  expect(value(c, 'roof', 'force', 'EY')).toBeCloseTo(force, 9);
+  expect(value(c, 'roof', 'centre-of-mass-x', 'EY')).toBeCloseTo(centre, 9);
+  expect(value(c, 'W/roof', 'shear', 'EY') + value(c, 'E/roof', 'shear', 'EY')).toBeCloseTo(force, 9);
+  expect(value(c, 'roof', 'torsion', 'EY')).toBeCloseTo(force * (10 - centre), 6);
+  expect(value(c, 'roof', 'centre-of-mass-x', 'stated')).toBeCloseTo(10, 9);
+  expect(value(c, 'roof', 'torsion', 'stated')).toBeCloseTo(0, 9);
+});
+
+test('a period beyond the smaller of 4·T_C and 2 s is found', () => {
+  // EN 1998-1:2004 4.3.3.2.1(2); from memory, not checked against the document
+  const { building } = analysed('lateral-force-method');
+  const long = (period: number) =>
+    basisFindings({
+      ...building,
+      basis: { standard: 'EN 1998-1', seismic: { agR: 0.25, groundType: 'A', q: 3.9, period } },
+    }).filter(({ code }) => code === 'lateral-force-method-limit');
+  expect(long(1.6)).toEqual([]);
+  expect(long(1.7).map(({ member, numbers }) => [member, numbers?.['limit']])).toEqual([
+    ['EX', 1.6],
+    ['EY', 1.6],
+  ]);
 });

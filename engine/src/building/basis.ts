@@ -66,6 +66,14 @@ export const EnSeismic = z.strictObject({
     .max(1)
     .optional()
     .describe('λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1'),
+  psiE: z
+    .number()
+    .min(0)
+    .max(1)
+    .optional()
+    .describe(
+      'ψ_E, the part of live load that belongs to the seismic mass; default 0.3: ψ₂ of categories A and B, φ = 1',
+    ),
   beta: Weight.optional().describe('Lower bound of the design spectrum over a_g; default 0.2'),
   diaphragmOverstrength: z
     .number()

@@ -25,6 +25,7 @@ export const WeightZone = z.strictObject({
   name: Name.optional(),
   outline: Ring.max(200),
   area: Weight.describe('Replaces the diaphragm’s own area weight inside the outline [force/length²]'),
+  live: Weight.optional().describe('Live load inside the outline [force/length²]; default the diaphragm’s own'),
 });
 
 export const WeightLine = z.strictObject({
@@ -36,6 +37,9 @@ export const WeightLine = z.strictObject({
 
 export const DiaphragmWeight = z.strictObject({
   area: Weight.optional().describe('Seismic weight of floor or roof [force/length²]; default 0'),
+  live: Weight.optional().describe(
+    'Characteristic live load, of which the seismic mass of EN 1998-1 takes the part ψ_E [force/length²]; default 0',
+  ),
   zones: z.array(WeightZone).max(200).optional(),
   lines: z.array(WeightLine).max(2000).optional().describe('Façades and partitions, added to area weights'),
 });

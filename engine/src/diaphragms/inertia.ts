@@ -1,5 +1,6 @@
 /** How a level's force lies on its diaphragms: exact load per unit span from outlines, zones, façades and partitions. */
 import type { Point } from '../building/definition.js';
+import { massWith } from '../geometry/area.js';
 import { dot } from '../geometry/frame.js';
 import type { Profile } from '../geometry/profile.js';
 import type { LoadPiece, PointLoad, SpanLoad } from '../statics/span-load.js';
@@ -29,22 +30,30 @@ export type Inertia = {
   readonly perUnit: number;
   /** Of a façade: its load along s before the factor `perUnit` and any eccentricity [force/length] */
   readonly facade?: readonly LoadPiece[];
+  /** Part of the live load that lies with the weight. */
+  readonly liveShare: number;
   /** Eccentricity across the load that `load` and `centre` hold [length] */
   readonly offset: number;
 };
 
+export type SpreadNotes = {
+  /** Load along s that a level's façade gives it, for `facade` [force/length] */
+  readonly facade?: readonly LoadPiece[] | undefined;
+  /** Part of the live load that lies with the weight, for `weight`; default 0 */
+  readonly liveShare?: number;
+};
+
 /**
  * @param spread `weight` falls back on area where nothing on the level is weighed, `facade` on even where none reaches the level
- * @param facade load along s that a level's façade gives it, for `facade` [force/length]
  * @returns one inertia for each diaphragm of the level
  */
 export function spreadOver(
   diaphragms: readonly DiaphragmModel[],
   frame: number,
   spread: Spread,
-  facade: readonly LoadPiece[] = [],
+  { facade = [], liveShare = 0 }: SpreadNotes = {},
 ): Inertia[] {
-  const weighed = diaphragms.some((d) => d.mass.weight > 0);
+  const weighed = diaphragms.some((d) => massWith(d.mass, liveShare).weight > 0);
   const idle = spread === 'facade' && facade.length === 0;
   const how = spread === 'weight' && !weighed ? 'area' : idle ? 'even' : spread;
   const shapes =
@@ -53,7 +62,7 @@ export function spreadOver(
           diaphragms.map((d) => d.profiles[frame] as Profile),
           facade,
         )
-      : diaphragms.map((d) => shapeOf(d, d.profiles[frame] as Profile, how));
+      : diaphragms.map((d) => shapeOf(d, d.profiles[frame] as Profile, how, liveShare));
   const totals = shapes.map((shape) => resultant(shape.load));
   const whole = totals.reduce((sum, total) => sum + total.force, 0);
   return diaphragms.map((diaphragm, i) => {
@@ -72,6 +81,7 @@ export function spreadOver(
       centre: total.force > 0 ? total.moment / total.force : (diaphragm.profiles[frame] as Profile).from,
       spread: how,
       perUnit: factor,
+      liveShare: how === 'weight' ? liveShare : 0,
       offset: 0,
       ...(how === 'facade' ? { facade: shape.load.pieces } : {}),
     };
@@ -80,7 +90,12 @@ export function spreadOver(
 
 type Shape = { load: SpanLoad; along: AlongLoad[] };
 
-function shapeOf(diaphragm: DiaphragmModel, profile: Profile, spread: Exclude<Spread, 'facade'>): Shape {
+function shapeOf(
+  diaphragm: DiaphragmModel,
+  profile: Profile,
+  spread: Exclude<Spread, 'facade'>,
+  liveShare: number,
+): Shape {
   if (spread === 'even') {
     return { load: { pieces: [{ from: profile.from, to: profile.to, w: [1] }], points: [] }, along: [] };
   }
@@ -89,7 +104,7 @@ function shapeOf(diaphragm: DiaphragmModel, profile: Profile, spread: Exclude<Sp
     let w0 = 0;
     let w1 = 0;
     for (const strip of slab.strips) {
-      const q = spread === 'weight' ? strip.area : 1;
+      const q = spread === 'weight' ? strip.area + liveShare * strip.live : 1;
       w0 += q * (strip.upper0 - strip.lower0);
       w1 += q * (strip.upper1 - strip.lower1);
     }

@@ -14,6 +14,8 @@ export type Strip = {
   readonly upper1: number;
   /** Area weight [force/length²] */
   readonly area: number;
+  /** Live load [force/length²] */
+  readonly live: number;
 };
 
 export type Slab = {
@@ -48,6 +50,7 @@ export type Profile = {
   readonly tolerance: number;
 };
 
+type AreaWeight = { readonly area: number; readonly live: number };
 type Edge = { s0: number; t0: number; s1: number; t1: number; ring: number };
 const OUTLINE = 0;
 
@@ -75,7 +78,8 @@ export function profileOf(diaphragm: Diaphragm, frame: Frame): Profile {
   if (zones.length > 0) addCrossings(edges, breaks, firstZone, tolerance);
 
   const inside = breaks.filter((b) => b >= from - tolerance && b <= to + tolerance);
-  const base = diaphragm.weight?.area ?? 0;
+  const own: AreaWeight = { area: diaphragm.weight?.area ?? 0, live: diaphragm.weight?.live ?? 0 };
+  const ofZone = zones.map((zone): AreaWeight => ({ area: zone.area, live: zone.live ?? own.live }));
   const slabs: Slab[] = [];
   for (let i = 0; i + 1 < inside.length; i++) {
     const slab = slabOf(
@@ -83,8 +87,7 @@ export function profileOf(diaphragm: Diaphragm, frame: Frame): Profile {
       inside[i + 1] as number,
       edges,
       firstZone,
-      base,
-      (ring) => zones[ring - firstZone]?.area ?? base,
+      (ring) => ofZone[ring - firstZone] ?? own,
     );
     if (slab !== undefined) slabs.push(slab);
   }
@@ -169,8 +172,7 @@ function slabOf(
   to: number,
   edges: readonly Edge[],
   firstZone: number,
-  base: number,
-  zoneArea: (ring: number) => number,
+  weightIn: (ring: number) => AreaWeight,
 ): Slab | undefined {
   const crossing = edges
     .filter((edge) => edge.s0 <= from && edge.s1 >= to)
@@ -198,9 +200,9 @@ function slabOf(
     const next = crossing[i + 1];
     if (next === undefined || !inOutline || holes > 0) continue;
     if (next.t0 - edge.t0 <= 0 && next.t1 - edge.t1 <= 0) continue;
-    let area = base;
-    for (const ring of within) if (ring >= firstZone) area = zoneArea(ring);
-    strips.push({ lower0: edge.t0, lower1: edge.t1, upper0: next.t0, upper1: next.t1, area });
+    let weight = weightIn(OUTLINE);
+    for (const ring of within) if (ring >= firstZone) weight = weightIn(ring);
+    strips.push({ lower0: edge.t0, lower1: edge.t1, upper0: next.t0, upper1: next.t1, ...weight });
   }
   if (wings.length === 0) return undefined;
   let depth0 = 0;

@@ -1,6 +1,7 @@
 /** Which basis of design a load case stands on. */
 import type { AsceBasis, Basis } from '../building/basis.js';
 import type { Building, LoadCase } from '../building/definition.js';
+import { liveShareOf } from './en1998/live-share.js';
 
 type Bases = {
   readonly basis?: Building['basis'];
@@ -28,6 +29,13 @@ export function basisOf(file: Bases, loadCase: LoadCase): Basis | undefined {
 /** Whether a basis is one of ASCE 7. */
 export function isAsce(basis: Basis | undefined): basis is AsceBasis {
   return basis?.standard === 'ASCE 7-16' || basis?.standard === 'ASCE 7-22';
+}
+
+/** The part of live load that the forces of a case move; 0 for all but earthquake from EN 1998-1. */
+export function liveShare(file: Bases, loadCase: LoadCase): number {
+  if (loadCase.kind !== 'seismic') return 0;
+  const basis = basisOf(file, loadCase);
+  return basis?.standard === 'EN 1998-1' ? liveShareOf(basis.seismic) : 0;
 }
 
 /** Whether a basis states what a load case from it needs. */

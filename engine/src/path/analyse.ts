@@ -2,6 +2,7 @@
 import type { Building } from '../building/definition.js';
 import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
+import { basisFindings } from '../loads/basis-findings.js';
 import { combinationsFor, gravityCombinations } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { bodiesOf, type Bodies } from './bodies.js';
@@ -68,6 +69,7 @@ export function analysisOf({ building, model, bodies, runs, combined, descent }:
   const graph = emptyGraph();
   const ledger: Ledger = new Map();
   const findings: Finding[] = planFindings(model, bodies, new Set(cases.map((subCase) => subCase.frame)));
+  findings.push(...basisFindings(building));
   for (const run of runs) {
     const { subCase } = run;
     levelDemands(table, model, run);

@@ -4,7 +4,7 @@ import { Refusal } from '../building/refusal.js';
 import { dot, unitVector } from '../geometry/frame.js';
 import { levelForces } from '../loads/level-forces.js';
 import type { Spread } from '../diaphragms/inertia.js';
-import { basisOf, isAsce } from '../loads/basis-of.js';
+import { basisOf, isAsce, liveShare } from '../loads/basis-of.js';
 import type { LoadPiece } from '../statics/span-load.js';
 import type { Model } from './model.js';
 
@@ -17,6 +17,8 @@ export type SubCase = {
   /** 1 where the load acts along the frame's t, −1 against it. */
   readonly sign: 1 | -1;
   readonly spread: Spread;
+  /** Part of the live load that lies with the weight. */
+  readonly liveShare: number;
   /** Accidental eccentricity over the plan dimension across the load; 0 for the case itself. */
   readonly eccentricity: number;
   /** Whether the eccentricity is amplified by Aₓ. */
@@ -54,6 +56,7 @@ export function subCases(building: Building, model: Model): SubCase[] {
       frame,
       sign: dot([t[0], t[1]], [direction[0], direction[1]]) >= 0 ? 1 : -1,
       spread: windFromBasis(loadCase) ? 'facade' : (loadCase.spread ?? 'weight'),
+      liveShare: liveShare(building, loadCase),
       eccentricity: 0,
       amplified: false,
       storeyForce,

@@ -1,4 +1,5 @@
 /** Demands of levels: forces, storey shear, overturning, and the motion of rigid diaphragms. */
+import { massWith } from '../geometry/area.js';
 import { cross, dot } from '../geometry/frame.js';
 import type { Profile } from '../geometry/profile.js';
 import type { Vector3 } from '../statics/small-matrix.js';
@@ -53,10 +54,11 @@ function rigidDemands(
   const rigid = outcome.rigid;
   if (rigid === undefined) return;
   const { units } = table;
-  const { centre, origin } = rigid.model;
+  const { centre } = rigid.model;
+  const mass = massWith(outcome.diaphragm.mass, subCase.liveShare).centre;
   const head = { member, kind: 'level' as const, case: subCase.id };
-  addBoth(table, { ...head, quantity: 'centre-of-mass-x', value: origin[0], unit: units.length });
-  addBoth(table, { ...head, quantity: 'centre-of-mass-y', value: origin[1], unit: units.length });
+  addBoth(table, { ...head, quantity: 'centre-of-mass-x', value: mass[0], unit: units.length });
+  addBoth(table, { ...head, quantity: 'centre-of-mass-y', value: mass[1], unit: units.length });
   addBoth(table, { ...head, quantity: 'centre-of-rigidity-x', value: centre[0], unit: units.length });
   addBoth(table, { ...head, quantity: 'centre-of-rigidity-y', value: centre[1], unit: units.length });
   addBoth(table, { ...head, quantity: 'torsion', value: Math.abs(torsionOf(outcome)), unit: units.moment });

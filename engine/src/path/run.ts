@@ -25,9 +25,10 @@ export function runCase(model: Model, bodies: Bodies, subCase: SubCase): CaseRun
     const inertias = (level: LevelModel): Inertia[] => {
       let known = made.get(level);
       if (known === undefined) {
-        known = spreadOver(level.diaphragms, subCase.frame, subCase.spread, subCase.facade?.[level.index]).map(
-          (inertia) => eccentric(inertia, eccentricity * amplification(level.index)),
-        );
+        known = spreadOver(level.diaphragms, subCase.frame, subCase.spread, {
+          facade: subCase.facade?.[level.index],
+          liveShare: subCase.liveShare,
+        }).map((inertia) => eccentric(inertia, eccentricity * amplification(level.index)));
         made.set(level, known);
       }
       return known;

@@ -1,10 +1,10 @@
 /** The floor as parts on which a level's force lies: weight, area or width of every stretch between two breaks, and its centre. */
 import type { Point } from '../building/definition.js';
-import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
 import type { Inertia } from '../diaphragms/inertia.js';
 import { dot } from '../geometry/frame.js';
 import type { Profile, Slab } from '../geometry/profile.js';
-import { fromFile, fromFileOr, readOff, type Context } from './context.js';
+import { areaWeight, weightsOf, type AreaWeight } from './area-weight.js';
+import { fromFile, readOff, type Context } from './context.js';
 import type { Steps, Value } from './steps.js';
 
 /** A part: what it weighs, or its area or width [as the level's force lies], and where its centre is along s. */
@@ -86,6 +86,8 @@ function facadeParts(
   });
 }
 
+type Depth = { readonly weight: AreaWeight | undefined; readonly depth: number };
+
 /** A stretch in which every depth is linear: its size is its mean load per length times its length. */
 function slabPart(
   context: Context,
@@ -100,35 +102,39 @@ function slabPart(
   const weighs = spread === 'weight';
   const unit = weighs ? force : `${length}²`;
   const perLength = weighs ? `${force}/${length}` : length;
-  const at = (s: number, end: string, depths: Map<number, number>): Value => {
+  const at = (s: number, end: string, depths: Map<string, Depth>): Value => {
     const values: Value[] = [];
     const terms: string[] = [];
-    for (const [q, depth] of depths) {
+    for (const { weight: stated, depth } of depths.values()) {
       const i = terms.length + 1;
       const d = readOff(context, `d_${i}`, `${diaphragm.path}.outline`, depth, length, `net depth at s = ${round(s)}`);
-      if (!weighs) terms.push(d.symbol);
+      if (stated === undefined) terms.push(d.symbol);
       else {
-        const weight = areaWeight(context, diaphragm, q, `q_${i}`);
-        terms.push(`${weight.symbol}·${d.symbol}`);
-        values.push(weight);
+        const weight = areaWeight(context, inertia, stated, `q_${i}`);
+        terms.push(`${weight.map(({ symbol }) => symbol).join('·')}·${d.symbol}`);
+        values.push(...weight);
       }
       values.push(d);
     }
     return steps.add(steps.fresh(`w_${end}`), terms.join(' + '), values, perLength, { what: `at s = ${round(s)}` });
   };
-  const depthsAt = (s: number): Map<number, number> => {
-    const depths = new Map<number, number>();
+  const depthsAt = (s: number): Map<string, Depth> => {
+    const depths = new Map<string, Depth>();
     const part = (s - slab.from) / (slab.to - slab.from);
-    for (const { area, lower0, lower1, upper0, upper1 } of slab.strips) {
-      if (weighs && area === 0) continue;
-      const depth = (upper0 - lower0) * (1 - part) + (upper1 - lower1) * part;
-      depths.set(weighs ? area : 0, (depths.get(weighs ? area : 0) ?? 0) + depth);
+    for (const strip of slab.strips) {
+      const depth = (strip.upper0 - strip.lower0) * (1 - part) + (strip.upper1 - strip.lower1) * part;
+      for (const weight of weighs ? weightsOf(strip, inertia.liveShare) : [undefined]) {
+        const key = weight === undefined ? '' : `${weight.of} ${weight.q}`;
+        depths.set(key, { weight, depth: (depths.get(key)?.depth ?? 0) + depth });
+      }
     }
     return depths;
   };
   const [near, far] = [depthsAt(from.value), depthsAt(to.value)];
   if (near.size === 0) return undefined;
-  const even = [...near].every(([q, d]) => Math.abs(d - (far.get(q) ?? 0)) <= 1e-12 * Math.abs(d));
+  const even = [...near].every(
+    ([key, { depth }]) => Math.abs(depth - (far.get(key)?.depth ?? 0)) <= 1e-12 * Math.abs(depth),
+  );
   const a = at(from.value, 'a', near);
   if (even) {
     const size = steps.add(steps.fresh('n'), `${a.symbol}·(s_b − s_a)`, [a, to, from], unit);
@@ -138,15 +144,6 @@ function slabPart(
   const size = steps.add(steps.fresh('n'), `(${a.symbol} + ${b.symbol})/2·(s_b − s_a)`, [a, b, to, from], unit);
   const centre = `s_a + (s_b − s_a)·(${a.symbol} + 2·${b.symbol})/(3·(${a.symbol} + ${b.symbol}))`;
   return { size, at: steps.add(steps.fresh('s'), centre, [from, to, a, b], length, { what: 'its centre' }) };
-}
-
-/** The diaphragm's own area weight, or that of the zone which has this one. */
-export function areaWeight(context: Context, { diaphragm, path }: DiaphragmModel, q: number, symbol: string): Value {
-  const unit = `${context.units.force}/${context.units.length}²`;
-  const zone = (diaphragm.weight?.zones ?? []).findIndex(({ area }) => area === q);
-  return q === diaphragm.weight?.area || zone < 0
-    ? fromFileOr(context, symbol, `${path}.weight.area`, 0, unit)
-    : fromFile(context, symbol, `${path}.weight.zones[${zone}].area`, unit);
 }
 
 /** Façades and partitions: along the cut at one place, across it over their length. */

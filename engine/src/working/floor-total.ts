@@ -3,7 +3,7 @@ import type { Inertia } from '../diaphragms/inertia.js';
 import type { Profile } from '../geometry/profile.js';
 import type { Demand } from '../path/result.js';
 import { fromFile, readOff, runOf, type Context } from './context.js';
-import { areaWeight } from './floor-parts.js';
+import { areaWeight, weightsOf, type AreaWeight } from './area-weight.js';
 import type { Steps, Value } from './steps.js';
 
 /** @param inertias how the level's force lies on each of the diaphragms that count */
@@ -12,7 +12,8 @@ export function totalStep(context: Context, inertias: readonly Inertia[], steps:
   const terms: string[] = [];
   const values: Value[] = [];
   const spread = inertias[0]?.spread ?? 'even';
-  for (const { diaphragm, frame, facade = [] } of inertias) {
+  for (const inertia of inertias) {
+    const { diaphragm, frame, facade = [] } = inertia;
     const profile = diaphragm.profiles[frame] as Profile;
     const outline = `${diaphragm.path}.outline`;
     if (spread === 'even') {
@@ -46,17 +47,17 @@ export function totalStep(context: Context, inertias: readonly Inertia[], steps:
       }
       continue;
     }
-    for (const [q, area] of areas(profile, spread)) {
+    for (const { weight: stated, area } of areas(profile, inertia)) {
       const i = values.length + 1;
       const a = readOff(context, `A_${i}`, outline, area, `${length}²`, 'floor area, less openings');
-      if (spread === 'area') {
+      if (stated === undefined) {
         terms.push(a.symbol);
         values.push(a);
         continue;
       }
-      const weight = areaWeight(context, diaphragm, q, `q_${i}`);
-      terms.push(`${weight.symbol}·${a.symbol}`);
-      values.push(weight, a);
+      const weight = areaWeight(context, inertia, stated, `q_${i}`);
+      terms.push(`${weight.map(({ symbol }) => symbol).join('·')}·${a.symbol}`);
+      values.push(...weight, a);
     }
     if (spread === 'area') continue;
     (diaphragm.diaphragm.weight?.lines ?? []).forEach((line, l) => {
@@ -92,15 +93,16 @@ export function levelInertias(context: Context, of: Pick<Demand, 'case'>, level:
 }
 
 /** Net area by area weight; all in one for `area`. */
-function areas(profile: Profile, spread: Inertia['spread']): Map<number, number> {
-  const sums = new Map<number, number>();
+function areas(profile: Profile, { spread, liveShare }: Inertia): { weight: AreaWeight | undefined; area: number }[] {
+  const sums = new Map<string, { weight: AreaWeight | undefined; area: number }>();
   for (const slab of profile.slabs) {
     for (const strip of slab.strips) {
-      if (spread === 'weight' && strip.area === 0) continue;
-      const key = spread === 'weight' ? strip.area : 0;
       const area = ((strip.upper0 - strip.lower0 + strip.upper1 - strip.lower1) / 2) * (slab.to - slab.from);
-      sums.set(key, (sums.get(key) ?? 0) + area);
+      for (const weight of spread === 'weight' ? weightsOf(strip, liveShare) : [undefined]) {
+        const key = weight === undefined ? '' : `${weight.of} ${weight.q}`;
+        sums.set(key, { weight, area: (sums.get(key)?.area ?? 0) + area });
+      }
     }
   }
-  return sums;
+  return [...sums.values()];
 }

@@ -70,7 +70,7 @@ function densityOf(inertia: Inertia, profile: Profile): (s: number, t: number) =
     const perDepth = depth > 0 ? 1 / depth : 0;
     const own =
       spread === 'weight'
-        ? weightAt(slab, s, t)
+        ? weightAt(slab, s, t, inertia.liveShare)
         : spread === 'area'
           ? 1
           : perDepth * (inertia.facade === undefined ? 1 : loadAt(inertia.facade, s));
@@ -96,7 +96,7 @@ function slabAt({ slabs }: Profile, s: number): Slab | undefined {
 }
 
 /** Area weight at a place; on the edge of the floor that of the nearest strip. */
-function weightAt(slab: Slab, s: number, t: number): number {
+function weightAt(slab: Slab, s: number, t: number, liveShare: number): number {
   const part = (s - slab.from) / (slab.to - slab.from);
   let nearest = Infinity;
   let weight = 0;
@@ -106,7 +106,7 @@ function weightAt(slab: Slab, s: number, t: number): number {
     const off = Math.max(lower - t, t - upper, 0);
     if (off < nearest) {
       nearest = off;
-      weight = strip.area;
+      weight = strip.area + liveShare * strip.live;
     }
   }
   return weight;

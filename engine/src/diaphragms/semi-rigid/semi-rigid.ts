@@ -81,7 +81,7 @@ function ofInertia(body: SemiRigidBody, inertia: Inertia): { unit: UnitResponse;
   const width = profile.to - profile.from;
   const centre = inertia.centre - inertia.offset;
   const shape = inertia.facade === undefined ? '' : JSON.stringify(inertia.facade);
-  const key = `${inertia.frame} ${inertia.spread} ${inertia.perUnit} ${shape}`;
+  const key = `${inertia.frame} ${inertia.spread} ${inertia.perUnit} ${inertia.liveShare} ${shape}`;
   const at = (offset: number): UnitResponse =>
     solvedOnce(body, `${key} ${offset === 0 ? 'centred' : 'shifted'}`, () =>
       inertiaLoad(body.model, { ...inertia, offset, centre: centre + offset }),

@@ -5,6 +5,7 @@ import type { Result } from '../../building/fault.js';
 import type { LevelForce } from '../level-forces.js';
 import { noWeight, weighedLevels } from '../seismic-weight.js';
 import { metresPer } from '../units.js';
+import { liveShareOf } from './live-share.js';
 import { baseShear, verticalDistribution } from './lateral-force.js';
 
 /**
@@ -12,7 +13,7 @@ import { baseShear, verticalDistribution } from './lateral-force.js';
  * @returns levels above the base, ascending [force]
  */
 export function lateralForces(building: Building, basis: EnSeismic, caseId: string): Result<readonly LevelForce[]> {
-  const levels = weighedLevels(building);
+  const levels = weighedLevels(building, liveShareOf(basis)); // EN 1998-1 3.2.4(2)
   const total = levels.reduce((sum, level) => sum + level.weight, 0);
   if (!(total > 0)) return noWeight(caseId);
   const heightM = (levels[levels.length - 1]?.height ?? 0) * metresPer(building.units);
