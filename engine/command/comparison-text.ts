@@ -23,6 +23,9 @@ export function comparisonText(comparison: Comparison): string {
     .map(({ change }) => change);
   return [
     `Edits\n${comparison.edits.length === 0 ? 'none\n' : comparison.edits.map((edit) => `${edit.id}  ${edit.what}\n`).join('')}`,
+    comparison.matches === undefined
+      ? ''
+      : `Known again by place: ${comparison.matches.map(({ kind, before, after: now }) => `${kind} ${before} is ${now}`).join(', ')}\n`,
     comparison.method?.kind === 'sampled'
       ? `Shares are sampled: ${comparison.method.pairs} pairs of orders, seed ${comparison.method.seed}; the standard error stands behind ±\n`
       : '',

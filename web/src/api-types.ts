@@ -4914,6 +4914,12 @@ export interface operations {
                                 [key: string]: unknown;
                             }[];
                         }[];
+                        /** @description Members whose ids changed and that were known again by their place */
+                        matches?: {
+                            kind: string;
+                            before: string;
+                            after: string;
+                        }[];
                         /** @description How the causes were found */
                         method?: {
                             /** @constant */

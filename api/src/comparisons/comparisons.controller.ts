@@ -19,6 +19,10 @@ const CompareQuery = z.object({
 const ComparisonView = z.object({
   schema: z.literal('groundward.comparison/1'),
   edits: z.array(z.object({ id: z.string(), what: z.string(), patch: z.array(z.record(z.string(), z.unknown())) })),
+  matches: z
+    .array(z.object({ kind: z.string(), before: z.string(), after: z.string() }))
+    .optional()
+    .describe('Members whose ids changed and that were known again by their place'),
   method: z
     .discriminatedUnion('kind', [
       z.object({ kind: z.literal('exact') }),

@@ -3,9 +3,9 @@ import type { Building } from '../building/definition.js';
 import { readBuilding } from '../building/read.js';
 import { analyse } from '../path/analyse.js';
 import type { Analysis } from '../path/result.js';
-import { compare, keyOf, type Compared, type Tolerance } from './compare.js';
+import { compare, keyOf, underSameIds, type Compared, type Tolerance } from './compare.js';
 import { changesNothing, editGroups } from './edit-groups.js';
-import { editsOf } from './edits.js';
+import { editsOf, renamingEdits } from './edits.js';
 import { makeEdit } from './make-edit.js';
 import { memberEdits, type MemberEdit } from './member-edits.js';
 import type { Cause, Comparison } from './result.js';
@@ -24,10 +24,11 @@ const ROUNDING = 1e-12;
  * @returns the comparison whose shares add up to `after − before`, null counted as 0
  */
 export function compareWithCauses(
-  before: Compared,
+  earlierIds: Compared,
   after: Compared,
   options: { readonly tolerance?: Tolerance; readonly pairs?: number } = {},
 ): Comparison {
+  const { before, matches } = underSameIds(earlierIds, after.building);
   const plain = compare(before, after, options.tolerance);
   const changed = plain.changes.filter((change) => change.class !== 'unchanged');
   const rowOf = new Map(changed.map((change, row) => [keyOf(change), row]));
@@ -65,8 +66,9 @@ export function compareWithCauses(
       };
       return {
         ...plain,
-        edits: editsOf(before.building, listed),
+        edits: [...renamingEdits(earlierIds.building, before.building), ...editsOf(before.building, listed)],
         method,
+        ...(matches.length === 0 ? {} : { matches }),
         changes: plain.changes.map((change) => {
           const row = rowOf.get(keyOf(change));
           return row === undefined ? change : { ...change, causes: causes(row) };

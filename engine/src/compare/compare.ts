@@ -1,7 +1,9 @@
 /** What changed between two buildings: every demand before and after, and the edits that lie between. */
 import type { Building } from '../building/definition.js';
 import type { Analysis, Demand } from '../path/result.js';
-import { editsBetween } from './edits.js';
+import { analyse } from '../path/analyse.js';
+import { editsBetween, renamingEdits } from './edits.js';
+import { matchByPlace, type Match } from './match-by-place.js';
 import type { Change, ChangeClass, Comparison } from './result.js';
 
 export type Compared = { readonly building: Building; readonly analysis: Analysis };
@@ -15,7 +17,8 @@ const DEFAULT: Tolerance = { relative: 1e-3, absolute: 1e-9 };
  * @param tolerance default: 0.1 % of the larger value, or 1e-9 of the unit
  * @returns changes in the order of the later analysis, then what is gone in the order of the earlier one
  */
-export function compare(before: Compared, after: Compared, tolerance: Tolerance = DEFAULT): Comparison {
+export function compare(earlierIds: Compared, after: Compared, tolerance: Tolerance = DEFAULT): Comparison {
+  const { before, matches } = underSameIds(earlierIds, after.building);
   const earlier = new Map(before.analysis.demands.map((row) => [keyOf(row), row]));
   const changes: Change[] = [];
   for (const row of after.analysis.demands) {
@@ -25,7 +28,27 @@ export function compare(before: Compared, after: Compared, tolerance: Tolerance 
     changes.push(changeOf(known, row, tolerance));
   }
   for (const row of earlier.values()) changes.push(changeOf(row, undefined, tolerance));
-  return { schema: 'groundward.comparison/1', edits: editsBetween(before.building, after.building), changes };
+  return {
+    schema: 'groundward.comparison/1',
+    edits: [...renamingEdits(earlierIds.building, before.building), ...editsBetween(before.building, after.building)],
+    ...(matches.length === 0 ? {} : { matches }),
+    changes,
+  };
+}
+
+/**
+ * The earlier building under the later one’s ids, where members are known again by their place. No force depends on an id: its analysis
+ * is the same but for the names.
+ */
+export function underSameIds(
+  before: Compared,
+  after: Building,
+): { readonly before: Compared; readonly matches: readonly Match[] } {
+  const { building, matches } = matchByPlace(before.building, after);
+  if (matches.length === 0) return { before, matches };
+  const analysis = analyse(building);
+  // Another id can make no fault; if it did, the ids that were stay.
+  return analysis.ok ? { before: { building, analysis: analysis.value }, matches } : { before, matches: [] };
 }
 
 /** What makes two rows the same demand. */

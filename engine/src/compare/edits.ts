@@ -1,5 +1,5 @@
 /** The edits between two building files: what an engineer would call one change each, as RFC 6902 patches. */
-import { applyPatch } from 'rfc6902';
+import { applyPatch, type Operation } from 'rfc6902';
 import type { Building } from '../building/definition.js';
 import { editGroups, groupSentence } from './edit-groups.js';
 import { makeEdit } from './make-edit.js';
@@ -21,6 +21,21 @@ export function editsOf(before: Building, groups: readonly (readonly MemberEdit[
     what: groupSentence(group),
     patch: group.flatMap((edit) => makeEdit(document, edit)),
   }));
+}
+
+/** Ids that members known again by their place take over: one edit ahead of all others, or none. */
+export function renamingEdits(before: Building, renamed: Building): Edit[] {
+  if (before === renamed) return [];
+  const patch: Operation[] = [];
+  const visit = (a: unknown, b: unknown, path: string): void => {
+    if (typeof b === 'string' && a !== b) patch.push({ op: 'replace', path, value: b });
+    if (a === null || b === null || typeof a !== 'object' || typeof b !== 'object') return;
+    for (const [key, value] of Object.entries(b)) {
+      visit((a as Record<string, unknown>)[key], value, `${path}/${key.replaceAll('~', '~0').replaceAll('/', '~1')}`);
+    }
+  };
+  visit(before, renamed, '');
+  return [{ id: 'ids', what: 'ids changed; their members were known again by their place', patch }];
 }
 
 /** Applies edits to a building file; used to check that they tell the whole difference. */

@@ -1,5 +1,6 @@
 /** What changed between two buildings, `groundward.comparison/1`. */
 import type { Operation } from 'rfc6902';
+import type { Match } from './match-by-place.js';
 import type { Method } from './shapley.js';
 import type { DemandKind, Quantity, Sense } from '../path/result.js';
 
@@ -40,6 +41,8 @@ export type Edit = {
 export type Comparison = {
   readonly schema: 'groundward.comparison/1';
   readonly edits: readonly Edit[];
+  /** Members whose ids changed and that were known again by their place: the edits and changes are under their later ids. */
+  readonly matches?: readonly Match[];
   /** How the causes were found; absent where they were not asked for. */
   readonly method?: Method;
   readonly changes: readonly Change[];
