@@ -23,7 +23,8 @@ export default defineConfig({
           environment: 'node',
           include: ['engine/{src,command}/**/*.test.ts', 'web/**/*.test.{ts,tsx}', 'test/**/*.test.ts'],
           exclude: ['**/node_modules/**', '**/dist/**', '**/.next/**', ...slow],
-          testTimeout: 30_000,
+          // Seconds on a machine of their own; a shared one may take its time.
+          testTimeout: 180_000,
         },
       },
       {
@@ -34,8 +35,8 @@ export default defineConfig({
           environment: 'node',
           include: slow,
           exclude: ['**/node_modules/**', '**/dist/**'],
-          testTimeout: 120_000,
-          hookTimeout: 180_000,
+          testTimeout: 240_000,
+          hookTimeout: 240_000,
         },
       },
     ],
