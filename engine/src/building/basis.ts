@@ -10,10 +10,23 @@ export const AsceSeismic = z.strictObject({
   TL: Positive.optional().describe('Long-period transition [s]; default 8'),
   R: Positive,
   overstrength: Positive.optional().describe('Ω₀; default 1'),
+  reduceOverstrength: z
+    .boolean()
+    .optional()
+    .describe('Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false'),
+  lightFrame: z
+    .boolean()
+    .optional()
+    .describe('Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false'),
   Cd: Positive.optional().describe('Default R'),
   importance: Positive.optional().describe('Iₑ; default 1'),
   redundancy: z.number().min(1).max(1.3).optional().describe('ρ; default 1'),
-  designCategory: z.enum(['A', 'B', 'C', 'D', 'E', 'F']).optional(),
+  designCategory: z
+    .enum(['A', 'B', 'C', 'D', 'E', 'F'])
+    .optional()
+    .describe(
+      'Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it',
+    ),
   period: Positive.optional().describe('T [s]; default the approximate period Cₜ hₙˣ'),
   Ct: Positive.optional().describe('Cₜ for hₙ in feet; default 0.02'),
   x: Positive.optional().describe('Default 0.75'),

@@ -63,6 +63,50 @@ export function axialAlong(flows: readonly Flow[], tolerance: number): Axial {
   return { points, closing, scale };
 }
 
+/**
+ * The sum of axial forces along one line, each with its factor, at every place where one of them bends or jumps.
+ *
+ * @param parts an absent one is zero throughout
+ */
+export function axialSum(
+  parts: readonly { readonly axial: Axial | undefined; readonly factor: number }[],
+  tolerance: number,
+): AxialPoint[] {
+  const there = parts.flatMap(({ axial, factor }) => (axial === undefined ? [] : [{ points: axial.points, factor }]));
+  const places = there.flatMap(({ points }) => points.map(({ t }) => t)).sort((a, b) => a - b);
+  const out: AxialPoint[] = [];
+  let last = -Infinity;
+  for (const t of places) {
+    if (t - last <= tolerance) continue;
+    last = t;
+    let before = 0;
+    let after = 0;
+    for (const { points, factor } of there) {
+      const limits = limitsAt(points, t, tolerance);
+      before += factor * limits.before;
+      after += factor * limits.after;
+    }
+    out.push({ t, axial: before });
+    if (after !== before) out.push({ t, axial: after });
+  }
+  return out;
+}
+
+function limitsAt(points: readonly AxialPoint[], t: number, tolerance: number): { before: number; after: number } {
+  const next = points.findIndex((point) => point.t >= t - tolerance);
+  const here = points[next];
+  if (here === undefined) return { before: 0, after: 0 };
+  if (here.t > t + tolerance) {
+    const previous = points[next - 1];
+    if (previous === undefined) return { before: 0, after: 0 };
+    const axial = previous.axial + ((here.axial - previous.axial) * (t - previous.t)) / (here.t - previous.t);
+    return { before: axial, after: axial };
+  }
+  let last = next;
+  while ((points[last + 1]?.t ?? Infinity) <= t + tolerance) last += 1;
+  return { before: here.axial, after: (points[last] as AxialPoint).axial };
+}
+
 /** A force that goes evenly into the floor's cut. */
 export function flowsOver(intervals: readonly Interval[], force: number): Flow[] {
   const length = totalLength(intervals);

@@ -1,7 +1,7 @@
 /** Load combinations as factors on components. */
 import type { Building, GravityCase, LoadCase } from '../building/definition.js';
 import type { Combinations } from '../building/combination.js';
-import { asceCombinations } from './asce7/combinations.js';
+import { asceCombinations, overstrengthCombinations } from './asce7/combinations.js';
 import { basisOf, isAsce } from './basis-of.js';
 import { en1990Combinations } from './en1990/combinations.js';
 
@@ -17,6 +17,19 @@ export type FactoredCombination = {
 /** The combinations that a load case enters: of the set of its basis, or of the file's where the basis names none. */
 export function combinationsFor(building: Building, loadCase: LoadCase): readonly FactoredCombination[] {
   return setOf(building, loadCase).filter(({ applies }) => applies === loadCase.kind);
+}
+
+/** The forms with overstrength of the combinations that a load case enters; none where the set is the file's own list. */
+export function overstrengthFor(
+  building: Building,
+  loadCase: LoadCase,
+  factor: number,
+): readonly FactoredCombination[] {
+  const basis = basisOf(building, loadCase);
+  const named = basis?.combinations ?? building.combinations;
+  if (!isAsce(basis) || basis.seismic === undefined || loadCase.kind !== 'seismic') return [];
+  if (named === undefined || typeof named !== 'string' || named === 'EN 1990') return [];
+  return overstrengthCombinations(named, basis.seismic, factor);
 }
 
 /** Combinations of gravity alone: of every set that a load case takes, each once. */

@@ -4,6 +4,7 @@ import type { Fault, Result } from '../building/fault.js';
 import { unitVector } from '../geometry/frame.js';
 import type { LoadPiece } from '../statics/span-load.js';
 import { equivalentLateralForces } from './asce7/level-forces.js';
+import type { DiaphragmForce } from './asce7/equivalent-lateral-force.js';
 import { windOn } from './asce7/wind-forces.js';
 import { basisOf, isAsce } from './basis-of.js';
 import { lateralForces } from './en1998/level-forces.js';
@@ -14,6 +15,8 @@ export type LevelForce = {
   readonly force: number;
   /** Diaphragm design force [force] */
   readonly diaphragmForce: number;
+  /** What the diaphragm design force was chosen from, where a basis gave it. */
+  readonly limits?: DiaphragmForce;
   /** How the force lies along s of the case's frame where it does not follow the weight: wind on a façade [force/length] */
   readonly line?: readonly LoadPiece[];
 };

@@ -1,9 +1,10 @@
 /** The analysis of a building: from its file to demands, diagrams, path, findings and certificate. */
-import type { Building } from '../building/definition.js';
+import type { Building, LoadCase } from '../building/definition.js';
 import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
+import type { SeismicRules } from '../loads/asce7/overstrength.js';
 import { basisFindings } from '../loads/basis-findings.js';
-import { combinationsFor, gravityCombinations } from '../loads/combinations.js';
+import { combinationsFor, gravityCombinations, overstrengthFor } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { bodiesOf, type Bodies } from './bodies.js';
 import { subCases } from './cases.js';
@@ -22,9 +23,11 @@ import { planFindings, postFindings, torsionFindings } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
 import { levelDemands } from './level-demands.js';
 import { buildModel, type Model } from './model.js';
+import { requirementFindings, requirementsOf, type Requirements } from './requirements.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { descendAll, runCase, type CaseRun } from './run.js';
 import { checkMembranes, semiRigidFindings } from './semi-rigid-findings.js';
+import { supportingOf, type Supporting } from './supporting.js';
 import { unitNames, type Table } from './table.js';
 import { lineDemands, pierEndDemands, supportDemands, type LateralComponent } from './wall-demands.js';
 
@@ -49,6 +52,11 @@ export type Prepared = {
   readonly runs: readonly CaseRun[];
   readonly combined: readonly CombinedRun[];
   readonly descent: PostDescent;
+  /** Of the plan, then of torsion: what irregularities are read from. */
+  readonly irregular: readonly Finding[];
+  readonly requirements: Requirements;
+  /** What stands under walls that stop. */
+  readonly supporting: Supporting;
 };
 
 /** @throws Refusal where no stable path is found */
@@ -58,17 +66,27 @@ export function prepare(building: Building): Prepared {
   const bodies = bodiesOf(model);
   const runs = subCases(building, model).map((subCase) => runCase(model, bodies, subCase));
   const combined = combinedRuns(building, model, runs);
-  return { building, model, bodies, runs, combined, descent: descendAll(model, [...runs, ...combined]) };
+  const descent = descendAll(model, [...runs, ...combined]);
+  const irregular = [
+    ...planFindings(model, bodies, new Set(runs.map(({ subCase }) => subCase.frame))),
+    ...runs.flatMap((run) => torsionFindings(run)),
+  ];
+  const requirements = requirementsOf(building, model, irregular, descent);
+  const supporting = supportingOf(descent);
+  return { building, model, bodies, runs, combined, descent, irregular, requirements, supporting };
 }
 
 /** @throws Refusal where the certificate is above its bound */
-export function analysisOf({ building, model, bodies, runs, combined, descent }: Prepared): Analysis {
-  const cases = runs.map((run) => run.subCase);
+export function analysisOf(prepared: Prepared): Analysis {
+  const { building, model, bodies, runs, combined, descent, irregular, requirements, supporting } = prepared;
   const table: Table = { rows: [], units: unitNames(building) };
   const diagrams: Diagram[] = [];
   const graph = emptyGraph();
   const ledger: Ledger = new Map();
-  const findings: Finding[] = planFindings(model, bodies, new Set(cases.map((subCase) => subCase.frame)));
+  const findings: Finding[] = [
+    ...irregular,
+    ...requirementFindings(building, requirements, supporting.feet.size + supporting.columns.size > 0),
+  ];
   findings.push(...basisFindings(building));
   for (const run of runs) {
     const { subCase } = run;
@@ -76,9 +94,8 @@ export function analysisOf({ building, model, bodies, runs, combined, descent }:
     for (let i = model.levels.length - 1; i > 0; i--) {
       const outcome = run.outcomes[i];
       if (outcome === undefined) continue;
-      diaphragmDemands(table, diagrams, ledger, model, bodies, run, outcome);
+      diaphragmDemands(table, diagrams, ledger, model, bodies, run, outcome, requirements.get(subCase.loadCase.id));
     }
-    findings.push(...torsionFindings(run));
     lineDemands(table, model, run.outcomes, subCase.id);
     checkLevels(ledger, model, run.outcomes, subCase.id);
     checkBase(ledger, model, run.outcomes, subCase.id);
@@ -103,11 +120,13 @@ export function analysisOf({ building, model, bodies, runs, combined, descent }:
     id,
     component: GRAVITY.length + c,
     combinations: combinationsFor(building, loadCase),
+    overstrength: overstrengthOf(building, loadCase, requirements.get(loadCase.id)),
   }));
-  pierEndDemands(table, descent, lateral);
+  pierEndDemands(table, descent, supporting, lateral);
   supportDemands(
     table,
     descent,
+    supporting,
     (foot, component) => {
       const run = carried[component - GRAVITY.length];
       return (run?.outcomes[1]?.below[foot.line.index]?.[0] ?? 0) * foot.pier.share;
@@ -144,6 +163,10 @@ export function analysisOf({ building, model, bodies, runs, combined, descent }:
     findings,
     certificate,
   };
+}
+
+function overstrengthOf(building: Building, loadCase: LoadCase, rules: SeismicRules | undefined) {
+  return rules === undefined ? [] : overstrengthFor(building, loadCase, rules.overstrength);
 }
 
 /** What the file may state and this engine does not answer yet is refused, never replaced. */

@@ -2,6 +2,7 @@
 import type { Building, PlainCase } from '../building/definition.js';
 import { Refusal } from '../building/refusal.js';
 import { dot, unitVector } from '../geometry/frame.js';
+import type { DiaphragmForce } from '../loads/asce7/equivalent-lateral-force.js';
 import { levelForces } from '../loads/level-forces.js';
 import type { Spread } from '../diaphragms/inertia.js';
 import { basisOf, isAsce, liveShare } from '../loads/basis-of.js';
@@ -26,6 +27,8 @@ export type SubCase = {
   /** Storey force and diaphragm design force by level index [force] */
   readonly storeyForce: readonly number[];
   readonly diaphragmForce: readonly number[];
+  /** What the diaphragm design forces were chosen from, by level index, where a basis gave them [force] */
+  readonly diaphragmLimits?: readonly (DiaphragmForce | undefined)[];
   /** Load along s by level index where it lies along a façade [force/length] */
   readonly facade?: readonly (readonly LoadPiece[])[];
 };
@@ -40,12 +43,14 @@ export function subCases(building: Building, model: Model): SubCase[] {
     if (!stated.ok) throw new Refusal(stated.faults);
     const storeyForce = model.levels.map(() => 0);
     const diaphragmForce = model.levels.map(() => 0);
+    const diaphragmLimits: (DiaphragmForce | undefined)[] = model.levels.map(() => undefined);
     const facade: (readonly LoadPiece[])[] = model.levels.map(() => []);
     for (const entry of stated.value) {
       const level = model.levels.find((candidate) => candidate.id === entry.level);
       if (level === undefined) continue;
       storeyForce[level.index] = entry.force;
       diaphragmForce[level.index] = entry.diaphragmForce;
+      diaphragmLimits[level.index] = entry.limits;
       if (entry.line !== undefined) facade[level.index] = entry.line;
     }
     const t = model.frames[frame]?.t ?? direction;
@@ -61,6 +66,7 @@ export function subCases(building: Building, model: Model): SubCase[] {
       amplified: false,
       storeyForce,
       diaphragmForce,
+      diaphragmLimits,
       ...(windFromBasis(loadCase) ? { facade } : {}),
     };
     if (windFromBasis(loadCase)) return windCases(building, model, whole);

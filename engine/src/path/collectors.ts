@@ -143,12 +143,7 @@ export function collectorDemands(
   level: string,
   caseId: string,
 ): CollectorDiagram[] {
-  const sorted = [...collector.lines].sort((a, b) => middle(a) - middle(b));
-  return sorted.map((line, i) => {
-    const previous = sorted[i - 1];
-    const next = sorted[i + 1];
-    const low = previous === undefined ? -Infinity : (end(previous) + start(line)) / 2;
-    const high = next === undefined ? Infinity : (end(line) + start(next)) / 2;
+  return rangesOf(collector.lines).map(({ line, low, high }) => {
     const points = collector.axial.points.filter(({ t }) => t >= low && t <= high);
     let tension = { t: start(line), axial: 0 };
     let compression = tension;
@@ -178,6 +173,20 @@ export function collectorDemands(
     const diagram = points.map(({ t, axial }) => ({ at: distanceAt(line, t), axial }));
     if (line.sign < 0) diagram.reverse();
     return { kind: 'collector', member, level, line: line.line.id, case: caseId, points: diagram };
+  });
+}
+
+/** The lines of a plane, each with the stretch that is nearer to it than to its neighbours. */
+export function rangesOf(lines: readonly LineModel[]): { line: LineModel; low: number; high: number }[] {
+  const sorted = [...lines].sort((a, b) => middle(a) - middle(b));
+  return sorted.map((line, i) => {
+    const previous = sorted[i - 1];
+    const next = sorted[i + 1];
+    return {
+      line,
+      low: previous === undefined ? -Infinity : (end(previous) + start(line)) / 2,
+      high: next === undefined ? Infinity : (end(line) + start(next)) / 2,
+    };
   });
 }
 

@@ -1,19 +1,22 @@
 /** The diaphragm design set of a level: inner forces, chords, openings and collectors. */
-import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
 import { supportsOf } from '../diaphragms/flexible.js';
-import { innerForces, shearAt, type InnerForces } from '../diaphragms/inner-forces.js';
+import { shearAt, type InnerForces } from '../diaphragms/inner-forces.js';
 import { totalLength } from '../geometry/profile.js';
+import type { SeismicRules } from '../loads/asce7/overstrength.js';
 import type { Bodies } from './bodies.js';
 import { enter, type Ledger } from './certificate.js';
-import { clip, collectorDemands, collectorsOf } from './collectors.js';
-import { throughLevel, type LevelOutcome } from './descent.js';
+import { collectorDesign } from './collector-design.js';
+import { clip, collectorDemands, collectorsOf, type CollectorLine } from './collectors.js';
+import type { LevelOutcome } from './descent.js';
+import { designSet } from './design-set.js';
+import { innerByFrame } from './inner-by-frame.js';
 import type { Model } from './model.js';
 import { openingDemands } from './opening-demands.js';
 import type { Diagram } from './result.js';
-import { pushedBy, type CaseRun } from './run.js';
+import type { CaseRun } from './run.js';
 import { diaphragmDiagram, spanDemands, spansOf, type SpanRange } from './span-demands.js';
 import { stepDemands } from './step-demands.js';
-import type { Table } from './table.js';
+import { addGoverned, type Table } from './table.js';
 
 export function diaphragmDemands(
   table: Table,
@@ -23,38 +26,22 @@ export function diaphragmDemands(
   bodies: Bodies,
   run: CaseRun,
   storey: LevelOutcome,
+  rules: SeismicRules | undefined,
 ): void {
   const { subCase } = run;
   const { level } = storey;
-  const same = subCase.diaphragmForce[level.index] === subCase.storeyForce[level.index];
-  const outcome = same
-    ? storey
-    : throughLevel(
-        model,
-        bodies,
-        level,
-        storey.above,
-        pushedBy(run.inertias(level), subCase.diaphragmForce, level, subCase.sign),
-        1,
-      );
-  const inner = new Map<DiaphragmModel, Map<number, InnerForces>>();
+  const outcome = designSet(model, bodies, run, storey, rules);
+  const inner = innerByFrame(outcome, subCase.frame);
   for (const { diaphragm, pushed, given, taken, rigid } of outcome.diaphragms) {
-    const frames = new Set([subCase.frame]);
-    if (rigid === undefined) for (const [line, force] of taken) if (force[0] !== 0) frames.add(line.family);
-    const byFrame = new Map<number, InnerForces>();
-    inner.set(diaphragm, byFrame);
-    for (const frame of frames) {
+    for (const [frame, forces] of inner.get(diaphragm) ?? []) {
       const factor = frame === subCase.frame ? (pushed.force[0] as number) : 0;
-      const load = {
-        pieces: factor === 0 ? [] : pushed.inertia.load.pieces.map((p) => ({ ...p, w: p.w.map((w) => w * factor) })),
-        points: factor === 0 ? [] : pushed.inertia.load.points.map((p) => ({ s: p.s, force: p.force * factor })),
-      };
-      const lines = [...new Set([...given.keys(), ...taken.keys()])]
-        .filter((line) => rigid !== undefined || line.family === frame)
-        .map((line) => ({ line, given: given.get(line)?.[0] ?? 0, taken: taken.get(line)?.[0] ?? 0 }));
-      const forces = innerForces(diaphragm, frame, load, lines);
-      byFrame.set(frame, forces);
-      const scale = lines.reduce((sum, { given: g, taken: t }) => sum + Math.abs(g) + Math.abs(t), Math.abs(factor));
+      const lines = [...new Set([...given.keys(), ...taken.keys()])].filter(
+        (line) => rigid !== undefined || line.family === frame,
+      );
+      const scale = lines.reduce(
+        (sum, line) => sum + Math.abs(given.get(line)?.[0] ?? 0) + Math.abs(taken.get(line)?.[0] ?? 0),
+        Math.abs(factor),
+      );
       if (scale === 0) continue;
       const where = `${diaphragm.key}, case ${subCase.id}`;
       enter(ledger, 'diaphragm: shear closes', where, forces.closingShear, scale);
@@ -92,10 +79,41 @@ export function diaphragmDemands(
       sign: (frame) => (frame === subCase.frame ? subCase.sign : 1),
     });
   }
-  for (const collector of collectorsOf(model, outcome, inner)) {
+  const collectors = collectorsOf(model, outcome, inner);
+  for (const collector of collectors) {
     const where = `collector ${level.id}/${collector.lines.map((line) => line.line.id).join('+')}, case ${subCase.id}`;
     enter(ledger, 'collector: closes', where, collector.axial.closing, collector.axial.scale);
     diagrams.push(...collectorDemands(table, collector, level.id, subCase.id));
+  }
+  if (rules === undefined) return;
+  collectorDesign(table, model, bodies, run, storey, collectors, rules);
+  if (rules.connections > 1) connectionDemands(table, outcome, collectors, subCase.id, rules);
+}
+
+/** What the floor hands to each line of walls, raised where irregularities ask for it. */
+function connectionDemands(
+  table: Table,
+  outcome: LevelOutcome,
+  collectors: readonly CollectorLine[],
+  caseId: string,
+  rules: SeismicRules,
+): void {
+  for (const line of collectors.flatMap(({ lines }) => lines)) {
+    let force = 0;
+    for (const { given, taken } of outcome.diaphragms)
+      force += (given.get(line)?.[0] ?? 0) - (taken.get(line)?.[0] ?? 0);
+    if (force === 0) continue;
+    const row = {
+      member: `${outcome.level.id}/${line.line.id}`,
+      kind: 'collector' as const,
+      quantity: 'connection-force' as const,
+      case: caseId,
+      value: rules.connections * Math.abs(force),
+      unit: table.units.force,
+    };
+    const governs = `${rules.connections}·F_px (12.3.3.4)`;
+    addGoverned(table, row, 1, governs);
+    addGoverned(table, row, -1, governs);
   }
 }
 

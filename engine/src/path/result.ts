@@ -39,6 +39,9 @@ export const Quantity = z.enum([
   'corner-force',
   'axial-tension',
   'axial-compression',
+  'design-tension',
+  'design-compression',
+  'connection-force',
   'reaction',
   'end-tension',
   'end-compression',
@@ -63,6 +66,7 @@ export const Demand = z.strictObject({
   value: z.number(),
   unit: z.string(),
   at: Point.optional().describe('Place on plan where the value occurs [length]'),
+  governs: z.string().optional().describe('The rule that governed it, where several compete'),
 });
 
 export const SpanPiece = z.strictObject({

@@ -33,6 +33,13 @@ export function addRow(table: Table, row: Row, sense: Sense, combination?: strin
   put(table, member, kind, quantity, row.case, sense, row.value, unit, at, combination);
 }
 
+/** One row that names the rule which governed it. */
+export function addGoverned(table: Table, row: Row, sense: Sense, governs: string): void {
+  const { member, kind, quantity, unit, at, value } = row;
+  const head = { member, kind, quantity, case: row.case, sense, value: value === 0 ? 0 : value, unit };
+  table.rows.push(at === undefined ? { ...head, governs } : { ...head, at, governs });
+}
+
 /** One row from its columns: the way for rows by the ten thousand, without a record in between. */
 export function put(
   table: Table,

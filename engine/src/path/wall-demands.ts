@@ -6,6 +6,7 @@ import type { Point } from '../building/definition.js';
 import type { LevelOutcome } from './descent.js';
 import type { Model } from './model.js';
 import type { Quantity, Sense } from './result.js';
+import type { Supporting } from './supporting.js';
 import { put, type Table } from './table.js';
 
 const SENSES: readonly Sense[] = [1, -1];
@@ -15,6 +16,8 @@ export type LateralComponent = {
   readonly id: string;
   readonly component: number;
   readonly combinations: readonly FactoredCombination[];
+  /** The combinations with overstrength, for what stands under walls that stop. */
+  readonly overstrength: readonly FactoredCombination[];
 };
 
 /** Reaction, accumulated shear and overturning moment of each line in the storey under a level. */
@@ -68,20 +71,26 @@ export function lineDemands(
 }
 
 /** End-post forces at the foot of every pier: the lateral component alone, and by combination. */
-export function pierEndDemands(table: Table, descent: PostDescent, lateral: readonly LateralComponent[]): void {
+export function pierEndDemands(
+  table: Table,
+  descent: PostDescent,
+  supporting: Supporting,
+  lateral: readonly LateralComponent[],
+): void {
   for (const storey of descent.feet) {
     for (const foot of storey) {
       const places: readonly [Point, Point] = [
         pointOn(foot.line, foot.pier.posts[0]),
         pointOn(foot.line, foot.pier.posts[1]),
       ];
-      for (const { id, component, combinations } of lateral) {
+      const carries = supporting.feet.has(foot);
+      for (const { id, component, combinations, overstrength } of lateral) {
         if (foot.near[component] === 0 && foot.far[component] === 0) continue;
         for (const sense of SENSES) {
           const a = (foot.near[component] as number) * sense;
           const b = (foot.far[component] as number) * sense;
           endRows(table, foot, places, id, sense, a, b);
-          for (const combination of combinations) {
+          for (const combination of carries ? [...combinations, ...overstrength] : combinations) {
             const near = factored(foot.near, combination, component, sense);
             const far = factored(foot.far, combination, component, sense);
             endRows(table, foot, places, id, sense, near, far, combination.id);
@@ -127,11 +136,13 @@ export function factored(
 export function supportDemands(
   table: Table,
   descent: PostDescent,
+  supporting: Supporting,
   shearAt: (foot: PierFeet, component: number) => number,
   lateral: readonly LateralComponent[],
   gravity: readonly FactoredCombination[],
 ): void {
   const { units } = table;
+  const raised = lateral.map((each) => ({ ...each, combinations: [...each.combinations, ...each.overstrength] }));
   for (const foot of descent.feet[1] ?? []) {
     const { line, pier } = foot;
     const member = `${line.line.id}/${pier.pier.id}`;
@@ -155,10 +166,12 @@ export function supportDemands(
         }
       }
     }
-    postDemands(table, `${member}/from`, pointOn(line, pier.posts[0]), foot.near, lateral, gravity);
-    postDemands(table, `${member}/to`, pointOn(line, pier.posts[1]), foot.far, lateral, gravity);
+    const own = supporting.feet.has(foot) ? raised : lateral;
+    postDemands(table, `${member}/from`, pointOn(line, pier.posts[0]), foot.near, own, gravity);
+    postDemands(table, `${member}/to`, pointOn(line, pier.posts[1]), foot.far, own, gravity);
   }
-  for (const column of descent.carried) postDemands(table, column.key, column.place, column.force, lateral, gravity);
+  for (const { key, place, force } of descent.carried)
+    postDemands(table, key, place, force, supporting.columns.has(key) ? raised : lateral, gravity);
 }
 
 function postDemands(

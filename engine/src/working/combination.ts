@@ -1,8 +1,14 @@
 /** The factors of a load combination as a working shows them. */
 import type { Building, GravityCase, LoadCase } from '../building/definition.js';
 import { publishedTerms, type Published } from '../loads/asce7/combinations.js';
+import type { SeismicRules } from '../loads/asce7/overstrength.js';
 import { isAsce } from '../loads/basis-of.js';
-import { combinationsFor, gravityCombinations, type FactoredCombination } from '../loads/combinations.js';
+import {
+  combinationsFor,
+  gravityCombinations,
+  overstrengthFor,
+  type FactoredCombination,
+} from '../loads/combinations.js';
 import { basisPlace } from './basis-path.js';
 import { carriedCase, fromFile, fromFileOr, type Context } from './context.js';
 import type { Steps, Value } from './steps.js';
@@ -34,15 +40,20 @@ export function factorsOf(context: Context, caseId: string, id: string, steps: S
   }
   if (named === undefined) throw new Error(`no combinations for ${loadCase.id}`);
   const clause = `${named}: ${id}`;
-  const combination = (run === undefined ? gravityCombinations(building) : combinationsFor(building, loadCase)).find(
-    (candidate) => candidate.id === id,
-  );
+  const rules = context.requirements.get(loadCase.id);
+  const raised = rules === undefined ? [] : overstrengthFor(building, loadCase, rules.overstrength);
+  const overstrength = raised.find((candidate) => candidate.id === id);
+  const combination =
+    overstrength ??
+    (run === undefined ? gravityCombinations(building) : combinationsFor(building, loadCase)).find(
+      (candidate) => candidate.id === id,
+    );
   if (combination === undefined) throw new Error(`no combination ${id}`);
   if (named === 'EN 1990') return literalFactors(combination, clause, steps);
   const terms = publishedTerms(named, id);
   if (terms === undefined) throw new Error(`no combination ${id} in ${named}`);
   const seismic = isAsce(place?.basis) && place.basis.seismic !== undefined ? `${place.path}.seismic` : undefined;
-  return asceFactors(context, terms, clause, seismic, steps);
+  return asceFactors(context, terms, clause, seismic, steps, overstrength === undefined ? undefined : rules);
 }
 
 /** A combination of gravity alone stands in the set of the first load case that has it. */
@@ -96,6 +107,7 @@ function asceFactors(
   clause: string,
   seismic: string | undefined,
   steps: Steps,
+  overstrength: SeismicRules | undefined,
 ): Factors {
   const gravity = new Map<GravityCase, Value>();
   for (const name of GRAVITY) {
@@ -116,7 +128,20 @@ function asceFactors(
   const what = 'factor on the lateral case';
   if (applies !== 'seismic') return { gravity, lateral: literal('f_W', lateral, what, clause, steps) };
   if (seismic === undefined) return { gravity, lateral: literal('f_E', lateral, what, clause, steps) };
+  if (overstrength !== undefined) {
+    const notes = { what: 'factor on the lateral case, with overstrength', clause: `${clause}; ASCE 7-16 Eq. 12.4-7` };
+    const factor = overstrengthValue(context, seismic, overstrength, steps);
+    return { gravity, lateral: steps.add('f_E', `${lateral}·Ω_0`, [factor], '1', notes) };
+  }
   const redundancy = fromFileOr(context, 'ρ', `${seismic}.redundancy`, 1, '1');
   const notes = { what, clause: `${clause}; ASCE 7-16 Eq. 12.4-3` };
   return { gravity, lateral: steps.add('f_E', `${lateral}·ρ`, [redundancy], '1', notes) };
+}
+
+/** Ω₀ of the file, less 0.5 where the basis takes it off for flexible diaphragms. */
+function overstrengthValue(context: Context, seismic: string, rules: SeismicRules, steps: Steps): Value {
+  const stated = fromFileOr(context, 'Ω_0', `${seismic}.overstrength`, 1, '1');
+  if (stated.value === rules.overstrength) return stated;
+  const notes = { what: 'overstrength with flexible diaphragms', clause: 'ASCE 7-16 Table 12.2-1, footnote b' };
+  return steps.add('Ω_0', 'Ω_t − 0.5', [{ ...stated, symbol: 'Ω_t' }], '1', notes);
 }

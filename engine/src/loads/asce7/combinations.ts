@@ -33,9 +33,33 @@ export function asceCombinations(set: AsceSet, seismic: AsceSeismic | undefined)
   }));
 }
 
-/** The terms of a published combination before a basis of design enters. */
+/**
+ * The set's seismic combinations with overstrength, E_m = Ω₀·Q_E ± 0.2·S_DS·D: `0.6D+0.7Em`, `1.2D+Em+L+0.2S`.
+ *
+ * Source: ASCE 7-16 12.4.3, 2.3.6 and 2.4.5; from memory, not checked against the document.
+ */
+export function overstrengthCombinations(
+  set: AsceSet,
+  seismic: AsceSeismic,
+  overstrength: number,
+): readonly FactoredCombination[] {
+  return asceCombinations(set, { ...seismic, redundancy: 1 }) // ASCE 7-16 12.3.4.1: ρ = 1 where Ω₀ is used
+    .filter(({ applies }) => applies === 'seismic')
+    .map((combination) => ({
+      ...combination,
+      id: withOverstrength(combination.id),
+      lateral: combination.lateral * overstrength, // ASCE 7-16 Eq. 12.4-7
+    }));
+}
+
+/** `0.6D+0.7E` → `0.6D+0.7Em` */
+function withOverstrength(id: string): string {
+  return id.replace(/E(?=\+|$)/, 'Em');
+}
+
+/** The terms of a published combination, or of its form with overstrength, before a basis of design enters. */
 export function publishedTerms(set: AsceSet, id: string): Published | undefined {
-  return SETS[set].find((candidate) => candidate.id === id);
+  return SETS[set].find((candidate) => candidate.id === id || withOverstrength(candidate.id) === id);
 }
 
 /** A factor as it stands in an id: 1 is not written. */

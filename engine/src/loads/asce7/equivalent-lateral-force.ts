@@ -86,6 +86,16 @@ export function verticalDistribution(levels: readonly WeighedLevel[], shear: num
   return moments.map((moment) => (total === 0 ? 0 : (shear * moment) / total));
 }
 
+/** A diaphragm's design force with what it lies between [force] */
+export type DiaphragmForce = {
+  /** F_px = (ΣF_i/Σw_i)·w_px, without floor and cap */
+  readonly inertial: number;
+  /** 0.2·S_DS·I_e·w_px */
+  readonly least: number;
+  /** 0.4·S_DS·I_e·w_px */
+  readonly most: number;
+};
+
 /**
  * Diaphragm design forces with their floor and cap.
  *
@@ -99,16 +109,30 @@ export function diaphragmForces(
   forces: readonly number[],
   basis: { readonly SDS: number; readonly importance?: number | undefined },
 ): number[] {
+  return diaphragmLimits(levels, forces, basis).map(({ inertial, least, most }) =>
+    Math.min(Math.max(inertial, least), most),
+  );
+}
+
+/** What the design force of each diaphragm is chosen from; the arguments as in {@link diaphragmForces}. */
+export function diaphragmLimits(
+  levels: readonly { readonly weight: number }[],
+  forces: readonly number[],
+  basis: { readonly SDS: number; readonly importance?: number | undefined },
+): DiaphragmForce[] {
   const unit = basis.SDS * (basis.importance ?? 1);
-  const out = forces.map(() => 0);
+  const out: DiaphragmForce[] = [];
   let force = 0;
   let weight = 0;
   for (let i = levels.length - 1; i >= 0; i--) {
     const own = levels[i]?.weight ?? 0;
     force += forces[i] ?? 0;
     weight += own;
-    const inertia = weight === 0 ? 0 : (force / weight) * own; // Eq. 12.10-1
-    out[i] = Math.min(Math.max(inertia, 0.2 * unit * own), 0.4 * unit * own); // Eqs. 12.10-2, 12.10-3
+    out.push({
+      inertial: weight === 0 ? 0 : (force / weight) * own, // Eq. 12.10-1
+      least: 0.2 * unit * own, // Eq. 12.10-2
+      most: 0.4 * unit * own, // Eq. 12.10-3
+    });
   }
-  return out;
+  return out.reverse();
 }

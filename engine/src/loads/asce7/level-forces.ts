@@ -5,7 +5,7 @@ import type { Result } from '../../building/fault.js';
 import type { LevelForce } from '../level-forces.js';
 import { noWeight, weighedLevels } from '../seismic-weight.js';
 import { feetPer } from '../units.js';
-import { baseShear, diaphragmForces, verticalDistribution } from './equivalent-lateral-force.js';
+import { baseShear, diaphragmLimits, verticalDistribution } from './equivalent-lateral-force.js';
 
 /**
  * @param caseId the load case, for the fault
@@ -26,9 +26,14 @@ export function equivalentLateralForces(
   if (!(total > 0)) return noWeight(caseId);
   const { coefficient, k } = baseShear(basis, levels[levels.length - 1]?.heightFt ?? 0);
   const forces = verticalDistribution(levels, coefficient * total, k); // ASCE 7-16 Eq. 12.8-1
-  const design = diaphragmForces(levels, forces, basis);
+  const design = diaphragmLimits(levels, forces, basis);
   return {
     ok: true,
-    value: levels.map(({ level }, i) => ({ level, force: forces[i] as number, diaphragmForce: design[i] as number })),
+    value: design.map((limits, i) => ({
+      level: levels[i]?.level ?? '',
+      force: forces[i] as number,
+      diaphragmForce: Math.min(Math.max(limits.inertial, limits.least), limits.most),
+      limits,
+    })),
   };
 }
