@@ -8,8 +8,12 @@ const source = {
 };
 const server = { deps: { inline: [/@groundward\//] } };
 
-/** Tests that start processes, databases or browsers: they take seconds, not milliseconds. */
-const slow = ['test/{ground,service,browser}/**/*.test.ts', 'api/src/**/*.test.ts'];
+/** Tests that start processes, databases or browsers, and long series of random buildings: they take seconds, not milliseconds. */
+const slow = [
+  'test/{ground,service,browser,fuzz}/**/*.test.ts',
+  'test/independent/{random,semi-rigid}.test.ts',
+  'api/src/**/*.test.ts',
+];
 
 export default defineConfig({
   ...source,
