@@ -2,6 +2,8 @@
 import type { Building, Point, WallLine } from '@groundward/engine/building/definition';
 import { readBuilding } from '@groundward/engine/building/read';
 import { analyse } from '@groundward/engine/path/analyse';
+import { benchSemiRigid } from './semi-rigid.js';
+import { median } from './timing.js';
 
 const SIZES = [
   { storeys: 4, lines: 8 },
@@ -96,18 +98,6 @@ function building(storeys: number, lines: number, behaviour: Behaviour): Buildin
   };
 }
 
-/** Median of the times of one kind of work [ms], after warming up. */
-function median(work: () => unknown, repeats: number): number {
-  for (let i = 0; i < 3; i++) work();
-  const times = Array.from({ length: repeats }, () => {
-    const start = process.hrtime.bigint();
-    work();
-    return Number(process.hrtime.bigint() - start) / 1e6;
-  });
-  times.sort((a, b) => a - b);
-  return times[Math.floor(times.length / 2)] ?? NaN;
-}
-
 function heapOf(work: () => unknown): number {
   global.gc?.();
   const before = process.memoryUsage().heapUsed;
@@ -150,3 +140,24 @@ for (const behaviour of ['flexible', 'rigid'] as const) {
     );
   }
 }
+
+benchSemiRigid((meshSize) => {
+  const file = building(12, 24, 'rigid');
+  return {
+    ...file,
+    assemblies: { diaphragms: [{ id: 'sheet', apparentShearStiffness: 3000, chordStiffness: 50_000 }] },
+    levels: file.levels.map((level) => ({
+      ...level,
+      ...(level.diaphragms === undefined
+        ? {}
+        : {
+            diaphragms: level.diaphragms.map((floor) => ({
+              ...floor,
+              behaviour: 'semi-rigid' as const,
+              assembly: 'sheet',
+              meshSize,
+            })),
+          }),
+    })),
+  };
+});
