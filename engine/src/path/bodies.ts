@@ -3,7 +3,13 @@ import { Refusal } from '../building/refusal.js';
 import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
 import { cutOf } from '../diaphragms/inner-forces.js';
 import { rigidModel, type RigidModel } from '../diaphragms/rigid.js';
-import { membraneModel, stiffnessesOf } from '../diaphragms/semi-rigid/membrane-model.js';
+import {
+  membraneModel,
+  stiffnessesOf,
+  type MembraneModel,
+  type Stiffnesses,
+} from '../diaphragms/semi-rigid/membrane-model.js';
+import type { Interval } from '../geometry/profile.js';
 import { semiRigidBody, type SemiRigidBody } from '../diaphragms/semi-rigid/semi-rigid.js';
 import type { LineModel } from '../walls/wall-line.js';
 import { clip } from './collectors.js';
@@ -23,6 +29,7 @@ export function isBody({ behaviour }: DiaphragmModel): boolean {
 export function bodiesOf(model: Model): Bodies {
   const bodies = new Map<DiaphragmModel, Body>();
   const holder = new Map<string, DiaphragmModel>();
+  const membranes = new Map<string, MembraneModel>();
   for (const level of model.levels) {
     for (const diaphragm of level.diaphragms) {
       if (!isBody(diaphragm)) continue;
@@ -36,14 +43,34 @@ export function bodiesOf(model: Model): Bodies {
       if (diaphragm.behaviour === 'rigid') bodies.set(diaphragm, rigid);
       else {
         const stiffnesses = stiffnessesOf(model.building, diaphragm);
-        const membrane = membraneModel(diaphragm, rigid, stiffnesses, (line) =>
-          clip(cutOf(diaphragm, line), [line], level.id),
-        );
+        const runsOn = (line: LineModel): readonly Interval[] => clip(cutOf(diaphragm, line), [line], level.id);
+        const key = membraneKey(rigid, stiffnesses, runsOn);
+        const alike = membranes.get(key);
+        const membrane =
+          alike === undefined ? membraneModel(diaphragm, rigid, stiffnesses, runsOn) : { ...alike, diaphragm, rigid };
+        membranes.set(key, membrane);
         bodies.set(diaphragm, { ...rigid, semiRigid: semiRigidBody(membrane) });
       }
     }
   }
   return bodies;
+}
+
+/** Floors alike in all that their mesh and stiffness are made of share both: a tower is meshed and factored once. */
+function membraneKey(
+  { diaphragm, absolute }: RigidModel,
+  stiffnesses: Stiffnesses,
+  runsOn: (line: LineModel) => readonly Interval[],
+): string {
+  const { outline, openings = [], weight } = diaphragm.diaphragm;
+  return JSON.stringify([
+    outline,
+    openings.map((opening) => opening.outline),
+    (weight?.zones ?? []).map((zone) => zone.outline),
+    [stiffnesses.shear, stiffnesses.axial, stiffnesses.chord, stiffnesses.size],
+    absolute,
+    diaphragm.touches.map(({ line }) => [line.index, line.storeys[diaphragm.level]?.stiffness, runsOn(line)]),
+  ]);
 }
 
 function sharedLine(line: LineModel, first: DiaphragmModel, second: DiaphragmModel) {
