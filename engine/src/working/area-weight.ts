@@ -5,6 +5,7 @@ import { liveShare } from '../loads/basis-of.js';
 import { DEFAULT_PSI_E } from '../loads/en1998/live-share.js';
 import { basisPlace } from './basis-path.js';
 import { fromFile, fromFileOr, type Context } from './context.js';
+import { areaWeight } from './floor-parts.js';
 import type { Value } from './steps.js';
 
 export type AreaWeight = { readonly of: 'area' | 'live'; readonly q: number };
@@ -17,20 +18,24 @@ export function weightsOf({ area, live }: Strip, part: number): AreaWeight[] {
   ];
 }
 
+/** Where a level's force lies by weight; without live load where its part is left out. */
+export type Weighed = Pick<Inertia, 'diaphragm'> & { readonly liveShare?: number };
+
 /**
  * The diaphragm's own weight, or that of the zone which has this one; live load with the part of it that counts.
  *
  * @returns factors
  */
-export function areaWeight(context: Context, inertia: Inertia, { of, q }: AreaWeight, symbol: string): Value[] {
-  const { diaphragm, path } = inertia.diaphragm;
+export function weightFactors(context: Context, weighed: Weighed, { of, q }: AreaWeight, symbol: string): Value[] {
+  if (of === 'area') return [areaWeight(context, weighed.diaphragm, q, symbol)];
+  const { diaphragm, path } = weighed.diaphragm;
   const unit = `${context.units.force}/${context.units.length}²`;
-  const zone = (diaphragm.weight?.zones ?? []).findIndex((each) => each[of] === q);
+  const zone = (diaphragm.weight?.zones ?? []).findIndex(({ live }) => live === q);
   const weight =
-    q === diaphragm.weight?.[of] || zone < 0
-      ? fromFileOr(context, symbol, `${path}.weight.${of}`, 0, unit)
-      : fromFile(context, symbol, `${path}.weight.zones[${zone}].${of}`, unit);
-  return of === 'area' ? [weight] : [livePart(context, inertia.liveShare), weight];
+    q === diaphragm.weight?.live || zone < 0
+      ? fromFileOr(context, symbol, `${path}.weight.live`, 0, unit)
+      : fromFile(context, symbol, `${path}.weight.zones[${zone}].live`, unit);
+  return [livePart(context, weighed.liveShare ?? 0), weight];
 }
 
 function livePart(context: Context, part: number): Value {

@@ -1,10 +1,11 @@
 /** The floor as parts on which a level's force lies: weight, area or width of every stretch between two breaks, and its centre. */
 import type { Point } from '../building/definition.js';
+import type { DiaphragmModel } from '../diaphragms/diaphragm.js';
 import type { Inertia } from '../diaphragms/inertia.js';
 import { dot } from '../geometry/frame.js';
 import type { Profile, Slab } from '../geometry/profile.js';
-import { areaWeight, weightsOf, type AreaWeight } from './area-weight.js';
-import { fromFile, readOff, type Context } from './context.js';
+import { weightFactors, weightsOf, type AreaWeight } from './area-weight.js';
+import { fromFile, fromFileOr, readOff, type Context } from './context.js';
 import type { Steps, Value } from './steps.js';
 
 /** A part: what it weighs, or its area or width [as the level's force lies], and where its centre is along s. */
@@ -110,7 +111,7 @@ function slabPart(
       const d = readOff(context, `d_${i}`, `${diaphragm.path}.outline`, depth, length, `net depth at s = ${round(s)}`);
       if (stated === undefined) terms.push(d.symbol);
       else {
-        const weight = areaWeight(context, inertia, stated, `q_${i}`);
+        const weight = weightFactors(context, inertia, stated, `q_${i}`);
         terms.push(`${weight.map(({ symbol }) => symbol).join('·')}·${d.symbol}`);
         values.push(...weight);
       }
@@ -144,6 +145,15 @@ function slabPart(
   const size = steps.add(steps.fresh('n'), `(${a.symbol} + ${b.symbol})/2·(s_b − s_a)`, [a, b, to, from], unit);
   const centre = `s_a + (s_b − s_a)·(${a.symbol} + 2·${b.symbol})/(3·(${a.symbol} + ${b.symbol}))`;
   return { size, at: steps.add(steps.fresh('s'), centre, [from, to, a, b], length, { what: 'its centre' }) };
+}
+
+/** The diaphragm's own area weight, or that of the zone which has this one. */
+export function areaWeight(context: Context, { diaphragm, path }: DiaphragmModel, q: number, symbol: string): Value {
+  const unit = `${context.units.force}/${context.units.length}²`;
+  const zone = (diaphragm.weight?.zones ?? []).findIndex(({ area }) => area === q);
+  return q === diaphragm.weight?.area || zone < 0
+    ? fromFileOr(context, symbol, `${path}.weight.area`, 0, unit)
+    : fromFile(context, symbol, `${path}.weight.zones[${zone}].area`, unit);
 }
 
 /** Façades and partitions: along the cut at one place, across it over their length. */

@@ -3,7 +3,7 @@ import type { Inertia } from '../diaphragms/inertia.js';
 import type { Profile } from '../geometry/profile.js';
 import type { Demand } from '../path/result.js';
 import { fromFile, readOff, runOf, type Context } from './context.js';
-import { areaWeight, weightsOf, type AreaWeight } from './area-weight.js';
+import { weightFactors, weightsOf, type AreaWeight, type Weighed } from './area-weight.js';
 import type { Steps, Value } from './steps.js';
 
 /** @param inertias how the level's force lies on each of the diaphragms that count */
@@ -55,7 +55,7 @@ export function totalStep(context: Context, inertias: readonly Inertia[], steps:
         values.push(a);
         continue;
       }
-      const weight = areaWeight(context, inertia, stated, `q_${i}`);
+      const weight = weightFactors(context, inertia, stated, `q_${i}`);
       terms.push(`${weight.map(({ symbol }) => symbol).join('·')}·${a.symbol}`);
       values.push(...weight, a);
     }
@@ -93,7 +93,10 @@ export function levelInertias(context: Context, of: Pick<Demand, 'case'>, level:
 }
 
 /** Net area by area weight; all in one for `area`. */
-function areas(profile: Profile, { spread, liveShare }: Inertia): { weight: AreaWeight | undefined; area: number }[] {
+function areas(
+  profile: Profile,
+  { spread, liveShare = 0 }: Pick<Inertia, 'spread'> & Weighed,
+): { weight: AreaWeight | undefined; area: number }[] {
   const sums = new Map<string, { weight: AreaWeight | undefined; area: number }>();
   for (const slab of profile.slabs) {
     for (const strip of slab.strips) {
