@@ -12,7 +12,7 @@ export function smallBuildings(seed: number, count: number, behaviours: readonly
     const draw = <T>(from: readonly T[]): T => from[numbers.next().value % from.length] as T;
     const levels = building.levels.slice(0, 3);
     const kept = new Set(levels.map(({ id }) => id));
-    const { accidental, ...loadCase } = draw(building.loadCases);
+    const { accidental, ...loadCase } = draw(building.loadCases.filter((each) => each.from !== 'combined'));
     const eccentric = accidental === undefined || draw([true, true, false]) ? {} : { accidental };
     return {
       ...building,

@@ -1,5 +1,6 @@
 /** The demands of walls, piers and supports from the independent solution, by the key of their row in an analysis. */
-import type { Building, LoadCase } from '@groundward/engine/building/definition';
+import type { Building } from '@groundward/engine/building/definition';
+import type { PlainCase } from '@groundward/engine/building/load-cases';
 import { directionOf, horizontal, type Load } from './horizontal.js';
 import { levelForcesOf } from './level-forces.js';
 import { GRAVITY, vertical } from './posts.js';
@@ -11,11 +12,13 @@ export function keyOf({ member, quantity, case: name, sense, combination }: Key)
   return [member, quantity, name, sense, combination ?? ''].join(' | ');
 }
 
-type Component = { readonly id: string; readonly loadCase: LoadCase; readonly shear: ReadonlyMap<string, number> };
+type Component = { readonly id: string; readonly loadCase: PlainCase; readonly shear: ReadonlyMap<string, number> };
 
 /** Value by `keyOf`; combinations where the file lists its own. */
 export function independentDemands(building: Building, meshSize?: number): Map<string, number> {
-  const components = building.loadCases.flatMap((loadCase) => componentsOf(building, loadCase, meshSize));
+  const components = building.loadCases
+    .filter((loadCase) => loadCase.from !== 'combined')
+    .flatMap((loadCase) => componentsOf(building, loadCase, meshSize));
   const found = new Map<string, number>();
   const levels = levelsOf(building);
   const storeys = storeysOf(building);
@@ -99,7 +102,7 @@ export function independentDemands(building: Building, meshSize?: number): Map<s
 }
 
 /** The case itself and, with accidental eccentricity, the load moved either way, amplified where the case says so. */
-function componentsOf(building: Building, loadCase: LoadCase, meshSize: number | undefined): Component[] {
+function componentsOf(building: Building, loadCase: PlainCase, meshSize: number | undefined): Component[] {
   const plain: Load = {
     direction: directionOf(loadCase.direction),
     spread: loadCase.spread ?? 'weight',

@@ -21,6 +21,7 @@ export function outOfScope(building: Building): string | undefined {
   if (other !== undefined) return `behaviour ${other.behaviour}`;
   if (building.wallLines.some(({ shareBy }) => shareBy === 'deflection')) return 'sharing by deflection';
   for (const loadCase of building.loadCases) {
+    if (loadCase.from === 'combined') return 'cases that act together';
     if (loadCase.from === 'basis' && loadCase.kind !== 'seismic') return 'wind from a basis';
     const angle = (loadCase.direction * Math.PI) / 180;
     for (const { axis } of building.wallLines) {

@@ -41,7 +41,9 @@ function semiRigid(building: Building, shear: number, chord: number | undefined)
         { id: 'sheet', apparentShearStiffness: shear, ...(chord === undefined ? {} : { chordStiffness: chord }) },
       ],
     },
-    loadCases: building.loadCases.map(({ accidental: _, ...loadCase }) => ({ ...loadCase, spread: 'weight' as const })),
+    loadCases: building.loadCases
+      .filter((each) => each.from !== 'combined')
+      .map(({ accidental: _, ...loadCase }) => ({ ...loadCase, spread: 'weight' as const })),
   };
 }
 
