@@ -6,6 +6,7 @@ import type {
   CollectorDiagram,
   Demand,
   DiaphragmDiagram,
+  OpeningDiagram,
   Quantity,
   StrutDiagram,
   TransferDiagram,
@@ -135,6 +136,10 @@ export class SteppedCase {
 
   get transfers(): TransferDiagram[] {
     return this.analysis.diagrams.filter((each): each is TransferDiagram => each.kind === 'transfer-diaphragm');
+  }
+
+  get openings(): OpeningDiagram[] {
+    return this.analysis.diagrams.filter((each): each is OpeningDiagram => each.kind === 'opening');
   }
 
   get bars(): (StrutDiagram | CollectorDiagram)[] {

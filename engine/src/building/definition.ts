@@ -59,7 +59,7 @@ export const Diaphragm = z.strictObject({
     'Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area',
   ),
   transferLength: Positive.optional().describe(
-    'Greatest length, across the load, over which a chord that ends at a step of the outline gives its force to the floor beside it [length]; default up to the next wall line or step',
+    'Greatest length, across the load, over which a chord that ends at a step of the outline or at an opening gives its force to the floor beside it [length]; default up to the next wall line or step, beyond the sides of an opening half the floor’s depth',
   ),
   weight: DiaphragmWeight.optional(),
 });

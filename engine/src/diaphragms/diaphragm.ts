@@ -3,6 +3,7 @@ import type { Behaviour, Diaphragm } from '../building/definition.js';
 import { massOf, type Mass } from '../geometry/area.js';
 import type { Frame } from '../geometry/frame.js';
 import { cutAt, profileOf, type Cut, type Interval, type Profile } from '../geometry/profile.js';
+import { openingPlans, type OpeningPlan } from './openings/opening-plan.js';
 import { stepsOf, type StepPlan } from './steps/step.js';
 import { tOn, type LineModel } from '../walls/wall-line.js';
 
@@ -23,6 +24,8 @@ export type DiaphragmModel = {
   readonly touches: readonly Touch[];
   /** Steps of the outline by index of the frame. */
   readonly steps: readonly (readonly StepPlan[])[];
+  /** Openings by index of the frame. */
+  readonly openings: readonly (readonly OpeningPlan[])[];
 };
 
 export function diaphragmModel(
@@ -49,14 +52,16 @@ export function diaphragmModel(
     mass: massOf(diaphragm, profiles[0] as Profile),
     touches,
     steps: profiles.map((profile, frame) =>
-      stepsOf(
-        profile,
-        diaphragm.outline,
-        touches.flatMap(({ line }) => (line.family === frame ? [line.s] : [])).sort((a, b) => a - b),
-        diaphragm.transferLength,
-      ),
+      stepsOf(profile, diaphragm.outline, linesOf(touches, frame), diaphragm.transferLength),
+    ),
+    openings: profiles.map((profile, frame) =>
+      openingPlans(profile, diaphragm.openings ?? [], linesOf(touches, frame), diaphragm.transferLength),
     ),
   };
+}
+
+function linesOf(touches: readonly Touch[], frame: number): number[] {
+  return touches.flatMap(({ line }) => (line.family === frame ? [line.s] : [])).sort((a, b) => a - b);
 }
 
 function overlaps(intervals: readonly Interval[], line: LineModel, tolerance: number): boolean {

@@ -5,7 +5,8 @@ import { beamAlong } from '../statics/beam.js';
 import type { LoadPiece, PointLoad, SpanLoad } from '../statics/span-load.js';
 import type { LineModel } from '../walls/wall-line.js';
 import type { DiaphragmModel } from './diaphragm.js';
-import { linear, transfersOf, type Transfer } from './steps/transfer.js';
+import { openingTransfers } from './openings/opening.js';
+import { linear, stepTransfers, type Transfer } from './steps/transfer.js';
 
 export type InnerPiece = {
   readonly from: number;
@@ -63,6 +64,8 @@ export function innerForces(
   breaks.push(profile.to);
   const steps = diaphragm.steps[frame] ?? [];
   for (const step of steps) for (const { end } of step.transfers) breaks.push(end);
+  const openings = diaphragm.openings[frame] ?? [];
+  for (const { halves } of openings) for (const { transfer } of halves) breaks.push(transfer.end);
   const beam = beamAlong({ pieces, points }, breaks, reactions, profile.tolerance);
   let next = 0;
   const inner = beam.pieces.map((piece): InnerPiece => {
@@ -89,7 +92,10 @@ export function innerForces(
     frame,
     profile,
     pieces: inner,
-    transfers: transfersOf(steps, inner, profile.tolerance),
+    transfers: [
+      ...stepTransfers(steps, inner, profile.tolerance),
+      ...openingTransfers(openings, inner, profile.tolerance),
+    ],
     closingShear: beam.closingShear,
     closingMoment: beam.closingMoment,
   };

@@ -49,7 +49,7 @@ export function diaphragmDemands(
       const supports = supportsOf(diaphragm, frame);
       const spans = spansOf(forces, supports);
       spanDemands(table, forces, spans, subCase.id, (span) => shearAtCollectors(forces, span, level.id));
-      openingDemands(table, forces, subCase.id);
+      openingDemands(table, diagrams, forces, { level: level.id, case: subCase.id });
       diagrams.push(
         diaphragmDiagram(
           forces,

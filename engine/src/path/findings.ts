@@ -5,6 +5,7 @@ import type { Model } from './model.js';
 import { edgeDrifts, torsionalRatio } from './level-demands.js';
 import type { Finding } from './result.js';
 import type { CaseRun } from './run.js';
+import { openingFindings } from './opening-findings.js';
 import { stepFindings } from './step-findings.js';
 import { cross, dot, frameAlong } from '../geometry/frame.js';
 import type { Profile } from '../geometry/profile.js';
@@ -16,7 +17,7 @@ export function planFindings(model: Model, bodies: Bodies, loadFrames: ReadonlyS
   const findings: Finding[] = [];
   for (const level of model.levels) {
     for (const diaphragm of level.diaphragms) {
-      findings.push(...stepFindings(diaphragm, loadFrames));
+      findings.push(...stepFindings(diaphragm, loadFrames), ...openingFindings(diaphragm, loadFrames));
       const body = bodies.get(diaphragm);
       if (body !== undefined && !body.absolute) {
         findings.push({

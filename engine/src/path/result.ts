@@ -159,11 +159,36 @@ export const TransferDiagram = z.strictObject({
     .describe('The floor between edges and interrupted chords, piece by piece'),
 });
 
+const StripEdge = z.strictObject({
+  t: z.number().describe('At the middle of the opening [length]'),
+  axial: z.number().describe('Tension positive, in sense 1 [force]'),
+});
+
+export const OpeningDiagram = z.strictObject({
+  kind: z.literal('opening'),
+  member: z.string().describe('`level/diaphragm/opening`'),
+  level: z.string(),
+  case: z.string(),
+  along: Point.describe('Unit vector t along the cuts'),
+  across: Point.describe('Unit vector s across them'),
+  ends: z
+    .array(
+      z.strictObject({
+        s: z.number().describe('Side of the opening [length]'),
+        lower: StripEdge,
+        upper: StripEdge,
+        moment: z.number().describe('Of the strip alone, none at the middle of the opening [force·length]'),
+      }),
+    )
+    .describe('Every strip beside the opening at both sides of it: the forces at the corners with their signs'),
+});
+
 export const Diagram = z.discriminatedUnion('kind', [
   DiaphragmDiagram,
   CollectorDiagram,
   StrutDiagram,
   TransferDiagram,
+  OpeningDiagram,
 ]);
 
 export const PathNode = z.strictObject({
@@ -220,6 +245,7 @@ export type DiaphragmDiagram = z.infer<typeof DiaphragmDiagram>;
 export type CollectorDiagram = z.infer<typeof CollectorDiagram>;
 export type StrutDiagram = z.infer<typeof StrutDiagram>;
 export type TransferDiagram = z.infer<typeof TransferDiagram>;
+export type OpeningDiagram = z.infer<typeof OpeningDiagram>;
 export type Diagram = z.infer<typeof Diagram>;
 export type PathNode = z.infer<typeof PathNode>;
 export type PathEdge = z.infer<typeof PathEdge>;

@@ -45,8 +45,7 @@ export function stepDemands(
 ): void {
   const found: Found = new Map();
   for (const forces of inner) {
-    const steps = forces.diaphragm.steps[forces.frame] ?? [];
-    if (steps.length === 0) continue;
+    if (forces.transfers.length === 0) continue;
     const place = `${forces.diaphragm.key}, case ${where.case}`;
     const panels = netPanels(forces);
     const edges = netChords(forces);
@@ -62,7 +61,7 @@ export function stepDemands(
         diagrams.push(strut);
       }
     }
-    for (const drag of dragsOf(forces, steps)) {
+    for (const drag of dragsOf(forces)) {
       const axial = alongCut(forces, outcome, drag.s);
       if (axial.scale === 0) continue;
       enter(ledger, 'step: drag struts close', place, axial.closing, axial.scale);
@@ -112,6 +111,7 @@ function memberOf(forces: InnerForces, transfer: Transfer): string {
 /** At the step the edges carry what the common depth hands over, and nothing where an edge ends. */
 function checkEdges(ledger: Ledger, forces: InnerForces, transfer: Transfer, place: string): void {
   const { plan, stepPlan, lower, upper } = transfer;
+  if (stepPlan === undefined) return;
   const { tolerance } = forces.profile;
   const chord = (transfer.chords[0]?.force ?? 0) * (plan.chords[0]?.upper === true ? 1 : -1);
   const goesOn = (t: number): boolean =>
@@ -200,9 +200,9 @@ function zero(value: number): number {
 /** The interrupted chords on their way from the end of the transfer diaphragm to the step. */
 function struts(forces: InnerForces, transfer: Transfer, where: Where): StrutDiagram[] {
   const { plan } = transfer;
-  return transfer.chords.map(({ corner, t, force }) => ({
+  return transfer.chords.map(({ name, t, force }) => ({
     kind: 'strut',
-    member: `${forces.diaphragm.key}/corner-${corner}/strut`,
+    member: `${forces.diaphragm.key}/${name}/strut`,
     level: where.level,
     case: where.case,
     from: toPlan(forces.profile.frame, plan.end, t),
@@ -214,19 +214,20 @@ function struts(forces: InnerForces, transfer: Transfer, where: Where): StrutDia
   }));
 }
 
-/** Steps and ends of transfer diaphragms at which no wall line's collector runs. */
-function dragsOf(forces: InnerForces, steps: readonly StepPlan[]): Drag[] {
+/** Steps, sides of openings and ends of transfer diaphragms at which no wall line's collector runs. */
+function dragsOf(forces: InnerForces): Drag[] {
   const { tolerance } = forces.profile;
   const held = (s: number): boolean =>
     forces.diaphragm.touches.some(({ line }) => line.family === forces.frame && Math.abs(line.s - s) <= tolerance);
   const key = forces.diaphragm.key;
   const drags: Drag[] = [];
-  for (const step of steps) {
-    if (step.transfers.length > 0 && !held(step.s)) drags.push({ member: `${key}/${step.name}/drag`, s: step.s });
-    for (const { name, end, endsAt } of step.transfers) {
-      if (endsAt === 'line' || endsAt === 'step' || Math.abs(end - step.s) <= tolerance) continue;
-      drags.push({ member: `${key}/${name}/end`, s: end });
-    }
+  const steps = new Set<StepPlan>();
+  for (const { plan, stepPlan } of forces.transfers) {
+    const { name, s } = stepPlan ?? { name: plan.name, s: plan.step };
+    if ((stepPlan === undefined || !steps.has(stepPlan)) && !held(s)) drags.push({ member: `${key}/${name}/drag`, s });
+    if (stepPlan !== undefined) steps.add(stepPlan);
+    if (plan.endsAt !== 'line' && plan.endsAt !== 'step')
+      drags.push({ member: `${key}/${plan.name}/end`, s: plan.end });
   }
   return drags;
 }

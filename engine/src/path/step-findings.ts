@@ -8,7 +8,7 @@ import type { Finding } from './result.js';
  * Largest ratio of depth across to length of a transfer diaphragm: the limit of blocked wood structural panels, SDPWS-2021 Table 4.2.4
  * (3 for unblocked ones); from memory, not checked against the document.
  */
-const SLENDER = 4;
+export const SLENDER = 4;
 
 export function stepFindings(diaphragm: DiaphragmModel, loadFrames: ReadonlySet<number>): Finding[] {
   const findings: Finding[] = [];
@@ -126,7 +126,11 @@ function freeEnd({ key }: DiaphragmModel, plan: TransferPlan): Finding | undefin
   };
 }
 
-function openingWithin({ key, diaphragm }: DiaphragmModel, profile: Profile, plan: TransferPlan): Finding | undefined {
+export function openingWithin(
+  { key, diaphragm }: DiaphragmModel,
+  profile: Profile,
+  plan: TransferPlan,
+): Finding | undefined {
   const from = Math.min(plan.step, plan.end) + profile.tolerance;
   const to = Math.max(plan.step, plan.end) - profile.tolerance;
   const [x, y] = profile.frame.s;
@@ -141,7 +145,7 @@ function openingWithin({ key, diaphragm }: DiaphragmModel, profile: Profile, pla
     code: 'opening-in-transfer',
     severity: 'warning',
     member: `${key}/${plan.name}`,
-    sentence: `Opening ${ids.join(', ')} lies in the transfer diaphragm at ${plan.name} of ${key}: its net shears count the net depth, the bending of the strips beside the opening by the interrupted chord is not counted. State a shorter transfer length or a semi-rigid level.`,
+    sentence: `Opening ${ids.join(', ')} lies in the transfer diaphragm at ${plan.name} of ${key}: net shears count the net depth, the bending of the strips beside the opening by what is transferred there is not counted. State a shorter transfer length or a semi-rigid level.`,
     numbers: { openings: ids.length },
   };
 }

@@ -9,7 +9,8 @@ import { roomFor, type Room } from './room.js';
 
 /** A chord that ends at a step and has to run on into the floor beyond it. */
 export type InterruptedChord = {
-  /** Number of the outline's corner where it ends, counted from 1 in the file's order. */
+  /** `corner-5`: after the outline's corner where it ends, counted from 1 in the file's order; of an opening `o1/corner-2`. */
+  readonly name: string;
   readonly corner: number;
   readonly t: number;
   /** Whether it is the edge of the common depth that lies higher in t. */
@@ -18,7 +19,7 @@ export type InterruptedChord = {
 
 /** The region beside a step that takes interrupted chords: a little beam lying across, between the edges of the floor. */
 export type TransferPlan = {
-  /** `corner-5`, after its lowest corner. */
+  /** After its chord of the lowest corner. */
   readonly name: string;
   readonly step: number;
   /** Its end away from the step. */
@@ -29,6 +30,8 @@ export type TransferPlan = {
   readonly upper: number;
   /** What ends it. */
   readonly endsAt: Room['endsAt'];
+  /** Length that it would have with room enough, where that is not up to the next wall line or step [length] */
+  readonly wanted?: number;
 };
 
 export type StepPlan = {
@@ -91,7 +94,10 @@ export function stepsOf(
           { t: high, upper: true },
         ])
         .filter(({ t }) => t > whole[0] + tolerance && t < whole[1] - tolerance)
-        .map(({ t, upper }): InterruptedChord => ({ t, upper, corner: nearest(near, t) }));
+        .map(({ t, upper }): InterruptedChord => {
+          const corner = nearest(near, t);
+          return { name: nameOf([corner]), corner, t, upper };
+        });
       if (chords.length === 0) continue;
       const places = chords.map(({ t }) => t);
       const room = roomFor(profile, i, ahead, places, (slab) => jumps[slab] === true, lines, stated);
@@ -142,13 +148,15 @@ function commonOf(a: readonly Interval[], b: readonly Interval[], tolerance: num
   );
 }
 
-type Corner = { readonly number: number; readonly s: number; readonly t: number };
+export type Corner = { readonly number: number; readonly s: number; readonly t: number };
 
-function cornersOf({ frame }: Profile, outline: Ring): Corner[] {
+/** The vertices of a ring, numbered from 1. */
+export function cornersOf({ frame }: Profile, outline: Ring): Corner[] {
   return outline.map((point: Point, i) => ({ number: i + 1, s: dot(point, frame.s), t: dot(point, frame.t) }));
 }
 
-function nearest(corners: readonly Corner[], t: number): number {
+/** Number of the corner nearest to a place along t. */
+export function nearest(corners: readonly Corner[], t: number): number {
   let best: Corner | undefined;
   for (const corner of corners) {
     if (best === undefined || Math.abs(corner.t - t) < Math.abs(best.t - t)) best = corner;

@@ -17,7 +17,8 @@ export type CarriedChord = InterruptedChord & {
 
 export type Transfer = {
   readonly plan: TransferPlan;
-  readonly stepPlan: StepPlan;
+  /** Absent beside an opening. */
+  readonly stepPlan?: StepPlan;
   readonly from: number;
   readonly to: number;
   readonly chords: readonly CarriedChord[];
@@ -27,14 +28,49 @@ export type Transfer = {
 };
 
 /**
- * At a step the common depth alone carries the moment: ±M/D at its edges, an edge at higher t in tension under positive M. What an
- * interrupted edge carries there is given to the floor beside it over the length of the transfer diaphragm; its edges resist by statics of a
- * beam across.
+ * What an interrupted chord carries where it ends is given to the floor beside it over the length of the transfer diaphragm, whose edges
+ * resist by statics of a beam across.
+ *
+ * @param chord axial force of an edge at higher t; one at lower t carries as much the other way [force]
+ * @returns nothing where the plan has no length
+ */
+export function transferOf(
+  plan: TransferPlan,
+  chord: number,
+  tolerance: number,
+  stepPlan?: StepPlan,
+): Transfer | undefined {
+  const length = plan.step - plan.end;
+  if (Math.abs(length) <= tolerance) return undefined;
+  const depth = plan.upper - plan.lower;
+  const chords = plan.chords.map((each): CarriedChord => {
+    const force = each.upper ? chord : -chord;
+    return { ...each, force, flow: force / length };
+  });
+  let lower = 0;
+  let upper = 0;
+  for (const { t, force } of chords) {
+    lower -= (force * (plan.upper - t)) / depth;
+    upper -= (force * (t - plan.lower)) / depth;
+  }
+  return {
+    plan,
+    ...(stepPlan === undefined ? {} : { stepPlan }),
+    from: Math.min(plan.step, plan.end),
+    to: Math.max(plan.step, plan.end),
+    chords,
+    lower,
+    upper,
+  };
+}
+
+/**
+ * At a step the common depth alone carries the moment: ±M/D at its edges, an edge at higher t in tension under positive M.
  *
  * @param steps ascending in s
  * Source: statics; the arrangement is that of R. T. Malone and R. W. Rice, The Analysis of Irregular Shaped Structures (2012), Ch. 4.
  */
-export function transfersOf(
+export function stepTransfers(
   steps: readonly StepPlan[],
   pieces: readonly InnerPiece[],
   tolerance: number,
@@ -55,29 +91,8 @@ export function transfersOf(
     // What is only the rounding of larger moments is none: at the end of a simple span.
     const moment = Math.abs(found) <= 1e-12 * largest ? 0 : found;
     for (const plan of step.transfers) {
-      const length = plan.step - plan.end;
-      if (Math.abs(length) <= tolerance) continue;
-      const depth = plan.upper - plan.lower;
-      const chord = moment / commonDepth(step);
-      const chords = plan.chords.map((each): CarriedChord => {
-        const force = each.upper ? chord : -chord;
-        return { ...each, force, flow: force / length };
-      });
-      let lower = 0;
-      let upper = 0;
-      for (const { t, force } of chords) {
-        lower -= (force * (plan.upper - t)) / depth;
-        upper -= (force * (t - plan.lower)) / depth;
-      }
-      out.push({
-        plan,
-        stepPlan: step,
-        from: Math.min(plan.step, plan.end),
-        to: Math.max(plan.step, plan.end),
-        chords,
-        lower,
-        upper,
-      });
+      const transfer = transferOf(plan, moment / commonDepth(step), tolerance, step);
+      if (transfer !== undefined) out.push(transfer);
     }
   }
   return out;
