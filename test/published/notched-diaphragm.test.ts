@@ -10,6 +10,9 @@
 import { describe, expect, test } from 'vitest';
 import type { StrutDiagram, TransferDiagram } from '@groundward/engine/path/result';
 import { analysed, beside, value } from './cases.js';
+import { check } from './verification.js';
+
+const SOURCE = 'Malone and Rice, The Analysis of Irregular Shaped Structures (2012), Ch. 4, Figs. 4.1-4.2';
 
 const building = analysed('notched-diaphragm');
 const at = (x: number) => beside(building, 'roof/d', 'EY', x);
@@ -57,8 +60,16 @@ describe('basic shears and chords', () => {
   test('chord forces of the shallow part at both ends of the notch', () => {
     expect(at(15).after?.M).toBeCloseTo(202.5, 9);
     expect(at(35).before?.M).toBeCloseTo(402.5, 9);
-    expect(value(building, 'roof/d/corner-6/strut', 'axial-tension', 'EY')).toBeCloseTo(5.0625, 9);
-    expect(value(building, 'roof/d/corner-5/strut', 'axial-tension', 'EY')).toBeCloseTo(10.0625, 9);
+    check({
+      case: 'chord at line B at both ends of the notch, in tension [lb]',
+      source: SOURCE,
+      seen: 'seen',
+      expected: [5062.5, 10062.5],
+      got: ['roof/d/corner-6/strut', 'roof/d/corner-5/strut'].map(
+        (member) => 1000 * value(building, member, 'axial-tension', 'EY'),
+      ),
+      within: 0.05,
+    });
     expect(value(building, 'roof/d/corner-5/strut', 'axial-compression', 'EY', -1)).toBeCloseTo(10.0625, 9);
   });
 });
@@ -69,8 +80,14 @@ describe('transfer diaphragms', () => {
     ['roof/d/corner-5', 2012.5, 134.2, 8050, 536.7],
   ])('%s: what edges A and C take, and as unit shears', (member, VA, vA, VC, vC) => {
     const [A, C] = transfer(member).edges;
-    expect(Math.abs(1000 * (A?.axial ?? 0))).toBeCloseTo(VA, 6);
-    expect(Math.abs(1000 * (C?.axial ?? 0))).toBeCloseTo(VC, 6);
+    check({
+      case: `transfer diaphragm ${member.slice(-1) === '6' ? '1-2' : '3-4'}: forces at edges A and C [lb]`,
+      source: SOURCE,
+      seen: 'seen',
+      expected: [VA, VC],
+      got: [Math.abs(1000 * (A?.axial ?? NaN)), Math.abs(1000 * (C?.axial ?? NaN))],
+      within: 0.05,
+    });
     expect(Math.abs((1000 * (A?.axial ?? 0)) / 15 / vA)).toBeCloseTo(1, 3);
     expect(Math.abs((1000 * (C?.axial ?? 0)) / 15 / vC)).toBeCloseTo(1, 3);
     expect(value(building, member, 'shear', 'EY')).toBeCloseTo(VC / 1000, 9);
@@ -86,7 +103,14 @@ describe('transfer diaphragms', () => {
     ['roof/d/corner-5', 50, 'A-B', -34.2],
     ['roof/d/corner-5', 50, 'B-C', 636.7],
   ] as const)('%s, net unit shear at x = %d ft between %s: %d plf', (member, x, panel, plf) => {
-    expect(Math.abs(net(member, x, panel) - plf)).toBeLessThanOrEqual(0.1);
+    check({
+      case: `net unit shear at x = ${x} ft between ${panel} [plf]`,
+      source: SOURCE,
+      seen: 'seen',
+      expected: plf,
+      got: net(member, x, panel),
+      within: 0.1,
+    });
   });
 
   test('net unit shears of the shallow part are its basic ones: 300 and 200 plf; beyond the second transfer 100 plf', () => {

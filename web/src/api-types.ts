@@ -2372,7 +2372,7 @@ export interface operations {
                                 assembly?: string;
                                 /** @description Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area */
                                 meshSize?: number;
-                                /** @description Greatest length, across the load, over which a chord that ends at a step of the outline gives its force to the floor beside it [length]; default up to the next wall line or step */
+                                /** @description Greatest length, across the load, over which a chord that ends at a step of the outline or at an opening gives its force to the floor beside it [length]; default up to the next wall line or step, beyond the sides of an opening half the floor’s depth */
                                 transferLength?: number;
                                 weight?: {
                                     /** @description Seismic weight of floor or roof [force/length²]; default 0 */
@@ -3066,7 +3066,7 @@ export interface operations {
                             assembly?: string;
                             /** @description Largest side of a finite element of a semi-rigid diaphragm [length]; default a sixteenth of the side of a square of its area */
                             meshSize?: number;
-                            /** @description Greatest length, across the load, over which a chord that ends at a step of the outline gives its force to the floor beside it [length]; default up to the next wall line or step */
+                            /** @description Greatest length, across the load, over which a chord that ends at a step of the outline or at an opening gives its force to the floor beside it [length]; default up to the next wall line or step, beyond the sides of an opening half the floor’s depth */
                             transferLength?: number;
                             weight?: {
                                 /** @description Seismic weight of floor or roof [force/length²]; default 0 */
@@ -4314,6 +4314,42 @@ export interface operations {
                                 shear: number[];
                                 /** @description Net depth d of the whole cut [length] */
                                 depth: number[];
+                            }[];
+                        } | {
+                            /** @constant */
+                            kind: "opening";
+                            /** @description `level/diaphragm/opening` */
+                            member: string;
+                            level: string;
+                            case: string;
+                            /** @description Unit vector t along the cuts */
+                            along: [
+                                number,
+                                number
+                            ];
+                            /** @description Unit vector s across them */
+                            across: [
+                                number,
+                                number
+                            ];
+                            /** @description Every strip beside the opening at both sides of it: the forces at the corners with their signs */
+                            ends: {
+                                /** @description Side of the opening [length] */
+                                s: number;
+                                lower: {
+                                    /** @description At the middle of the opening [length] */
+                                    t: number;
+                                    /** @description Tension positive, in sense 1 [force] */
+                                    axial: number;
+                                };
+                                upper: {
+                                    /** @description At the middle of the opening [length] */
+                                    t: number;
+                                    /** @description Tension positive, in sense 1 [force] */
+                                    axial: number;
+                                };
+                                /** @description Of the strip alone, none at the middle of the opening [force·length] */
+                                moment: number;
                             }[];
                         })[];
                         path: {
