@@ -37,9 +37,14 @@ function net(member: string, x: number, panel: 'A-B' | 'B-C'): number {
 }
 
 describe('basic shears and chords', () => {
+  const seen = (what: string, expected: number, got: number | undefined): void =>
+    check({ case: what, source: SOURCE, seen: 'seen', expected, got, within: 5e-10 });
+  const bothSeen = (what: string, expected: readonly number[], got: readonly (number | undefined)[]): void =>
+    check({ case: what, source: SOURCE, seen: 'seen', expected, got, within: 5e-10 });
+
   test('reaction and shear at the first line', () => {
-    expect(value(building, '1/roof', 'reaction', 'EY')).toBeCloseTo(15, 9);
-    expect(at(0).after?.v).toBeCloseTo(0.3, 9);
+    seen('R1 [k]', 15, value(building, '1/roof', 'reaction', 'EY'));
+    seen('unit shear at line 1 [k/ft]', 0.3, at(0).after?.v);
     expect(value(building, 'roof/d/1-9', 'unit-shear', 'EY')).toBeCloseTo(0.3, 9);
   });
 
@@ -47,19 +52,17 @@ describe('basic shears and chords', () => {
     [15, 12, 0.24, 0.3],
     [35, 8, 0.2, 0.16],
   ])('unit shears on both sides of the step at x = %d ft', (x, shear, left, right) => {
-    expect(at(x).before?.V).toBeCloseTo(shear, 9);
-    expect(at(x).before?.v).toBeCloseTo(left, 9);
-    expect(at(x).after?.v).toBeCloseTo(right, 9);
+    seen(`shear at x = ${x} ft [k]`, shear, at(x).before?.V);
+    bothSeen(`unit shears left and right of x = ${x} ft [k/ft]`, [left, right], [at(x).before?.v, at(x).after?.v]);
   });
 
   test('shear at the end of the second transfer diaphragm', () => {
-    expect(at(50).before?.V).toBeCloseTo(5, 9);
-    expect(at(50).before?.v).toBeCloseTo(0.1, 9);
+    seen('shear at x = 50 ft [k]', 5, at(50).before?.V);
+    seen('unit shear left of x = 50 ft [k/ft]', 0.1, at(50).before?.v);
   });
 
   test('chord forces of the shallow part at both ends of the notch', () => {
-    expect(at(15).after?.M).toBeCloseTo(202.5, 9);
-    expect(at(35).before?.M).toBeCloseTo(402.5, 9);
+    bothSeen('moments at both ends of the notch [k-ft]', [202.5, 402.5], [at(15).after?.M, at(35).before?.M]);
     check({
       case: 'chord at line B at both ends of the notch, in tension [lb]',
       source: SOURCE,
