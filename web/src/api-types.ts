@@ -2377,6 +2377,8 @@ export interface operations {
                                 weight?: {
                                     /** @description Seismic weight of floor or roof [force/length²]; default 0 */
                                     area?: number;
+                                    /** @description Characteristic live load, of which the seismic mass of EN 1998-1 takes the part ψ_E [force/length²]; default 0 */
+                                    live?: number;
                                     zones?: {
                                         /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                                         id: string;
@@ -2388,6 +2390,8 @@ export interface operations {
                                         ][];
                                         /** @description Replaces the diaphragm’s own area weight inside the outline [force/length²] */
                                         area: number;
+                                        /** @description Live load inside the outline [force/length²]; default the diaphragm’s own */
+                                        live?: number;
                                     }[];
                                     /** @description Façades and partitions, added to area weights */
                                     lines?: {
@@ -2520,13 +2524,20 @@ export interface operations {
                                 R: number;
                                 /** @description Ω₀; default 1 */
                                 overstrength?: number;
+                                /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                                reduceOverstrength?: boolean;
+                                /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                                lightFrame?: boolean;
                                 /** @description Default R */
                                 Cd?: number;
                                 /** @description Iₑ; default 1 */
                                 importance?: number;
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
-                                /** @enum {string} */
+                                /**
+                                 * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                                 * @enum {string}
+                                 */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
@@ -2588,13 +2599,20 @@ export interface operations {
                                 R: number;
                                 /** @description Ω₀; default 1 */
                                 overstrength?: number;
+                                /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                                reduceOverstrength?: boolean;
+                                /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                                lightFrame?: boolean;
                                 /** @description Default R */
                                 Cd?: number;
                                 /** @description Iₑ; default 1 */
                                 importance?: number;
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
-                                /** @enum {string} */
+                                /**
+                                 * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                                 * @enum {string}
+                                 */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
@@ -2666,6 +2684,8 @@ export interface operations {
                                 Ct?: number;
                                 /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
                                 lambda?: number;
+                                /** @description ψ_E, the part of live load that belongs to the seismic mass; default 0.3: ψ₂ of categories A and B, φ = 1 */
+                                psiE?: number;
                                 /** @description Lower bound of the design spectrum over a_g; default 0.2 */
                                 beta?: number;
                                 /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
@@ -2702,13 +2722,20 @@ export interface operations {
                                 R: number;
                                 /** @description Ω₀; default 1 */
                                 overstrength?: number;
+                                /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                                reduceOverstrength?: boolean;
+                                /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                                lightFrame?: boolean;
                                 /** @description Default R */
                                 Cd?: number;
                                 /** @description Iₑ; default 1 */
                                 importance?: number;
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
-                                /** @enum {string} */
+                                /**
+                                 * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                                 * @enum {string}
+                                 */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
@@ -2773,13 +2800,20 @@ export interface operations {
                                 R: number;
                                 /** @description Ω₀; default 1 */
                                 overstrength?: number;
+                                /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                                reduceOverstrength?: boolean;
+                                /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                                lightFrame?: boolean;
                                 /** @description Default R */
                                 Cd?: number;
                                 /** @description Iₑ; default 1 */
                                 importance?: number;
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
-                                /** @enum {string} */
+                                /**
+                                 * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                                 * @enum {string}
+                                 */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
@@ -2854,6 +2888,8 @@ export interface operations {
                                 Ct?: number;
                                 /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
                                 lambda?: number;
+                                /** @description ψ_E, the part of live load that belongs to the seismic mass; default 0.3: ψ₂ of categories A and B, φ = 1 */
+                                psiE?: number;
                                 /** @description Lower bound of the design spectrum over a_g; default 0.2 */
                                 beta?: number;
                                 /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
@@ -2928,6 +2964,21 @@ export interface operations {
                             kind: "seismic" | "wind";
                             /** @constant */
                             from: "basis";
+                        } | {
+                            id: string;
+                            name?: string;
+                            /** @description The basis whose combinations it enters; default that of its first part */
+                            basis?: string;
+                            /** @enum {string} */
+                            kind: "seismic" | "wind";
+                            /** @constant */
+                            from: "combined";
+                            parts: {
+                                /** @description A load case of the file that has its own forces */
+                                case: string;
+                                /** @description Factor on its effects, not 0 */
+                                factor: number;
+                            }[];
                         })[];
                         /** @description A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it. */
                         combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
@@ -3071,6 +3122,8 @@ export interface operations {
                             weight?: {
                                 /** @description Seismic weight of floor or roof [force/length²]; default 0 */
                                 area?: number;
+                                /** @description Characteristic live load, of which the seismic mass of EN 1998-1 takes the part ψ_E [force/length²]; default 0 */
+                                live?: number;
                                 zones?: {
                                     /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                                     id: string;
@@ -3082,6 +3135,8 @@ export interface operations {
                                     ][];
                                     /** @description Replaces the diaphragm’s own area weight inside the outline [force/length²] */
                                     area: number;
+                                    /** @description Live load inside the outline [force/length²]; default the diaphragm’s own */
+                                    live?: number;
                                 }[];
                                 /** @description Façades and partitions, added to area weights */
                                 lines?: {
@@ -3214,13 +3269,20 @@ export interface operations {
                             R: number;
                             /** @description Ω₀; default 1 */
                             overstrength?: number;
+                            /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                            reduceOverstrength?: boolean;
+                            /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                            lightFrame?: boolean;
                             /** @description Default R */
                             Cd?: number;
                             /** @description Iₑ; default 1 */
                             importance?: number;
                             /** @description ρ; default 1 */
                             redundancy?: number;
-                            /** @enum {string} */
+                            /**
+                             * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                             * @enum {string}
+                             */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
@@ -3282,13 +3344,20 @@ export interface operations {
                             R: number;
                             /** @description Ω₀; default 1 */
                             overstrength?: number;
+                            /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                            reduceOverstrength?: boolean;
+                            /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                            lightFrame?: boolean;
                             /** @description Default R */
                             Cd?: number;
                             /** @description Iₑ; default 1 */
                             importance?: number;
                             /** @description ρ; default 1 */
                             redundancy?: number;
-                            /** @enum {string} */
+                            /**
+                             * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                             * @enum {string}
+                             */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
@@ -3360,6 +3429,8 @@ export interface operations {
                             Ct?: number;
                             /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
                             lambda?: number;
+                            /** @description ψ_E, the part of live load that belongs to the seismic mass; default 0.3: ψ₂ of categories A and B, φ = 1 */
+                            psiE?: number;
                             /** @description Lower bound of the design spectrum over a_g; default 0.2 */
                             beta?: number;
                             /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
@@ -3396,13 +3467,20 @@ export interface operations {
                             R: number;
                             /** @description Ω₀; default 1 */
                             overstrength?: number;
+                            /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                            reduceOverstrength?: boolean;
+                            /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                            lightFrame?: boolean;
                             /** @description Default R */
                             Cd?: number;
                             /** @description Iₑ; default 1 */
                             importance?: number;
                             /** @description ρ; default 1 */
                             redundancy?: number;
-                            /** @enum {string} */
+                            /**
+                             * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                             * @enum {string}
+                             */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
@@ -3467,13 +3545,20 @@ export interface operations {
                             R: number;
                             /** @description Ω₀; default 1 */
                             overstrength?: number;
+                            /** @description Take 0.5 off an Ω₀ of 2.5 or more where every diaphragm is flexible; default false */
+                            reduceOverstrength?: boolean;
+                            /** @description Braced by light-frame shear walls alone, whose collectors need not take Ω₀; default false */
+                            lightFrame?: boolean;
                             /** @description Default R */
                             Cd?: number;
                             /** @description Iₑ; default 1 */
                             importance?: number;
                             /** @description ρ; default 1 */
                             redundancy?: number;
-                            /** @enum {string} */
+                            /**
+                             * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
+                             * @enum {string}
+                             */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
@@ -3548,6 +3633,8 @@ export interface operations {
                             Ct?: number;
                             /** @description λ; default 0.85 where T₁ ≤ 2·T_C and the building has more than two storeys, else 1 */
                             lambda?: number;
+                            /** @description ψ_E, the part of live load that belongs to the seismic mass; default 0.3: ψ₂ of categories A and B, φ = 1 */
+                            psiE?: number;
                             /** @description Lower bound of the design spectrum over a_g; default 0.2 */
                             beta?: number;
                             /** @description γd on the forces of diaphragms; default 1.3, the value for brittle failure */
@@ -3622,6 +3709,21 @@ export interface operations {
                         kind: "seismic" | "wind";
                         /** @constant */
                         from: "basis";
+                    } | {
+                        id: string;
+                        name?: string;
+                        /** @description The basis whose combinations it enters; default that of its first part */
+                        basis?: string;
+                        /** @enum {string} */
+                        kind: "seismic" | "wind";
+                        /** @constant */
+                        from: "combined";
+                        parts: {
+                            /** @description A load case of the file that has its own forces */
+                            case: string;
+                            /** @description Factor on its effects, not 0 */
+                            factor: number;
+                        }[];
                     })[];
                     /** @description A published set by name, or a list; default none, which leaves the unfactored components. The sets of ASCE 7-22 take S from a ground snow load of strength level, as that edition maps it. */
                     combinations?: ("ASCE 7-16 allowable" | "ASCE 7-16 strength" | "ASCE 7-22 allowable" | "ASCE 7-22 strength" | "EN 1990") | {
@@ -4173,7 +4275,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4187,6 +4289,8 @@ export interface operations {
                                 number,
                                 number
                             ];
+                            /** @description The rule that governed it, where several compete */
+                            governs?: string;
                         }[];
                         diagrams: ({
                             /** @constant */
@@ -4457,7 +4561,7 @@ export interface operations {
             query?: {
                 member?: string;
                 kind?: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
-                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                 level?: string;
                 case?: string;
                 sense?: "1" | "-1";
@@ -4489,7 +4593,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4503,6 +4607,8 @@ export interface operations {
                                 number,
                                 number
                             ];
+                            /** @description The rule that governed it, where several compete */
+                            governs?: string;
                         }[];
                         next: number | null;
                     };
@@ -4971,7 +5077,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             case: string;
                             sense: 1 | -1;
                             combination?: string;
@@ -5101,7 +5207,7 @@ export interface operations {
         parameters: {
             query: {
                 member: string;
-                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                 case: string;
                 sense: "1" | "-1";
                 combination?: string;
@@ -5123,7 +5229,7 @@ export interface operations {
                     "application/json": {
                         member: string;
                         /** @enum {string} */
-                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                         case: string;
                         /** @enum {string} */
                         sense: "1" | "-1";
