@@ -106,11 +106,14 @@ function heapOf(work: () => unknown): number {
   return kept === undefined ? NaN : (after - before) / 2 ** 20;
 }
 
+/** `npm run bench -- semi-rigid` times that behaviour alone. */
+const only = process.argv[2];
 const cell = (value: number, digits = 1): string => value.toFixed(digits).padStart(9);
 console.log(
   'behaviour  storeys  lines     rows   read ms  analyse ms  parse+print ms  ratio  heap MiB  µs a storey·line',
 );
 for (const behaviour of ['flexible', 'rigid'] as const) {
+  if (only !== undefined && only !== behaviour) continue;
   for (const { storeys, lines } of SIZES) {
     const file = building(storeys, lines, behaviour);
     const input = JSON.stringify(file);
@@ -141,7 +144,9 @@ for (const behaviour of ['flexible', 'rigid'] as const) {
   }
 }
 
-benchSemiRigid((meshSize) => {
+if (only === undefined || only === 'semi-rigid') benchSemiRigid(semiRigid);
+
+function semiRigid(meshSize: number): Building {
   const file = building(12, 24, 'rigid');
   return {
     ...file,
@@ -160,4 +165,4 @@ benchSemiRigid((meshSize) => {
           }),
     })),
   };
-});
+}
