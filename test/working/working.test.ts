@@ -86,7 +86,7 @@ function unresolved(
 }
 
 /** Kinds of members whose every quantity has a working. */
-const KINDS: readonly DemandKind[] = ['wall-line', 'pier', 'support'];
+const KINDS: readonly DemandKind[] = ['level', 'wall-line', 'pier', 'support'];
 
 describe.each(files)('every wall demand of $name', ({ url }) => {
   test('has a working whose printed steps a checker can recompute, down to the file', () => {
@@ -96,6 +96,7 @@ describe.each(files)('every wall demand of $name', ({ url }) => {
       largest.set(unit, Math.max(largest.get(unit) ?? 0, Math.abs(value)));
     const wrong: string[] = [];
     let count = 0;
+    const sound = new Set<string>();
     const demands = context.analysis.demands.filter(({ kind }) => KINDS.includes(kind));
     for (const demand of demands) {
       const at = referenceOf(demand);
@@ -107,8 +108,11 @@ describe.each(files)('every wall demand of $name', ({ url }) => {
       count += 1;
       const earlier = new Map<string, number>();
       for (const step of working.steps) {
-        const fault = recomputed(step);
-        if (fault !== undefined) wrong.push(`${at}: ${fault}`);
+        // The same step stands in many workings.
+        const printed = `${step.formula} ${step.shown} ${step.values.map((value) => value.shown).join(' ')}`;
+        const fault = sound.has(printed) ? undefined : recomputed(step);
+        if (fault === undefined) sound.add(printed);
+        else wrong.push(`${at}: ${fault}`);
         for (const value of step.values) {
           const broken = unresolved(context, value, earlier);
           if (broken !== undefined) wrong.push(`${at}: ${step.symbol}: ${broken}`);

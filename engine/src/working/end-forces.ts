@@ -91,10 +91,10 @@ function combined(
   const terms: string[] = [];
   const values: Value[] = [];
   const take = (cause: Cause, factor: Value | undefined): void => {
-    const force = postForce(made, place, cause);
+    const force = component(made, place, cause, demand);
     if (force === undefined) return;
-    terms.push(factor === undefined ? force.symbol : `${factor.symbol}·${force.symbol}`);
-    values.push(...(factor === undefined ? [] : [factor]), force);
+    terms.push(factor === undefined ? force.text : `${factor.symbol}·${force.text}`);
+    values.push(...(factor === undefined ? [] : [factor]), ...force.values);
   };
   const gravity = (['D', 'L', 'Lr', 'S'] as const).find((name) => name === demand.case);
   const lateral: Cause = { case: demand.case, sense: demand.sense };
@@ -107,4 +107,27 @@ function combined(
     what: `compression at the foot of ${place.foot.pier.key}/${place.end}`,
     clause: demand.combination,
   });
+}
+
+type Term = { readonly text: string; readonly values: readonly Value[] };
+
+/** The post's compression from one cause: by the rows of its support where it has one and this is another row, else by its steps. */
+function component(made: PostSteps, place: PostPlace, cause: Cause, demand: Demand): Term | undefined {
+  const { context } = made;
+  const { foot, end } = place;
+  const carried = demand.kind === 'support' && demand.member.split('/').length === 4;
+  const support = foot.storey.level === 1 ? `${foot.line.line.id}/${foot.pier.pier.id}/${end}` : demand.member;
+  const hasRows = carried || foot.storey.level === 1;
+  if (!hasRows || (demand.member === support && demand.combination === undefined)) {
+    const force = postForce(made, place, cause);
+    return force === undefined ? undefined : { text: force.symbol, values: [force] };
+  }
+  const of = cause.gravity === undefined ? cause : { case: cause.gravity, sense: 1 as const };
+  const tag = `${cause.gravity ?? 'E'}_${end}`;
+  const bearing = fromDemand(context, `B_${tag}`, of, support, 'bearing');
+  const uplift = fromDemand(context, `U_${tag}`, of, support, 'uplift');
+  if (bearing === undefined || uplift === undefined) return undefined;
+  if (uplift.value === 0) return { text: bearing.symbol, values: [bearing] };
+  if (bearing.value === 0) return { text: `(−${uplift.symbol})`, values: [uplift] };
+  throw new Error(`${support} is pulled and pushed at once`);
 }

@@ -15,12 +15,26 @@ const TOKEN = /\s*(?:(\d+(?:\.\d+)?)|([\p{L}][\p{L}\p{N}_′]*)|([+−·/^(),]))
 /** What is left of a sum below this part of its addends is their rounding, and counts as 0. */
 const ROUNDING = 1e-13;
 
+/** Workings of one kind repeat their formulas: what was read is kept, up to so many. */
+const known = new Map<string, Expression>();
+const KEPT = 10_000;
+
 /**
- * Reads an expression with + − · / ^ ( ), numbers, symbols, and abs, max, min, sqrt.
+ * An expression with + − · / ^ ( ), numbers, symbols, and abs, max, min, sqrt.
  *
- * @throws Error where the text is no expression
+ * @throws Error where the text is none
  */
 export function expressionOf(text: string): Expression {
+  let expression = known.get(text);
+  if (expression === undefined) {
+    expression = readExpression(text);
+    if (known.size >= KEPT) known.clear();
+    known.set(text, expression);
+  }
+  return expression;
+}
+
+function readExpression(text: string): Expression {
   const tokens = tokensOf(text);
   let at = 0;
   const peek = (): string | undefined => tokens[at];

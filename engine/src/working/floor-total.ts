@@ -7,7 +7,13 @@ import { weightFactors, weightsOf, type AreaWeight, type Weighed } from './area-
 import type { Steps, Value } from './steps.js';
 
 /** @param inertias how the level's force lies on each of the diaphragms that count */
-export function totalStep(context: Context, inertias: readonly Inertia[], steps: Steps, symbol = 'N'): Value {
+export function totalStep(
+  context: Context,
+  inertias: readonly Pick<Inertia, 'diaphragm' | 'frame' | 'spread' | 'facade'>[],
+  steps: Steps,
+  symbol = 'N',
+  named?: string,
+): Value {
   const { length, force } = context.units;
   const terms: string[] = [];
   const values: Value[] = [];
@@ -83,7 +89,7 @@ export function totalStep(context: Context, inertias: readonly Inertia[], steps:
     facade: 'load of the façade',
   }[spread];
   return steps.add(steps.fresh(symbol), terms.length === 0 ? '0' : terms.join(' + '), values, unit, {
-    what: `${what} of the level`,
+    what: named ?? `${what} of the level`,
   });
 }
 

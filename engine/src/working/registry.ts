@@ -9,6 +9,19 @@ import {
   supportShear,
   supportUplift,
 } from './end-forces.js';
+import { centreOfRigidity } from './centre-of-rigidity.js';
+import { levelDiaphragmForce, levelForce } from './level-forces.js';
+import {
+  bowDeflection,
+  bowRatio,
+  drift,
+  levelOverturning,
+  storeyShear,
+  torsion,
+  torsionalAmplification,
+  torsionalRatio,
+} from './levels.js';
+import { centreOfMass } from './mass.js';
 import { pierShear, pierUnitShear } from './piers.js';
 import type { Steps } from './steps.js';
 import { lineOverturning, lineReaction, lineShear } from './wall-lines.js';
@@ -17,6 +30,22 @@ import { lineOverturning, lineReaction, lineShear } from './wall-lines.js';
 export type Explain = (context: Context, demand: Demand, steps: Steps) => void;
 
 const WORKINGS: Readonly<Partial<Record<DemandKind, Readonly<Partial<Record<Quantity, Explain>>>>>> = {
+  level: {
+    force: levelForce,
+    'diaphragm-force': levelDiaphragmForce,
+    'storey-shear': storeyShear,
+    'overturning-moment': levelOverturning,
+    'centre-of-mass-x': centreOfMass(0),
+    'centre-of-mass-y': centreOfMass(1),
+    'centre-of-rigidity-x': centreOfRigidity('x'),
+    'centre-of-rigidity-y': centreOfRigidity('y'),
+    torsion,
+    'torsional-ratio': torsionalRatio,
+    'torsional-amplification': torsionalAmplification,
+    drift,
+    deflection: bowDeflection,
+    'deflection-ratio': bowRatio,
+  },
   'wall-line': { reaction: lineReaction, shear: lineShear, 'overturning-moment': lineOverturning },
   pier: {
     shear: pierShear,

@@ -4,8 +4,9 @@ import type { Profile } from '../geometry/profile.js';
 import type { DiaphragmOutcome } from '../path/descent.js';
 import type { Demand } from '../path/result.js';
 import type { LineModel } from '../walls/wall-line.js';
-import { casePath, fromDemand, fromFile, readOff, runOf, type Context } from './context.js';
+import { casePath, fromDemand, fromFile, linePath, readOff, runOf, type Context } from './context.js';
 import { flexibleGives } from './flexible-reaction.js';
+import { bodyMember } from './body-member.js';
 import { levelInertias, totalStep } from './floor-total.js';
 import { pushStep, type ForceSet } from './level-push.js';
 import { alongAxis, armStep, cosinesOf, cosineValues, joined, stiffnessStep, type Cosines } from './plan-arms.js';
@@ -13,22 +14,21 @@ import type { Steps, Value } from './steps.js';
 
 type Spring = { readonly k: Value; readonly r: Value; readonly cosines: Cosines };
 
+/** Whether the accidental eccentricity is taken as stated, or amplified. */
+export type Torsion = 'plain' | 'amplified';
+
 export type RigidSteps = {
   readonly context: Context;
   readonly steps: Steps;
   readonly springs: ReadonlyMap<LineModel, Spring>;
   /** What arrives from walls above and from flexible diaphragms beside, along the line's axis. */
   readonly arriving: ReadonlyMap<LineModel, readonly Value[]>;
+  /** Place of the centre of rigidity across the load. */
+  readonly acrossR: Value;
   readonly ux: Value;
   readonly uy: Value;
   readonly turn: Value;
 };
-
-/** Where the rows of a diaphragm that moves as a body stand: at its level, or under its own key where a level has several. */
-export function bodyMember(context: Context, { diaphragm }: DiaphragmOutcome): string {
-  const level = context.model.levels[diaphragm.level];
-  return level !== undefined && level.diaphragms.length === 1 ? level.id : diaphragm.key;
-}
 
 /** The centre of rigidity, as demands of the level. */
 export function centreOf(
@@ -52,6 +52,7 @@ export function resultantSteps(
   outcome: DiaphragmOutcome,
   set: ForceSet,
   steps: Steps,
+  torsion: Torsion = 'amplified',
 ) {
   const { diaphragm, pushed } = outcome;
   const profile = diaphragm.profiles[pushed.inertia.frame] as Profile;
@@ -67,7 +68,7 @@ export function resultantSteps(
       what: `part of the level’s force on diaphragm ${diaphragm.key}`,
     });
   }
-  const place = placeOfPush(context, of, outcome, steps);
+  const place = placeOfPush(context, of, outcome, steps, torsion);
   const acrossR = acrossValue(context, centre, s, steps, 's_R', 'centre of rigidity across the load');
   const arms = new Map<LineModel, Value>();
   const arriving = new Map<LineModel, Value[]>();
@@ -78,7 +79,7 @@ export function resultantSteps(
     return arm;
   };
   for (const line of outcome.taken.keys()) {
-    const values = arrives(context, of, line, outcome, steps);
+    const values = arrives(context, of, line, outcome, steps, torsion);
     if (values.length > 0) arriving.set(line, values);
   }
   const turns = s[0] * t[1] - s[1] * t[0] > 0;
@@ -90,11 +91,11 @@ export function resultantSteps(
       values.push(each, armOf(line));
     }
   }
-  const torsion = steps.add('T', joined(terms), values, context.units.moment, {
+  const moment = steps.add('T', joined(terms), values, context.units.moment, {
     what: 'moment about the centre of rigidity, anticlockwise',
     clause: 'statics',
   });
-  return { force, arriving, armOf, torsion, frame: profile.frame };
+  return { force, arriving, armOf, moment, acrossR, frame: profile.frame };
 }
 
 /** Steps down to the motion of the body: along x, along y, and about the centre of rigidity. */
@@ -104,10 +105,11 @@ export function rigidBody(
   outcome: DiaphragmOutcome,
   set: ForceSet,
   steps: Steps,
+  torsion: Torsion = 'amplified',
 ): RigidSteps {
   const model = outcome.rigid?.model;
   if (model === undefined) throw new Error(`${outcome.diaphragm.key} is no body`);
-  const { force, arriving, armOf, torsion, frame } = resultantSteps(context, of, outcome, set, steps);
+  const { force, arriving, armOf, moment, acrossR, frame } = resultantSteps(context, of, outcome, set, steps, torsion);
   const springs = new Map<LineModel, Spring>();
   for (const { line } of model.springs) {
     const storey = line.storeys[outcome.diaphragm.level];
@@ -187,8 +189,8 @@ export function rigidBody(
     ux = steps.add('u_x', '(K_yy·F_x − K_xy·F_y)/(K_xx·K_yy − K_xy^2)', values, moves, solved);
     uy = steps.add('u_y', '(K_xx·F_y − K_xy·F_x)/(K_xx·K_yy − K_xy^2)', values, moves, solved);
   }
-  const turn = steps.add('θ', 'T/J', [torsion, j], '1', { what: 'rotation', clause: 'K·u = F' });
-  return { context, steps, springs, arriving, ux, uy, turn };
+  const turn = steps.add('θ', 'T/J', [moment, j], '1', { what: 'rotation', clause: 'K·u = F' });
+  return { context, steps, springs, arriving, acrossR, ux, uy, turn };
 }
 
 /** The line's share: its direct part and its torsional part. */
@@ -222,12 +224,14 @@ function arrives(
   line: LineModel,
   { diaphragm }: DiaphragmOutcome,
   steps: Steps,
+  torsion: Torsion,
 ): Value[] {
   const values: Value[] = [];
   const above = context.model.levels[diaphragm.level + 1];
   if (above !== undefined && line.storeys[above.index] !== undefined) {
     const shear = fromDemand(context, `V_above_${line.index + 1}`, of, `${line.line.id}/${above.id}`, 'shear');
-    if (shear !== undefined) values.push(shear);
+    if (shear !== undefined)
+      values.push(torsion === 'amplified' ? shear : beforeAmplification(context, of, line, above.index, shear));
   }
   for (const beside of runOf(context, of.case).outcomes[diaphragm.level]?.diaphragms ?? []) {
     if (beside.rigid !== undefined || !beside.given.has(line)) continue;
@@ -237,12 +241,28 @@ function arrives(
   return values;
 }
 
+/** A wall's shear from above before any level's torsion was amplified: no demand of the table where it differs. */
+function beforeAmplification(
+  context: Context,
+  of: Pick<Demand, 'case' | 'sense'>,
+  line: LineModel,
+  level: number,
+  shear: Value,
+): Value {
+  const run = runOf(context, of.case);
+  const plain = ((run.plain ?? run).outcomes[level]?.below[line.index]?.[0] ?? 0) * of.sense;
+  if (plain === shear.value) return shear;
+  const what = 'shear of the storey above with the accidental eccentricity as stated';
+  return readOff(context, shear.symbol, linePath(line), plain, shear.unit, what);
+}
+
 /** Where the level's force acts across the load: where it lies, moved by the accidental eccentricity. */
 export function placeOfPush(
   context: Context,
   of: Pick<Demand, 'case' | 'sense'>,
   outcome: DiaphragmOutcome,
   steps: Steps,
+  torsion: Torsion = 'amplified',
 ): Value {
   const { diaphragm, pushed } = outcome;
   const { inertia } = pushed;
@@ -272,7 +292,7 @@ export function placeOfPush(
   const width = readOff(context, 'B', outline, profile.to - profile.from, length, 'width across the load');
   const sign = subCase.eccentricity < 0 ? '−' : '+';
   const amplified =
-    amplification(diaphragm.level) === 1
+    amplification(diaphragm.level) === 1 || torsion === 'plain'
       ? undefined
       : fromDemand(context, 'A_x', of, bodyMember(context, outcome), 'torsional-amplification');
   const by = amplified === undefined ? 'ε·B' : 'A_x·ε·B';

@@ -9,9 +9,6 @@ export const FIGURES = 6;
 /** A number is known to no more than this many. */
 const ALL = 17;
 
-/** What is below this part of a step's largest addend is rounding. */
-const NOTHING = 1e-9;
-
 export type ShownStep = { readonly values: readonly string[]; readonly result: string };
 
 /**
@@ -19,21 +16,24 @@ export type ShownStep = { readonly values: readonly string[]; readonly result: s
  * @param evaluate the step's formula for such values
  */
 export function shownStep(values: readonly number[], evaluate: (values: readonly number[]) => number): ShownStep {
-  const result = shown(evaluate(values), FIGURES);
+  const result = rounded(evaluate(values), FIGURES);
   for (let figures = FIGURES; figures < ALL; figures += 2) {
-    const printed = values.map((value) => shown(value, figures));
-    if (shown(evaluate(printed.map(Number)), FIGURES) === result) return { values: printed, result };
+    const printed = values.map((value) => rounded(value, figures));
+    if (rounded(evaluate(printed), FIGURES) === result) return { values: printed.map(String), result: String(result) };
   }
-  return { values: values.map(String), result };
+  return { values: values.map((value) => String(value || 0)), result: String(result) };
 }
 
 /** A number to so many significant figures, without zeros at its end; with an exponent where it is very large or very small. */
 export function shown(value: number, figures: number): string {
-  if (value === 0) return '0';
-  return String(Number(value.toPrecision(figures)));
+  return String(rounded(value, figures));
 }
 
-/** Whether a result is no more than the rounding of what it was made from. */
-export function negligible(result: number, beside: number): boolean {
-  return Math.abs(result) <= NOTHING * beside;
+function rounded(value: number, figures: number): number {
+  // Small whole numbers and halves are what they are.
+  return value === 0
+    ? 0
+    : Number.isInteger(value * 2) && Math.abs(value) < 1e5
+      ? value
+      : Number(value.toPrecision(figures));
 }
