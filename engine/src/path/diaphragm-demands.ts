@@ -118,7 +118,7 @@ function connectionDemands(
 }
 
 /** Unit shear along a stated collector that is shorter than the cut, at either end of a span. */
-function shearAtCollectors(inner: InnerForces, span: SpanRange, level: string): number {
+export function shearAtCollectors(inner: InnerForces, span: SpanRange, level: string): number {
   let largest = 0;
   for (const { line, cut } of inner.diaphragm.touches) {
     if (line.family !== inner.frame || (line.line.collectors ?? []).every((collector) => collector.level !== level))

@@ -86,7 +86,7 @@ export function straightInto(source: SpanSource, s: number): Value[] {
 }
 
 /** Lines of one plane share by stiffness where every pier states one, else by length. */
-function shareOfSupport(
+export function shareOfSupport(
   context: Context,
   lines: readonly LineModel[],
   own: LineModel,

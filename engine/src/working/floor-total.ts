@@ -11,7 +11,7 @@ export function totalStep(
   context: Context,
   inertias: readonly Pick<Inertia, 'diaphragm' | 'frame' | 'spread' | 'facade'>[],
   steps: Steps,
-  symbol = 'N',
+  symbol = 'Σn',
   named?: string,
 ): Value {
   const { length, force } = context.units;

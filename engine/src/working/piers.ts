@@ -9,7 +9,7 @@ export function pierShear(context: Context, demand: Demand, steps: Steps): void 
   const line = fromDemand(context, 'V_line', demand, `${place.line.line.id}/${place.level}`, 'shear');
   if (line === undefined) throw new Error(`no shear of the line of ${demand.member}`);
   const share = pierShare(context, place, steps);
-  steps.add('V', 'V_line·c', [line, share], demand.unit, { clause: 'equilibrium of the wall line' });
+  steps.add('V', `V_line·${share.symbol}`, [line, share], demand.unit, { clause: 'equilibrium of the wall line' });
 }
 
 export function pierUnitShear(context: Context, demand: Demand, steps: Steps): void {
@@ -28,16 +28,16 @@ export function pierUnitShear(context: Context, demand: Demand, steps: Steps): v
 }
 
 /** A pier's part of its line: by length, or by stiffness. */
-function pierShare(context: Context, place: PierPlace, steps: Steps): Value {
+export function pierShare(context: Context, place: PierPlace, steps: Steps): Value {
   const { line, storey, pier } = place;
   const parts = storey.piers.map((each, i) => {
     const stiff = line.line.shareBy === 'stiffness' && storey.stated;
     return stiff
-      ? pierStiffness(context, { ...place, pier: each }, `k_${i + 1}`, steps)
-      : pierLength(context, { ...place, pier: each }, `b_${i + 1}`, steps);
+      ? pierStiffness(context, { ...place, pier: each }, steps.fresh(`k_${i + 1}`), steps)
+      : pierLength(context, { ...place, pier: each }, steps.fresh(`b_${i + 1}`), steps);
   });
   const own = parts[storey.piers.indexOf(pier)] as Value;
-  return steps.add('c', `${own.symbol}/(${sumOf(parts)})`, parts, '1', {
+  return steps.add(steps.fresh('c'), `${own.symbol}/(${sumOf(parts)})`, parts, '1', {
     what: `part of line ${line.line.id} that goes to pier ${pier.pier.id}`,
     clause: `${linePath(line)}.shareBy: ${line.line.shareBy ?? 'length'}`,
   });

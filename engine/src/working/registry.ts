@@ -1,5 +1,6 @@
 /** The workings by kind of member and quantity: each fills the steps of one demand. */
 import type { Demand, DemandKind, Quantity } from '../path/result.js';
+import { collectorAxial } from './collectors.js';
 import type { Context } from './context.js';
 import {
   endCompression,
@@ -22,7 +23,9 @@ import {
   torsionalRatio,
 } from './levels.js';
 import { centreOfMass } from './mass.js';
+import { openingChord, openingCorner, openingMoment } from './openings.js';
 import { pierShear, pierUnitShear } from './piers.js';
+import { spanChord, spanMoment, spanShear, spanUnitShear } from './spans.js';
 import type { Steps } from './steps.js';
 import { lineOverturning, lineReaction, lineShear } from './wall-lines.js';
 
@@ -46,6 +49,14 @@ const WORKINGS: Readonly<Partial<Record<DemandKind, Readonly<Partial<Record<Quan
     deflection: bowDeflection,
     'deflection-ratio': bowRatio,
   },
+  'diaphragm-span': {
+    shear: spanShear,
+    'unit-shear': spanUnitShear,
+    moment: spanMoment,
+    'chord-force': spanChord,
+  },
+  opening: { 'secondary-moment': openingMoment, 'chord-force': openingChord, 'corner-force': openingCorner },
+  collector: { 'axial-tension': collectorAxial, 'axial-compression': collectorAxial },
   'wall-line': { reaction: lineReaction, shear: lineShear, 'overturning-moment': lineOverturning },
   pier: {
     shear: pierShear,

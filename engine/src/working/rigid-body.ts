@@ -60,11 +60,11 @@ export function resultantSteps(
   const centre = centreOf(context, of, outcome, 'rigidity');
   const level = context.model.levels[diaphragm.level];
   if (level === undefined) throw new Error(`no level of ${diaphragm.key}`);
-  let force = pushStep(context, of, level.id, set, 1, steps);
+  let force = pushStep(context, of, level.id, set, 1, steps, steps.fresh('F'));
   if (level.diaphragms.length > 1) {
     const own = totalStep(context, [pushed.inertia], steps, 'n');
     const whole = totalStep(context, levelInertias(context, of, level.index), steps);
-    force = steps.add('F_d', `F·${own.symbol}/${whole.symbol}`, [force, own, whole], force.unit, {
+    force = steps.add('F_d', `${force.symbol}·${own.symbol}/${whole.symbol}`, [force, own, whole], force.unit, {
       what: `part of the level’s force on diaphragm ${diaphragm.key}`,
     });
   }
