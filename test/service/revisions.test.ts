@@ -11,6 +11,7 @@ import { foundationCsv } from '@groundward/engine/foundation/csv';
 import { analyse } from '@groundward/engine/path/analyse';
 import { trace } from '@groundward/engine/path/trace';
 import type { Analysis, Demand } from '@groundward/engine/path/result';
+import { main } from '../../engine/command/groundward.js';
 import { demoFile, owner, startService, type RevisionBody, type Service } from './service.js';
 
 let service: Service;
@@ -117,6 +118,38 @@ describe('reading', () => {
     ).body as typeof comparison;
     expect(found.changes).toEqual(JSON.parse(JSON.stringify(comparison.changes)));
     expect(found.edits.map((edit) => edit.what).sort()).toEqual(comparison.edits.map((edit) => edit.what).sort());
+  });
+
+  test('the working of a demand: the bytes that the command line prints', async () => {
+    const asked = { member: '3/L2', quantity: 'shear', case: 'EY/+e', sense: '-1' };
+    const answer = await ada
+      .get(`${at(0)}/working`)
+      .query(asked)
+      .expect(200);
+    let printed = '';
+    const words = ['--case', asked.case, '--sense', asked.sense, '--json'];
+    const code = await main(['explain', '-', asked.member, asked.quantity, ...words], {
+      readFile: () => Promise.reject(new Error('no file')),
+      readStdin: () => Promise.resolve(demoFile('1-first-design')),
+      out: (text) => (printed += text),
+      err: () => undefined,
+    });
+    expect(code).toBe(0);
+    expect(`${answer.text}\n`).toBe(printed);
+    const chosen = await ada
+      .get(`${at(0)}/working`)
+      .query({ member: '1/L2/1a', quantity: 'end-tension', combination: '0.6D+0.7E' })
+      .expect(200);
+    expect((chosen.body as { demand: Demand }).demand).toMatchObject({ sense: 1, combination: '0.6D+0.7E' });
+    const missing = await ada
+      .get(`${at(0)}/working`)
+      .query({ ...asked, member: 'nothing' })
+      .expect(404);
+    expect((missing.body as { detail: string }).detail).toContain('no demand of member nothing');
+    await ada
+      .get(`${at(0)}/working`)
+      .query({ ...asked, quantity: 'colour' })
+      .expect(400);
   });
 
   test('causes on request: the same shares as the engine’s own, asked twice and worked out once', async () => {

@@ -9,6 +9,7 @@ import './sheet.css';
 import './controls.css';
 import './tables.css';
 import './marks.css';
+import './working.css';
 import './media.css';
 
 export const metadata: Metadata = {

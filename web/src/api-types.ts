@@ -239,6 +239,22 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/projects/{projectId}/revisions/{revisionId}/working": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get: operations["AnalysesController_working"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/projects/{projectId}/revisions/{revisionId}/foundation": {
         parameters: {
             query?: never;
@@ -4802,6 +4818,203 @@ export interface operations {
             };
             /** @description Problem */
             404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+        };
+    };
+    AnalysesController_working: {
+        parameters: {
+            query: {
+                member: string;
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                /** @description Default the case with the largest value */
+                case?: string;
+                /** @description Default 1 */
+                sense?: "1" | "-1";
+                /** @description Default the unfactored component where there is one */
+                combination?: string;
+            };
+            header?: never;
+            path: {
+                projectId: string;
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description Done */
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": {
+                        /** @constant */
+                        schema: "groundward.working/1";
+                        /** @description Every number in the file and in its results is in these units and their products. */
+                        units: {
+                            /** @constant */
+                            length: "ft";
+                            /** @constant */
+                            force: "kip";
+                        } | {
+                            /** @constant */
+                            length: "m";
+                            /** @constant */
+                            force: "kN";
+                        };
+                        demand: {
+                            /** @description Key of the member, such as `1/L2/1a` */
+                            member: string;
+                            /** @enum {string} */
+                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            /** @enum {string} */
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
+                            case: string;
+                            /** @description 1 along the case’s direction, -1 against it */
+                            sense: 1 | -1;
+                            /** @description Absent for the unfactored component */
+                            combination?: string;
+                            value: number;
+                            unit: string;
+                            /** @description Place on plan where the value occurs [length] */
+                            at?: [
+                                number,
+                                number
+                            ];
+                        };
+                        /** @description The last step gives the demand */
+                        steps: {
+                            symbol: string;
+                            /** @description What the step finds */
+                            what?: string;
+                            /** @description `symbol = expression` in the symbols of `values`, with + − · / ^ ( ) and abs, max, min, sqrt */
+                            formula: string;
+                            values: {
+                                symbol: string;
+                                value: number;
+                                /** @description As it is printed: with the digits from which the printed result follows by the formula */
+                                shown: string;
+                                unit: string;
+                                /** @description What it is, where the symbol alone does not say */
+                                what?: string;
+                                /** @description Where it comes from: the symbol of an earlier step; a demand, `member quantity case sense` with its combination behind it where there is one; a path into the building file, such as `levels[1].elevation`, where a number stands, or where the drawing or the solution stands from which the value was read; or `default` and the path of what the file leaves out */
+                                from?: string;
+                            }[];
+                            result: number;
+                            /** @description As it is printed: with the digits from which the printed result follows by the formula */
+                            shown: string;
+                            unit: string;
+                            /** @description Clause of a standard, or the law */
+                            clause?: string;
+                        }[];
+                    };
+                };
+            };
+            /** @description Problem */
+            400: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            401: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            404: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": {
+                        type: string;
+                        title: string;
+                        status: number;
+                        detail: string;
+                        instance: string;
+                        /** @description The same codes as the engine’s faults */
+                        code: string;
+                        faults?: {
+                            code: string;
+                            path: string;
+                            found: string;
+                            expected: string;
+                            hint?: string;
+                        }[];
+                        /** @description With 412: what is saved now */
+                        current?: unknown;
+                    };
+                };
+            };
+            /** @description Problem */
+            503: {
                 headers: {
                     [name: string]: unknown;
                 };

@@ -1,8 +1,12 @@
 import { Inject, Injectable } from '@nestjs/common';
+import { faultSentence } from '@groundward/engine/building/fault';
+import type { Wanted } from '@groundward/engine/working/explain';
+import type { Working } from '@groundward/engine/working/result';
 import { trace } from '@groundward/engine/path/trace';
 import type { Analysis } from '@groundward/engine/path/result';
 import type { Trace } from '@groundward/engine/path/trace-result';
 import { DatabaseService } from '../database/database.service.js';
+import { EngineService } from '../engine/engine.service.js';
 import { notFound, Problem } from '../faults/problem.js';
 import { RevisionsService } from '../revisions/revisions.service.js';
 import { demandOf, readDemands, type DemandRow } from './demand-rows.js';
@@ -22,6 +26,7 @@ export class AnalysesService {
   constructor(
     @Inject(DatabaseService) private readonly database: DatabaseService,
     @Inject(RevisionsService) private readonly revisions: RevisionsService,
+    @Inject(EngineService) private readonly engine: EngineService,
   ) {}
 
   /** The analysis as it was stored when its building was saved. */
@@ -90,6 +95,15 @@ export class AnalysesService {
       fault?.code ?? 'not-found',
       `Found ${fault?.found ?? member}, expected ${fault?.expected ?? 'a member'}.`,
     );
+  }
+
+  /** The working behind one demand, computed on request. */
+  async working(userId: string, projectId: string, revisionId: string, wanted: Wanted): Promise<Working> {
+    const { building } = await this.revisions.building(userId, projectId, revisionId);
+    const result = await this.engine.run('working', { building, wanted });
+    if (result.ok) return result.value;
+    const [fault] = result.faults;
+    throw new Problem(404, fault?.code ?? 'not-found', fault === undefined ? 'No such demand.' : faultSentence(fault));
   }
 }
 

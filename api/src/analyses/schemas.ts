@@ -21,6 +21,14 @@ export type DemandPage = z.infer<typeof DemandPage>;
 
 export const TraceQuery = z.object({ member: line(300).min(1), case: line(64).min(1) });
 
+export const WorkingQuery = z.object({
+  member: line(300).min(1),
+  quantity: Quantity,
+  case: line(64).min(1).optional().describe('Default the case with the largest value'),
+  sense: z.enum(['1', '-1']).optional().describe('Default 1'),
+  combination: line(64).optional().describe('Default the unfactored component where there is one'),
+});
+
 const Part = z.object({ member: z.string(), level: z.string(), force: z.number(), share: z.number() });
 
 export const TraceView = z.object({

@@ -7,6 +7,9 @@ import type { Compared } from '@groundward/engine/compare/compare';
 import type { Comparison } from '@groundward/engine/compare/result';
 import { analyse } from '@groundward/engine/path/analyse';
 import type { Analysis } from '@groundward/engine/path/result';
+import { workingContext } from '@groundward/engine/working/context';
+import { demandFor, explain, type Wanted } from '@groundward/engine/working/explain';
+import type { Working } from '@groundward/engine/working/result';
 
 /** A building and its analysis. */
 export type Checked = { readonly building: Building; readonly analysis: Analysis };
@@ -21,6 +24,13 @@ export const tasks = {
   },
   causes: ({ before, after }: { readonly before: Compared; readonly after: Compared }): Comparison =>
     compareWithCauses(before, after),
+  /** The working behind a demand, or why there is none. */
+  working: ({ building, wanted }: { readonly building: Building; readonly wanted: Wanted }): Result<Working> => {
+    const context = workingContext(building);
+    if (!context.ok) return context;
+    const demand = demandFor(context.value, wanted);
+    return demand.ok ? { ok: true, value: explain(context.value, demand.value) } : demand;
+  },
 } as const;
 
 export type TaskName = keyof typeof tasks;

@@ -5,6 +5,7 @@ import type { Analysis } from '@groundward/engine/path/result';
 import type { Trace } from '@groundward/engine/path/trace-result';
 import type { Comparison } from '@groundward/engine/compare/result';
 import type { Foundation } from '@groundward/engine/foundation/result';
+import type { Working } from '@groundward/engine/working/result';
 import type { paths } from '../api-types';
 
 type Json<
@@ -106,6 +107,8 @@ export const api = {
   analysis: (projectId: string, id: string) => call(`${revision(projectId, id)}/analysis`) as Promise<Analysis>,
   trace: (projectId: string, id: string, member: string, caseId: string) =>
     call(`${revision(projectId, id)}/trace?${new URLSearchParams({ member, case: caseId })}`) as Promise<Trace>,
+  working: (projectId: string, id: string, query: Readonly<Record<string, string>>) =>
+    call(`${revision(projectId, id)}/working?${new URLSearchParams(query)}`) as Promise<Working>,
   foundation: (projectId: string, id: string) => call(`${revision(projectId, id)}/foundation`) as Promise<Foundation>,
   compare: (projectId: string, before: string, after: string) =>
     call(`${project(projectId)}/compare?${new URLSearchParams({ before, after })}`) as Promise<Comparison>,

@@ -16,3 +16,8 @@ export function useOrigin(): (demand: Demand) => string {
   const facts = useContext(FactsContext);
   return (demand) => (facts === undefined ? demand.member : originOf(demand, facts));
 }
+
+/** Whether the numbers here are a revision's, whose working can be shown. */
+export function useHasWorking(): boolean {
+  return useContext(FactsContext) !== undefined;
+}

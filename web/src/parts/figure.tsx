@@ -1,9 +1,11 @@
 'use client';
 import type { Demand } from '@groundward/engine/path/result';
 import { quantity } from '@/lib/format';
-import { useOrigin } from './facts';
+import { useQueryPatch } from '@/lib/query-state';
+import { referenceOf } from '@/lib/working';
+import { useHasWorking, useOrigin } from './facts';
 
-/** A demand as a number with its unit; pointing at it, or reaching it by keys, says where it comes from. */
+/** A demand as a number with its unit; pointing at it, or reaching it by keys, says where it comes from; pressing it opens its working. */
 export function Figure({
   demand,
   significant = 3,
@@ -12,10 +14,26 @@ export function Figure({
   readonly significant?: number;
 }) {
   const origin = useOrigin();
+  const hasWorking = useHasWorking();
+  const patch = useQueryPatch();
   if (demand === undefined) return <span className="note">–</span>;
+  const text = quantity(demand.value, demand.unit, significant);
+  if (!hasWorking) {
+    return (
+      <span className="figure" tabIndex={-1} data-from={origin(demand)}>
+        {text}
+      </span>
+    );
+  }
   return (
-    <span className="figure" tabIndex={-1} data-from={origin(demand)}>
-      {quantity(demand.value, demand.unit, significant)}
-    </span>
+    <button
+      type="button"
+      className="figure"
+      tabIndex={-1}
+      data-from={origin(demand)}
+      onClick={() => patch({ working: referenceOf(demand) })}
+    >
+      {text}
+    </button>
   );
 }

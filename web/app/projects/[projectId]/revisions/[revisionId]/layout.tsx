@@ -5,6 +5,7 @@ import { Suspense, type ReactNode } from 'react';
 import { useRevision } from '@/lib/revision-data';
 import { FactsOf } from '@/parts/facts';
 import { TitleBlock } from '@/parts/title-block';
+import { WorkingPanel } from '@/parts/working-panel';
 
 const VIEWS = [
   ['building', 'Building'],
@@ -26,6 +27,9 @@ export default function RevisionLayout({ children }: { readonly children: ReactN
       <main>
         <Suspense>{children}</Suspense>
       </main>
+      <Suspense>
+        <WorkingPanel projectId={projectId} revisionId={revisionId} version={revision?.version} />
+      </Suspense>
     </FactsOf>
   );
 }
