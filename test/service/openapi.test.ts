@@ -76,6 +76,7 @@ test('what the routes really answer fits what the document says', async () => {
   const queries: Record<string, string> = {
     '/api/projects/{projectId}/revisions/{revisionId}/demands': '?kind=pier&limit=20',
     '/api/projects/{projectId}/revisions/{revisionId}/trace': '?member=A/L2&case=EX',
+    '/api/projects/{projectId}/revisions/{revisionId}/working': '?member=A/L2&quantity=shear&case=EX&sense=1',
     '/api/projects/{projectId}/compare': `?before=${revisions[0]?.id ?? ''}&after=${revisions[1]?.id ?? ''}`,
     '/api/projects/{projectId}/history': '?member=A/L2&quantity=shear&case=EX&sense=1',
   };

@@ -1,4 +1,5 @@
 /** The working behind a demand, computed on request. */
+import type { Units } from '../building/definition.js';
 import type { Fault, Result } from '../building/fault.js';
 import type { Demand } from '../path/result.js';
 import type { Context } from './context.js';
@@ -26,7 +27,10 @@ export function explain(context: Context, demand: Demand): Working {
   if (fill === undefined) throw new Error(`no working for ${demand.quantity} of a ${demand.kind}`);
   const steps = newSteps();
   fill(context, demand, steps);
-  return { schema: 'groundward.working/1', units: context.building.units, demand, steps: steps.list };
+  // Written out: the order of keys does not depend on where the file was kept.
+  const units: Units =
+    context.building.units.length === 'ft' ? { length: 'ft', force: 'kip' } : { length: 'm', force: 'kN' };
+  return { schema: 'groundward.working/1', units, demand, steps: steps.list };
 }
 
 /**
