@@ -1,5 +1,6 @@
 import { readdirSync, readFileSync } from 'node:fs';
 import { readBuildingText } from '@groundward/engine/building/read';
+import type { DemandKind, Quantity } from '@groundward/engine/path/result';
 import { workingContext, type Context } from '@groundward/engine/working/context';
 import { explain } from '@groundward/engine/working/explain';
 import { referenceOf } from '@groundward/engine/working/reference';
@@ -84,6 +85,26 @@ function unresolved(
   return typeof found === 'object' ? undefined : `${from} is ${typeof found}`;
 }
 
+/** Quantities that `explain` still refuses with a sentence. One that gets its working leaves this list. */
+const REFUSED = new Set([
+  'collector connection-force',
+  'collector design-tension',
+  'collector design-compression',
+  'diaphragm-span net-unit-shear',
+  'transfer-diaphragm shear',
+  'transfer-diaphragm net-unit-shear',
+  'transfer-diaphragm chord-force',
+  'strut axial-tension',
+  'strut axial-compression',
+]);
+
+test('what is refused has no working', () => {
+  for (const name of REFUSED) {
+    const [kind, quantity] = name.split(' ') as [DemandKind, Quantity];
+    expect(workingFor(kind, quantity), name).toBeUndefined();
+  }
+});
+
 describe.each(files)('every demand of $name', ({ url }) => {
   test('has a working whose printed steps a checker can recompute, down to the file', () => {
     const context = contextOf(url);
@@ -92,12 +113,15 @@ describe.each(files)('every demand of $name', ({ url }) => {
       largest.set(unit, Math.max(largest.get(unit) ?? 0, Math.abs(value)));
     const wrong: string[] = [];
     let count = 0;
+    let refused = 0;
     const sound = new Set<string>();
     const { demands } = context.analysis;
     for (const demand of demands) {
       const at = referenceOf(demand);
       if (workingFor(demand.kind, demand.quantity) === undefined) {
-        wrong.push(`no working for ${demand.quantity} of a ${demand.kind}`);
+        if (!REFUSED.has(`${demand.kind} ${demand.quantity}`))
+          wrong.push(`no working for ${demand.quantity} of a ${demand.kind}`);
+        refused += 1;
         continue;
       }
       const working = explain(context, demand);
@@ -124,7 +148,7 @@ describe.each(files)('every demand of $name', ({ url }) => {
     }
     const kinds = [...new Set(wrong)];
     expect(kinds.slice(0, 20), `${kinds.length} faults`).toEqual([]);
-    expect(count).toBe(demands.length);
+    expect(count + refused).toBe(demands.length);
   });
 });
 

@@ -1,6 +1,7 @@
 /** Workings of collectors: the axial force along a wall line, as the sum of all that pushes the line before a place. */
 import { clip, collectorsOf, type CollectorLine } from '../path/collectors.js';
 import { cutOf } from '../diaphragms/inner-forces.js';
+import { transferFlows } from '../diaphragms/steps/transfer.js';
 import { totalLength, type Interval } from '../geometry/profile.js';
 import type { DiaphragmOutcome } from '../path/descent.js';
 import type { Demand } from '../path/result.js';
@@ -11,6 +12,7 @@ import { floorParts } from './floor-parts.js';
 import { shareOfSupport } from './flexible-reaction.js';
 import { netForces, shearStep, staticsOf } from './left-of.js';
 import { pierShare } from './piers.js';
+import { raisedShear } from './raised.js';
 import type { SpanSource } from './span-steps.js';
 import type { Steps, Value } from './steps.js';
 
@@ -126,6 +128,7 @@ function floorTerms(made: Collector, outcome: DiaphragmOutcome, onLines: Map<Lin
   const near = steps.add(steps.fresh('H'), `−${before.symbol}`, [before], context.units.force, {
     what: 'from the floor on the near side',
   });
+  let count = 0;
   const terms = [
     ...spread(made, clip(touch.cut.left, lines, level), near, `${diaphragm.path}.outline`),
     ...spread(made, clip(touch.cut.right, lines, level), after, `${diaphragm.path}.outline`),
@@ -133,6 +136,25 @@ function floorTerms(made: Collector, outcome: DiaphragmOutcome, onLines: Map<Lin
   const along = alongParts(made, outcome, line, statics.source);
   for (const { force, from, to } of along)
     terms.push(...stretch(made, force, from, to, `${diaphragm.path}.weight.lines`));
+  // What transfer diaphragms at steps of the outline put into the line and take out again.
+  for (const [side, cut] of [
+    [-1, touch.cut.left],
+    [1, touch.cut.right],
+  ] as const) {
+    transferFlows(inner, line.s, side, cut).forEach(({ from, to, force }) => {
+      const symbol = `X_${(count += 1)}`;
+      const what = 'from a transfer diaphragm at a step of the outline';
+      const value = readOff(
+        context,
+        symbol,
+        `${diaphragm.path}.outline`,
+        force * demand.sense,
+        context.units.force,
+        what,
+      );
+      terms.push(...stretch(made, value, from, to, `${diaphragm.path}.outline`));
+    });
+  }
   // The whole that the floor hands over goes to the lines of the plane by their piers.
   if (outcome.rigid !== undefined) {
     const net = netFromSteps(made, outcome);
@@ -165,7 +187,7 @@ function floorTerms(made: Collector, outcome: DiaphragmOutcome, onLines: Map<Lin
 
 /** Walls of the same plane that stop here push the diaphragm at the line itself. */
 function stoppedText(
-  { context, demand, design }: Collector,
+  { context, demand, design, steps }: Collector,
   lines: readonly LineModel[],
   taken: DiaphragmOutcome['taken'],
 ): { text: string; values: Value[] } {
@@ -176,8 +198,9 @@ function stoppedText(
     if (!taken.has(line) || above === undefined) continue;
     const shear = fromDemand(context, `V_above_${line.index + 1}`, demand, `${line.line.id}/${above.id}`, 'shear');
     if (shear === undefined) continue;
-    values.push(shear);
-    terms.push(`${line.sign < 0 ? '−' : '+'} ${shear.symbol}`);
+    const own = raisedShear(context, demand, design.outcome.level.index, line, shear, steps);
+    values.push(own);
+    terms.push(`${line.sign < 0 ? '−' : '+'} ${own.symbol}`);
   }
   return { text: terms.length === 0 ? '' : ` ${terms.join(' ')}`, values };
 }
@@ -263,10 +286,11 @@ function pierTerms(made: Collector, line: LineModel, given: readonly Value[]): T
   const { index } = design.outcome.level;
   const upper = context.model.levels[index + 1];
   const terms: Term[] = [];
-  const above =
+  const plain =
     upper === undefined || line.storeys[index + 1] === undefined
       ? undefined
       : fromDemand(context, `V_above_${line.index + 1}`, demand, `${line.line.id}/${upper.id}`, 'shear');
+  const above = plain === undefined ? undefined : raisedShear(context, demand, index, line, plain, steps);
   if (above !== undefined) terms.push(...along(made, line, index + 1, above, line.sign));
   const storey = line.storeys[index];
   if (storey === undefined) return terms;

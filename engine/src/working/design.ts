@@ -23,7 +23,13 @@ export function designOf(context: Context, caseId: string, level: number): Desig
     const run = runOf(context, caseId);
     const storey = run.outcomes[level];
     if (storey === undefined) throw new Error(`no level ${level} under ${caseId}`);
-    const outcome = designSet(context.model, context.bodies, run, storey, context.requirements.get(run.subCase.loadCase.id));
+    const outcome = designSet(
+      context.model,
+      context.bodies,
+      run,
+      storey,
+      context.requirements.get(run.subCase.loadCase.id),
+    );
     known.set(key, (design = { outcome, inner: innerByFrame(outcome, run.subCase.frame) }));
   }
   return design;

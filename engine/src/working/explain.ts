@@ -60,6 +60,10 @@ export function demandFor({ analysis, demands }: Context, wanted: Wanted): Resul
       have,
     );
   }
+  const [first] = ofCase;
+  if (first !== undefined && workingFor(first.kind, first.quantity) === undefined) {
+    return missing('working', `no working for ${quantity} of a ${first.kind}`, 'a quantity with a working', []);
+  }
   let rows = ofCase;
   if (combination !== undefined) {
     rows = ofCase.filter((row) => row.combination === combination);

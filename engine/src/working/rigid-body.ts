@@ -10,6 +10,7 @@ import { bodyMember } from './body-member.js';
 import { levelInertias, totalStep } from './floor-total.js';
 import { pushStep, type ForceSet } from './level-push.js';
 import { alongAxis, armStep, cosinesOf, cosineValues, joined, stiffnessStep, type Cosines } from './plan-arms.js';
+import { raisedShear } from './raised.js';
 import type { Steps, Value } from './steps.js';
 
 type Spring = { readonly k: Value; readonly r: Value; readonly cosines: Cosines };
@@ -79,7 +80,7 @@ export function resultantSteps(
     return arm;
   };
   for (const line of outcome.taken.keys()) {
-    const values = arrives(context, of, line, outcome, steps, torsion);
+    const values = arrives(context, of, line, outcome, set, steps, torsion);
     if (values.length > 0) arriving.set(line, values);
   }
   const turns = s[0] * t[1] - s[1] * t[0] > 0;
@@ -223,6 +224,7 @@ function arrives(
   of: Pick<Demand, 'case' | 'sense'>,
   line: LineModel,
   { diaphragm }: DiaphragmOutcome,
+  set: ForceSet,
   steps: Steps,
   torsion: Torsion,
 ): Value[] {
@@ -230,8 +232,10 @@ function arrives(
   const above = context.model.levels[diaphragm.level + 1];
   if (above !== undefined && line.storeys[above.index] !== undefined) {
     const shear = fromDemand(context, `V_above_${line.index + 1}`, of, `${line.line.id}/${above.id}`, 'shear');
-    if (shear !== undefined)
-      values.push(torsion === 'amplified' ? shear : beforeAmplification(context, of, line, above.index, shear));
+    if (shear !== undefined) {
+      const own = torsion === 'amplified' ? shear : beforeAmplification(context, of, line, above.index, shear);
+      values.push(set === 'force' ? own : raisedShear(context, of, diaphragm.level, line, own, steps));
+    }
   }
   for (const beside of runOf(context, of.case).outcomes[diaphragm.level]?.diaphragms ?? []) {
     if (beside.rigid !== undefined || !beside.given.has(line)) continue;

@@ -122,7 +122,7 @@ function partMet({ context, outcome, of }: SpanSource, line: number): Value | un
     `${outcome.diaphragm.path}.outline`,
     taken / whole,
     '1',
-    'part of the wall’s length that lies in this diaphragm',
+    'part of the wall that meets this diaphragm, raised by Ω_0 or ρ where the standard raises transfers',
   );
 }
 

@@ -59,9 +59,7 @@ export function spanUnitShear(context: Context, demand: Demand, steps: Steps): v
     ] as const) {
       if (Math.abs(line.s - at) > inner.profile.tolerance) continue;
       const length = totalLength(clip(side, [line], level));
-      const piece = pieces.find(
-        (each) => Math.abs((after ? each.from : each.to) - at) <= inner.profile.tolerance,
-      );
+      const piece = pieces.find((each) => Math.abs((after ? each.from : each.to) - at) <= inner.profile.tolerance);
       const size = piece === undefined ? 0 : Math.abs(valueAt(piece.shear, after ? 0 : piece.to - piece.from)) / length;
       if (Math.abs(size - collectors) > 1e-9 * collectors) continue;
       const shear = shearStep(statics, at, after, steps.fresh('V'));
