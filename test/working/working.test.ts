@@ -155,5 +155,6 @@ describe.each(files)('every demand of $name', ({ url }) => {
 test('a working is valid against its definition', () => {
   const context = contextOf(files[0]?.url as URL);
   const { demands } = context.analysis;
-  for (const demand of demands.slice(0, 200)) expect(Working.safeParse(explain(context, demand)).error).toBeUndefined();
+  for (const demand of demands.filter((row) => workingFor(row.kind, row.quantity) !== undefined).slice(0, 200))
+    expect(Working.safeParse(explain(context, demand)).error).toBeUndefined();
 });

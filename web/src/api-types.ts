@@ -4848,7 +4848,7 @@ export interface operations {
         parameters: {
             query: {
                 member: string;
-                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                 /** @description Default the case with the largest value */
                 case?: string;
                 /** @description Default 1 */
@@ -4890,9 +4890,9 @@ export interface operations {
                             /** @description Key of the member, such as `1/L2/1a` */
                             member: string;
                             /** @enum {string} */
-                            kind: "level" | "diaphragm-span" | "opening" | "collector" | "wall-line" | "pier" | "support";
+                            kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4906,6 +4906,8 @@ export interface operations {
                                 number,
                                 number
                             ];
+                            /** @description The rule that governed it, where several compete */
+                            governs?: string;
                         };
                         /** @description The last step gives the demand */
                         steps: {

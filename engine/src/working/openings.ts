@@ -1,144 +1,115 @@
 /** Workings of openings: the shear at the opening shared by the strips beside it, each bending on its own. */
-import type { Opening } from '../building/definition.js';
 import type { InnerForces } from '../diaphragms/inner-forces.js';
-import { stripsBeside } from '../diaphragms/opening.js';
-import { dot } from '../geometry/frame.js';
-import { cutAt, totalLength } from '../geometry/profile.js';
-import { valueAt } from '../statics/polynomial.js';
+import { openingForces } from '../diaphragms/openings/opening.js';
+import type { OpeningPlan } from '../diaphragms/openings/opening-plan.js';
+import { totalLength } from '../geometry/profile.js';
 import type { Demand } from '../path/result.js';
+import { valueAt } from '../statics/polynomial.js';
 import { readOff, type Context } from './context.js';
 import { diaphragmOf } from './design.js';
+import { momentStep, short, staticsOf, type Statics } from './left-of.js';
 import { depthAt } from './spans.js';
-import { momentStep, short, staticsOf } from './left-of.js';
 import type { Steps, Value } from './steps.js';
 
 const CLAUSE = 'method of ATC-7 (1981) and Diekmann (1982), from memory, not checked against the documents';
 
+type Found = {
+  readonly statics: Statics;
+  readonly inner: InnerForces;
+  readonly plan: OpeningPlan;
+  readonly path: string;
+};
+type Half = OpeningPlan['halves'][number];
+
 export function openingMoment(context: Context, demand: Demand, steps: Steps): void {
-  const found = stripMoments(context, demand, steps, false);
-  steps.add(
-    steps.fresh('M_s'),
-    most(found.map(({ moment }) => moment)),
-    found.map(({ moment }) => moment),
-    demand.unit,
-    { what: 'largest secondary moment of a strip' },
-  );
+  const found = openingOf(context, demand, steps);
+  const moments = bordered(found).flatMap((half) => {
+    const edge = edgeForce(context, found, half, steps);
+    return half.beside.map(([a, b]) => {
+      const strip = readOff(context, 'd_strip', found.path, b - a, context.units.length, 'depth of the strip');
+      return steps.add(steps.fresh('M_s'), `abs(${edge.symbol})·d_strip`, [edge, strip], demand.unit, {
+        what: 'secondary moment of a strip',
+      });
+    });
+  });
+  largest(moments, demand.unit, 'largest secondary moment of a strip', steps);
 }
 
 export function openingCorner(context: Context, demand: Demand, steps: Steps): void {
-  const found = stripMoments(context, demand, steps, false);
-  const forces = found.map(({ moment, strip }, i) =>
-    steps.add(steps.fresh(`C_${i + 1}`), `${moment.symbol}/${strip.symbol}`, [moment, strip], demand.unit, {
-      what: 'couple of the strip’s edges',
-    }),
-  );
-  steps.add(steps.fresh('C'), most(forces), forces, demand.unit, {
-    what: 'largest force of a strip’s inner edge',
-    clause: CLAUSE,
-  });
+  const found = openingOf(context, demand, steps);
+  const forces = bordered(found).map((half) => edgeForce(context, found, half, steps));
+  largest(forces, demand.unit, 'largest force of a strip’s inner edge', steps);
 }
 
 export function openingChord(context: Context, demand: Demand, steps: Steps): void {
-  const found = stripMoments(context, demand, steps, true);
-  const forces = found.map(({ moment, strip, chord }, i) =>
-    steps.add(
-      steps.fresh(`T_${i + 1}`),
-      `abs(${chord?.symbol ?? '0'}) + ${moment.symbol}/${strip.symbol}`,
-      [...(chord === undefined ? [] : [chord]), moment, strip],
+  const found = openingOf(context, demand, steps);
+  const outer = bordered(found).filter(({ strips, beside }) =>
+    [strips[0], strips[strips.length - 1]].some((strip) => strip !== undefined && beside.includes(strip)),
+  );
+  const forces = outer.map((half) => {
+    const edge = edgeForce(context, found, half, steps);
+    const depth = chordDepth(found, half);
+    if (depth === 0) return edge;
+    const { middle } = found.plan;
+    const moment = momentStep(found.statics, middle, 'with-couples', steps.fresh('M'));
+    const whole = depthAt(context, found.statics, 'D', depth, `distance of the chords at s = ${short(middle)}`);
+    return steps.add(
+      steps.fresh('T_outer'),
+      `${moment.symbol}/D + ${edge.symbol}`,
+      [moment, whole, edge],
       demand.unit,
       {
-        what: 'the diaphragm’s chord force and the strip’s own',
+        what: 'the diaphragm’s chord force at the middle and the strip’s own at the side',
+        clause: CLAUSE,
       },
-    ),
-  );
-  steps.add(steps.fresh('T'), most(forces), forces, demand.unit, {
-    what: 'largest force in a strip’s outer chord',
-    clause: CLAUSE,
+    );
   });
+  largest(forces, demand.unit, 'largest force in a strip’s outer edge', steps);
 }
 
-function most(values: readonly Value[]): string {
-  return values.length === 0 ? '0' : `max(${values.map(({ symbol }) => symbol).join(', ')})`;
+function largest(values: readonly Value[], unit: string, what: string, steps: Steps): void {
+  const sizes = values.map(({ symbol }) => `abs(${symbol})`);
+  const formula = sizes.length === 0 ? '0' : sizes.length === 1 ? (sizes[0] ?? '0') : `max(${sizes.join(', ')})`;
+  steps.add(steps.fresh('largest'), formula, values, unit, { what, clause: CLAUSE });
 }
 
-/** The secondary moment of every strip at both ends of the opening, with the diaphragm's chord force there where it is asked for. */
-function stripMoments(context: Context, demand: Demand, steps: Steps, chords: boolean) {
+function bordered({ plan }: Found): Half[] {
+  return plan.halves.filter(({ beside }) => beside.length > 0);
+}
+
+function openingOf(context: Context, demand: Demand, steps: Steps): Found {
   const { outcome, inner } = diaphragmOf(context, demand.case, demand.member);
   const id = demand.member.split('/')[2];
-  const opening = (outcome.diaphragm.diaphragm.openings ?? []).find((each) => each.id === id);
-  // Rows of an opening come from the last frame that has them.
-  const each = [...inner]
-    .reverse()
-    .find(
-      (forces) =>
-        opening !== undefined &&
-        openingParts(forces, opening).halves.some(({ strips }) => strips.length > 0) &&
-        forces.pieces.some(({ shear }) => shear.some((c) => c !== 0)),
-    );
-  if (opening === undefined || each === undefined) throw new Error(`no opening ${demand.member}`);
-  const statics = staticsOf(context, demand, outcome, each.frame, steps);
-  const parts = openingParts(each, opening);
-  const { length, moment: unit, force } = context.units;
-  const path = `${outcome.diaphragm.path}.openings[${(outcome.diaphragm.diaphragm.openings ?? []).indexOf(opening)}].outline`;
-  const out: { moment: Value; strip: Value; chord?: Value }[] = [];
-  parts.halves.forEach(({ strips, depth, from, to, end, chordDepth }, h) => {
-    if (strips.length === 0) return;
-    const near = momentStep(statics, from, 'without-couples', steps.fresh(`Q_${2 * h + 1}`));
-    const far = momentStep(statics, to, 'without-couples', steps.fresh(`Q_${2 * h + 2}`));
-    const area = steps.add(steps.fresh(`V_a_${h + 1}`), `abs(${far.symbol} − ${near.symbol})`, [far, near], unit, {
-      what: `shear from s = ${short(from)} to s = ${short(to)}, one half of the opening, summed up`,
-      clause: 'a point of inflection at the middle of the opening',
-    });
-    let chord: Value | undefined;
-    if (chords && chordDepth > 0) {
-      const whole = momentStep(statics, end, 'with-couples', steps.fresh(`M_${h + 1}`));
-      const D = depthAt(context, statics, 'D', chordDepth, `distance of the chords at s = ${short(end)}`);
-      chord = steps.add(steps.fresh(`K_${h + 1}`), `${whole.symbol}/D`, [whole, D], force, {
-        what: `chord force of the diaphragm at s = ${short(end)}`,
-      });
-    }
-    const total = readOff(context, 'd', path, depth, length, 'net depth beside the opening');
-    for (const size of strips) {
-      const strip = readOff(context, `d_${out.length + 1}`, path, size, length, 'depth of the strip');
-      const moment = steps.add(
-        steps.fresh(`M_s_${out.length + 1}`),
-        `${area.symbol}·${strip.symbol}/d`,
-        [area, strip, total],
-        unit,
-        {
-          what: 'secondary moment of a strip, in proportion to its depth',
-          clause: CLAUSE,
-        },
-      );
-      out.push({ moment, strip, ...(chord === undefined ? {} : { chord }) });
-    }
-  });
-  return out;
+  for (const each of inner) {
+    const plan = (outcome.diaphragm.openings[each.frame] ?? []).find(({ opening }) => opening.id === id);
+    if (plan === undefined || openingForces(each, plan) === undefined) continue;
+    const index = (outcome.diaphragm.diaphragm.openings ?? []).indexOf(plan.opening);
+    const path = `${outcome.diaphragm.path}.openings[${index}].outline`;
+    return { statics: staticsOf(context, demand, outcome, each.frame, steps), inner: each, plan, path };
+  }
+  throw new Error(`no opening ${demand.member}`);
 }
 
-/** The two halves of an opening along the span, each with the strips beside it. */
-function openingParts({ profile, pieces }: InnerForces, opening: Opening) {
-  const { frame, tolerance } = profile;
-  const s = opening.outline.map((point) => dot(point, frame.s));
-  const t = opening.outline.map((point) => dot(point, frame.t));
-  const [near, far] = [Math.min(...s), Math.max(...s)];
-  const middle = (near + far) / 2;
-  const cut = cutAt(profile, middle);
-  const chordBefore = pieces.find(({ from, to }) => near > from + tolerance && near <= to + tolerance);
-  const chordAfter = pieces.find(({ from, to }) => far >= from - tolerance && far < to - tolerance);
-  const half = (
-    strips: typeof cut.left,
-    from: number,
-    to: number,
-    end: number,
-    piece: (typeof pieces)[number] | undefined,
-  ) => ({
-    strips: stripsBeside(strips, Math.min(...t), Math.max(...t), tolerance).map(([a, b]) => b - a),
-    depth: totalLength(strips),
-    from,
-    to,
-    end,
-    chordDepth: piece === undefined ? 0 : valueAt(piece.chordDepth, end - piece.from),
+/** The force in a strip's edges at a side of the opening: ∫V ds from there to the middle, over the depth of all strips. */
+function edgeForce(context: Context, { statics, plan, path }: Found, half: Half, steps: Steps): Value {
+  const { length, force } = context.units;
+  const from = Math.min(half.side, plan.middle);
+  const to = Math.max(half.side, plan.middle);
+  const near = momentStep(statics, from, 'without-couples', steps.fresh('Q'));
+  const far = momentStep(statics, to, 'without-couples', steps.fresh('Q'));
+  const depth = readOff(context, 'd', path, totalLength(half.strips), length, 'net depth beside the opening');
+  const turned = half.ahead < 0 ? `(${near.symbol} − ${far.symbol})/d` : `(${far.symbol} − ${near.symbol})/d`;
+  return steps.add(steps.fresh('L'), turned, [near, far, depth], force, {
+    what: `shear from s = ${short(from)} to s = ${short(to)} summed up, over the depth: force in the strips’ edges`,
+    clause: 'a point of inflection at the middle of the opening; shear shared by depth',
   });
-  return { halves: [half(cut.left, near, middle, near, chordBefore), half(cut.right, middle, far, far, chordAfter)] };
+}
+
+function chordDepth({ inner, plan }: Found, { ahead }: Half): number {
+  const { tolerance } = inner.profile;
+  const s = plan.middle;
+  const piece = inner.pieces.find(({ from, to }) =>
+    ahead < 0 ? s > from + tolerance && s <= to + tolerance : s >= from - tolerance && s < to - tolerance,
+  );
+  return piece === undefined ? 0 : valueAt(piece.chordDepth, s - piece.from);
 }
