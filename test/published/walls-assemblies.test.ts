@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { DiaphragmAssembly, WallAssembly } from '@groundward/engine/building/definition';
+import { DiaphragmAssembly, WallAssembly } from '@groundward/engine/building/assemblies';
 import {
   kipsPerInch,
   poundsPerFoot,

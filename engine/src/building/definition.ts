@@ -3,12 +3,14 @@
  * the HTTP interface and the forms are made. Numbers are in the file's own units.
  */
 import { z } from 'zod';
+import { Assemblies } from './assemblies.js';
 import { Basis, NamedBasis } from './basis.js';
 import { Combinations } from './combination.js';
 import { LoadCase } from './load-cases.js';
 import { Coordinate, GravityCase, Id, Name, Point, Positive, Ring, Weight } from './values.js';
 
 export { GravityCase, Id, Point, Ring } from './values.js';
+export type { DiaphragmAssembly, HoldDownAssembly, WallAssembly } from './assemblies.js';
 export type { Basis, NamedBasis } from './basis.js';
 export type { Combination } from './combination.js';
 export type { CombinedCase, LoadCase, PlainCase, StatedCase } from './load-cases.js';
@@ -116,41 +118,6 @@ export const WallLine = z.strictObject({
     .optional()
     .describe('Where a collector runs over less than the whole cut of the diaphragm at the line'),
   storeys: z.array(WallStorey).min(1).max(500),
-});
-
-const NominalUnitShear = z.strictObject({ seismic: Positive.optional(), wind: Positive.optional() });
-
-export const DiaphragmAssembly = z.strictObject({
-  id: Id,
-  name: Name.optional(),
-  nominalUnitShear: NominalUnitShear.optional().describe('[force/length]'),
-  apparentShearStiffness: Positive.optional().describe('Gₐ [force/length]'),
-  chordStiffness: Positive.optional().describe(
-    'E·A of the chords along outline and openings of a semi-rigid diaphragm [force]; default none',
-  ),
-  axialStiffness: Positive.optional().describe(
-    'Axial stiffness of the floor per unit width of a semi-rigid diaphragm [force/length]; default 2 Gₐ with stated chords, else 1000 Gₐ: no bending',
-  ),
-});
-
-export const WallAssembly = z.strictObject({
-  id: Id,
-  name: Name.optional(),
-  nominalUnitShear: NominalUnitShear.optional().describe('[force/length]'),
-  apparentShearStiffness: Positive.optional().describe('Gₐ [force/length]'),
-});
-
-export const HoldDownAssembly = z.strictObject({
-  id: Id,
-  name: Name.optional(),
-  allowableTension: Positive.optional().describe('[force]'),
-  deflectionAtAllowable: Positive.optional().describe('[length]'),
-});
-
-export const Assemblies = z.strictObject({
-  diaphragms: z.array(DiaphragmAssembly).max(2000).optional(),
-  walls: z.array(WallAssembly).max(2000).optional(),
-  holdDowns: z.array(HoldDownAssembly).max(2000).optional(),
 });
 
 export const Building = z

@@ -2,7 +2,8 @@
 import { meetingFaults } from '../path/meeting-faults.js';
 import { Basis, NamedBasis } from './basis.js';
 import { Combinations } from './combination.js';
-import { Assemblies, Building, Level, Units, WallLine } from './definition.js';
+import { Assemblies } from './assemblies.js';
+import { Building, Level, Units, WallLine } from './definition.js';
 import { LoadCase } from './load-cases.js';
 import type { Fault, Result } from './fault.js';
 import { jsonBreak } from './json-place.js';

@@ -2,6 +2,7 @@
 import type { Building, Point } from '../building/definition.js';
 import { diaphragmModel, type DiaphragmModel } from '../diaphragms/diaphragm.js';
 import { frameAlong, parallel, unitVector, type Frame } from '../geometry/frame.js';
+import { assembliesOf } from '../walls/wall-assembly.js';
 import { lineModel, type LineModel } from '../walls/wall-line.js';
 
 export type LevelModel = {
@@ -40,12 +41,13 @@ export function buildModel(building: Building): Model {
     frames.push(frameAlong(direction));
     return frames.length - 1;
   };
+  const assemblies = assembliesOf(building);
   // Lines in order of their place, so that no result depends on the order of the file or of ids.
   const lines = building.wallLines.map((line, i) => {
     const [a, b] = line.axis;
     const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
     const family = frameOf([(b[0] - a[0]) / length, (b[1] - a[1]) / length]);
-    return lineModel(building, line, i, family, frames[family] as Frame, { index, elevations });
+    return lineModel(line, i, family, frames[family] as Frame, { index, elevations }, assemblies, building.units);
   });
   for (const loadCase of building.loadCases) if (loadCase.from !== 'combined') frameOf(unitVector(loadCase.direction));
 

@@ -1,21 +1,11 @@
 /** Wall lines as the analysis sees them: planes with piers by storey, shares and stiffnesses. */
-import type { Building, Pier, Point, WallLine } from '../building/definition.js';
+import type { Pier, Point, Units, WallLine } from '../building/definition.js';
 import { dot, type Frame } from '../geometry/frame.js';
+import { sharesByStiffness } from './equal-deflection.js';
+import { unsharedPier, type PierModel } from './pier.js';
+import type { Assemblies } from './wall-assembly.js';
 
-export type PierModel = {
-  readonly pier: Pier;
-  /** `line/under/pier` */
-  readonly key: string;
-  readonly from: number;
-  readonly to: number;
-  readonly length: number;
-  readonly height: number;
-  /** Near and far end post: distance along the axis [length] */
-  readonly posts: readonly [number, number];
-  readonly arm: number;
-  /** Part of the line's shear in this storey; the shares of a storey add up to 1. */
-  readonly share: number;
-};
+export type { PierModel } from './pier.js';
 
 export type StoreyModel = {
   readonly line: LineModel;
@@ -26,7 +16,7 @@ export type StoreyModel = {
   readonly stiffness: number;
   /** Whether the stiffness comes from stated stiffnesses or assemblies, rather than from lengths. */
   readonly stated: boolean;
-  /** Weights of the line in a group of collinear lines: by stiffness where every pier states one, else by length. */
+  /** Weights of the line in a group of collinear lines: by stiffness where every pier states one or it shares by deflection, else by length. */
   readonly pierLength: number;
   readonly pierStiffness: number | undefined;
 };
@@ -69,12 +59,13 @@ export function distanceAt(line: LineModel, t: number): number {
  * @param levels elevations by level index, ascending [length]
  */
 export function lineModel(
-  building: Building,
   line: WallLine,
   index: number,
   family: number,
   frame: Frame,
   levels: { readonly index: ReadonlyMap<string, number>; readonly elevations: readonly number[] },
+  assemblies: Assemblies,
+  units: Units,
 ): LineModel {
   const [a, b] = line.axis;
   const length = Math.hypot(b[0] - a[0], b[1] - a[1]);
@@ -96,60 +87,38 @@ export function lineModel(
     const level = levels.index.get(storey.under);
     if (level === undefined || level === 0) continue;
     const height = (levels.elevations[level] as number) - (levels.elevations[level - 1] as number);
-    storeys[level] = storeyModel(building, model, level, storey.under, storey.piers, height);
+    storeys[level] = storeyModel(model, level, storey.under, storey.piers, height, assemblies, units);
   }
   return model;
 }
 
 function storeyModel(
-  building: Building,
   line: LineModel,
   level: number,
   under: string,
   piers: readonly Pier[],
   height: number,
+  assemblies: Assemblies,
+  units: Units,
 ): StoreyModel {
-  const sorted = [...piers].sort((a, b) => a.from - b.from);
-  const lengths = sorted.map((pier) => pier.to - pier.from);
-  const stiffnesses = sorted.map((pier, i) => pierStiffness(building, pier, lengths[i] as number, height));
-  const everyStated = sorted.every((pier) => pier.stiffness !== undefined);
+  const unshared = [...piers]
+    .sort((a, b) => a.from - b.from)
+    .map((pier) => unsharedPier(line.line, under, pier, height, assemblies, units));
+  const stiffnesses = unshared.map((pier) => pier.stiffness);
   const absolute = stiffnesses.every((k) => k !== undefined);
-  const basis = line.line.shareBy === 'stiffness' && absolute ? stiffnesses : lengths;
-  const total = basis.reduce((sum, value) => sum + value, 0);
-  const pierLength = lengths.reduce((sum, value) => sum + value, 0);
+  const weights = unshared.map((pier) => pier.length);
+  const by = line.line.shareBy ?? 'length';
+  const shares = sharesByStiffness(by !== 'length' && absolute ? stiffnesses : weights);
+  const pierLength = weights.reduce((sum, value) => sum + value, 0);
+  const everyStated = absolute && (by === 'deflection' || piers.every((pier) => pier.stiffness !== undefined));
+  const stiffness = absolute ? stiffnesses.reduce((sum, k) => sum + k, 0) : pierLength;
   return {
     line,
     level,
-    piers: sorted.map((pier, i) => {
-      const [near, far] = offsets(pier);
-      return {
-        pier,
-        key: `${line.line.id}/${under}/${pier.id}`,
-        from: pier.from,
-        to: pier.to,
-        length: lengths[i] as number,
-        height,
-        posts: [pier.from + near, pier.to - far],
-        arm: pier.to - far - (pier.from + near),
-        share: (basis[i] as number) / total,
-      };
-    }),
-    stiffness: absolute ? stiffnesses.reduce((sum, k) => sum + k, 0) : pierLength,
+    piers: unshared.map((pier, i) => ({ ...pier, share: shares[i] as number })),
+    stiffness,
     stated: absolute,
     pierLength,
-    pierStiffness: everyStated ? sorted.reduce((sum, pier) => sum + (pier.stiffness ?? 0), 0) : undefined,
+    pierStiffness: everyStated ? stiffness : undefined,
   };
-}
-
-/** Stated, or G_a·b/h of the assembly: a wall that deforms in shear alone. */
-function pierStiffness(building: Building, pier: Pier, length: number, height: number): number | undefined {
-  if (pier.stiffness !== undefined) return pier.stiffness;
-  const assembly = building.assemblies?.walls?.find((wall) => wall.id === pier.assembly);
-  const shearStiffness = assembly?.apparentShearStiffness;
-  return shearStiffness === undefined ? undefined : (shearStiffness * length) / height;
-}
-
-function offsets(pier: Pier): readonly [number, number] {
-  const offset = pier.endOffset ?? 0;
-  return typeof offset === 'number' ? [offset, offset] : offset;
 }

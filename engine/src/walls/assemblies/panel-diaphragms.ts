@@ -5,7 +5,6 @@
  * Wind values: 1.4 times, to the nearest 5 lb/ft, as every value of Table 4.3A is: derived. Apparent shear stiffnesses are not known here.
  * The 2021 edition's one nominal value is taken as the older wind value: derived.
  */
-import type { z } from 'zod';
 import type { DiaphragmAssembly, Units } from '../../building/definition.js';
 import type { Edition, NominalUnitShear } from '../capacity.js';
 import type { Nail } from '../nail-slip.js';
@@ -34,6 +33,11 @@ export function panelDiaphragms(): readonly PanelDiaphragm[] {
   return diaphragms;
 }
 
+/** A published diaphragm by its id. */
+export function panelDiaphragm(id: string): PanelDiaphragm | undefined {
+  return diaphragms.find((diaphragm) => diaphragm.id === id);
+}
+
 /** The nominal unit shears of a diaphragm as an edition prints them [lb/ft]. */
 export function panelDiaphragmNominalPlf(diaphragm: PanelDiaphragm, edition: Edition): Required<NominalUnitShear> {
   return { seismic: edition === '2015' ? diaphragm.seismicPlf : diaphragm.windPlf, wind: diaphragm.windPlf };
@@ -44,11 +48,12 @@ export function panelDiaphragmAssembly(
   diaphragm: PanelDiaphragm,
   edition: Edition,
   units: Units,
-): z.infer<typeof DiaphragmAssembly> {
+): DiaphragmAssembly {
   const nominal = panelDiaphragmNominalPlf(diaphragm, edition);
   return {
     id: diaphragm.id,
     name: diaphragm.name,
+    edition,
     nominalUnitShear: {
       seismic: unitShearFromPlf(nominal.seismic, units),
       wind: unitShearFromPlf(nominal.wind, units),

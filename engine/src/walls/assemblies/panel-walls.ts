@@ -5,7 +5,6 @@
  * allowable unit shears of the IBC, seen, and 1.4 times the seismic value, and carry `restored`. The 2021 edition's one nominal value is taken as the
  * older wind value: derived, agrees with the older allowable seismic shear within 0.3 %.
  */
-import type { z } from 'zod';
 import type { Units, WallAssembly } from '../../building/definition.js';
 import type { Edition, NominalUnitShear } from '../capacity.js';
 import type { Nail, PanelGrade } from '../nail-slip.js';
@@ -39,17 +38,23 @@ export function panelWalls(): readonly PanelWall[] {
   return walls;
 }
 
+/** A published wall by its id. */
+export function panelWall(id: string): PanelWall | undefined {
+  return byId.get(id);
+}
+
 /** The nominal unit shears of a wall as an edition prints them [lb/ft]. */
 export function panelWallNominalPlf(wall: PanelWall, edition: Edition): Required<NominalUnitShear> {
   return { seismic: edition === '2015' ? wall.seismicPlf : wall.windPlf, wind: wall.windPlf };
 }
 
 /** A published wall as an assembly of a building file, in the file's units. */
-export function panelWallAssembly(wall: PanelWall, edition: Edition, units: Units): z.infer<typeof WallAssembly> {
+export function panelWallAssembly(wall: PanelWall, edition: Edition, units: Units): WallAssembly {
   const nominal = panelWallNominalPlf(wall, edition);
   return {
     id: wall.id,
     name: wall.name,
+    edition,
     nominalUnitShear: {
       seismic: unitShearFromPlf(nominal.seismic, units),
       wind: unitShearFromPlf(nominal.wind, units),
@@ -144,6 +149,8 @@ const walls: readonly PanelWall[] = rows.flatMap((line) =>
     }),
   ),
 );
+
+const byId: ReadonlyMap<string, PanelWall> = new Map(walls.map((wall) => [wall.id, wall]));
 
 function row(
   grade: PanelGrade,
