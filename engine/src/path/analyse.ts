@@ -6,6 +6,7 @@ import type { SeismicRules } from '../loads/asce7/overstrength.js';
 import { basisFindings } from '../loads/basis-findings.js';
 import { combinationsFor, gravityCombinations, overstrengthFor } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
+import { sharingFaults } from '../walls/sharing-faults.js';
 import { bodiesOf, type Bodies } from './bodies.js';
 import { subCases } from './cases.js';
 import { addCombined, combinedRuns, type CombinedRun } from './combined.js';
@@ -186,18 +187,7 @@ function refuseUnavailable(building: Building): void {
           : [],
       ),
     ),
-    ...building.wallLines.flatMap((line, l) =>
-      line.shareBy === 'deflection'
-        ? [
-            {
-              code: 'sharing-not-available',
-              path: `wallLines[${l}].shareBy`,
-              found: 'deflection',
-              expected: 'length or stiffness',
-            },
-          ]
-        : [],
-    ),
+    ...sharingFaults(building),
   ];
   if (faults.length > 0) throw new Refusal(faults);
 }

@@ -1,6 +1,7 @@
 /** Demands of wall lines, piers and supports. */
 import type { FactoredCombination } from '../loads/combinations.js';
 import { GRAVITY, type Components, type PierFeet, type PostDescent } from '../walls/posts.js';
+import { pierDeflection } from '../walls/pier-deflection.js';
 import { pointOn } from '../walls/wall-line.js';
 import type { Point } from '../building/definition.js';
 import type { LevelOutcome } from './descent.js';
@@ -41,7 +42,7 @@ export function lineDemands(
       overturning[line.index] = moment;
       if (shear === 0 && reaction === 0 && moment === 0) continue;
       const member = `${line.line.id}/${outcome.level.id}`;
-      const { force, moment: momentUnit, perLength } = table.units;
+      const { force, length, moment: momentUnit, perLength } = table.units;
       for (const sense of SENSES) {
         put(table, member, 'wall-line', 'reaction', caseId, sense, reaction * sense, force, undefined, undefined);
         put(table, member, 'wall-line', 'shear', caseId, sense, shear * sense, force, undefined, undefined);
@@ -61,9 +62,12 @@ export function lineDemands(
       for (const pier of storey.piers) {
         const own = shear * pier.share;
         const unitShear = Math.abs(own) / pier.length;
+        const deflection = pier.deflecting && pierDeflection(pier.deflecting, own);
         for (const sense of SENSES) {
           put(table, pier.key, 'pier', 'shear', caseId, sense, own * sense, force, undefined, undefined);
           put(table, pier.key, 'pier', 'unit-shear', caseId, sense, unitShear, perLength, undefined, undefined);
+          if (deflection === undefined) continue;
+          put(table, pier.key, 'pier', 'deflection', caseId, sense, deflection.total, length, undefined, undefined);
         }
       }
     }

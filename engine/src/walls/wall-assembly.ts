@@ -40,7 +40,7 @@ function wallProperties(assembly: WallAssembly, units: Units): WallProperties {
   const edition = assembly.edition ?? '2015';
   const row = assembly.published === undefined ? undefined : panelWall(assembly.published);
   const published = row === undefined ? undefined : panelWallAssembly(row, edition, units);
-  const nominalUnitShear = { ...published?.nominalUnitShear, ...assembly.nominalUnitShear };
+  const nominalUnitShear = nominalOf(assembly, published);
   const nailed = nailedPanel(assembly, units);
   return {
     assembly,
@@ -56,6 +56,13 @@ function wallProperties(assembly: WallAssembly, units: Units): WallProperties {
     endPostStiffness: assembly.endPostStiffness ?? Infinity,
     nailed,
   };
+}
+
+/** Stated, and beside it what is published. */
+function nominalOf(assembly: WallAssembly, published: WallAssembly | undefined): NominalUnitShear {
+  const seismic = assembly.nominalUnitShear?.seismic ?? published?.nominalUnitShear?.seismic;
+  const wind = assembly.nominalUnitShear?.wind ?? published?.nominalUnitShear?.wind;
+  return { ...(seismic === undefined ? {} : { seismic }), ...(wind === undefined ? {} : { wind }) };
 }
 
 function nailedPanel({ fourTerm }: WallAssembly, units: Units): NailedPanel | undefined {

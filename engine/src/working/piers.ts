@@ -2,6 +2,7 @@
 import type { Demand } from '../path/result.js';
 import { fromDemand, fromFile, fromFileOr, linePath, pierPath, type Context } from './context.js';
 import { pierPlace, type PierPlace } from './members.js';
+import { deflectionStiffness, shearStiffness } from './pier-deflection.js';
 import { sumOf, type Steps, type Value } from './steps.js';
 
 export function pierShear(context: Context, demand: Demand, steps: Steps): void {
@@ -31,7 +32,7 @@ export function pierUnitShear(context: Context, demand: Demand, steps: Steps): v
 export function pierShare(context: Context, place: PierPlace, steps: Steps): Value {
   const { line, storey, pier } = place;
   const parts = storey.piers.map((each, i) => {
-    const stiff = line.line.shareBy === 'stiffness' && storey.stated;
+    const stiff = (line.line.shareBy ?? 'length') !== 'length' && storey.stated;
     return stiff
       ? pierStiffness(context, { ...place, pier: each }, steps.fresh(`k_${i + 1}`), steps)
       : pierLength(context, { ...place, pier: each }, steps.fresh(`b_${i + 1}`), steps);
@@ -51,20 +52,19 @@ export function pierLength(context: Context, { line, pier }: PierPlace, symbol: 
   return steps.add(symbol, 'x_to − x_from', [to, from], length, { what: `length of pier ${pier.key}` });
 }
 
-/** Stated, or that of a wall which deforms in shear alone. */
+/** Stated, by the whole deflection where the line shares by it, or that of a wall which deforms in shear alone. */
 export function pierStiffness(context: Context, place: PierPlace, symbol: string, steps: Steps): Value {
   const { line, pier, storey } = place;
   const path = pierPath(line, pier);
   const { length, perLength } = context.units;
   const what = `stiffness of pier ${pier.key}`;
   if (pier.pier.stiffness !== undefined) return fromFile(context, symbol, `${path}.stiffness`, perLength, what);
-  const assembly = context.building.assemblies?.walls?.findIndex((wall) => wall.id === pier.pier.assembly) ?? -1;
-  const stiffness = `assemblies.walls[${assembly}].apparentShearStiffness`;
+  if (line.line.shareBy === 'deflection') return deflectionStiffness(context, place, symbol, steps);
   return steps.add(
     symbol,
     'G_a·(x_to − x_from)/(z_top − z_foot)',
     [
-      fromFile(context, 'G_a', stiffness, perLength),
+      shearStiffness(context, place),
       fromFile(context, 'x_to', `${path}.to`, length),
       fromFile(context, 'x_from', `${path}.from`, length),
       ...storeyHeight(context, storey.level),

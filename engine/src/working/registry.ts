@@ -24,6 +24,7 @@ import {
 } from './levels.js';
 import { centreOfMass } from './mass.js';
 import { openingChord, openingCorner, openingMoment } from './openings.js';
+import { pierDeflectionWorking } from './pier-deflection.js';
 import { pierShear, pierUnitShear } from './piers.js';
 import { spanChord, spanMoment, spanShear, spanUnitShear } from './spans.js';
 import type { Steps } from './steps.js';
@@ -61,6 +62,7 @@ const WORKINGS: Readonly<Partial<Record<DemandKind, Readonly<Partial<Record<Quan
   pier: {
     shear: pierShear,
     'unit-shear': pierUnitShear,
+    deflection: pierDeflectionWorking,
     'end-tension': endTension,
     'end-compression': endCompression,
   },

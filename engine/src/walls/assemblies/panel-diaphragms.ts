@@ -44,11 +44,7 @@ export function panelDiaphragmNominalPlf(diaphragm: PanelDiaphragm, edition: Edi
 }
 
 /** A published diaphragm as an assembly of a building file, in the file's units; its shear stiffness is for the engineer to state. */
-export function panelDiaphragmAssembly(
-  diaphragm: PanelDiaphragm,
-  edition: Edition,
-  units: Units,
-): DiaphragmAssembly {
+export function panelDiaphragmAssembly(diaphragm: PanelDiaphragm, edition: Edition, units: Units): DiaphragmAssembly {
   const nominal = panelDiaphragmNominalPlf(diaphragm, edition);
   return {
     id: diaphragm.id,
