@@ -28,7 +28,7 @@ export function deflectionStiffness(context: Context, place: PierPlace, symbol: 
     return readOff(
       context,
       symbol,
-      `${pierPath(line, pier)}.assembly`,
+      pierPath(line, pier),
       value,
       perLength,
       `${what}: secant of its four-term deflection at 1.4 times the allowable unit shear`,
@@ -51,9 +51,11 @@ export function shearStiffness(context: Context, { pier }: PierPlace): Value {
   if (assembly?.apparentShearStiffness !== undefined) {
     return fromFile(context, 'G_a', `${path}.apparentShearStiffness`, perLength);
   }
-  const source = assembly?.published === undefined ? 'fourTerm' : 'published';
-  const what = source === 'published' ? 'SDPWS-2015 Table 4.3A' : 'SDPWS commentary C4.2.2-3, at 1.4 v_allowable';
-  return readOff(context, 'G_a', `${path}.${source}`, pier.wall?.shearStiffness ?? NaN, perLength, what);
+  const what =
+    assembly?.published === undefined
+      ? 'SDPWS commentary C4.2.2-3, at 1.4 v_allowable'
+      : `${assembly.published}, SDPWS-2015 Table 4.3A`;
+  return readOff(context, 'G_a', path, pier.wall?.shearStiffness ?? NaN, perLength, what);
 }
 
 function pierWidth(context: Context, { line, pier }: PierPlace, symbol: string, steps: Steps): Value {
