@@ -43,6 +43,17 @@ export function gravityCombinations(building: Building): readonly FactoredCombin
   return [...found.values()];
 }
 
+/**
+ * The format of the combinations that a load case enters: allowable stress or strength.
+ *
+ * @returns undefined where they are a list of the file's own, or none
+ */
+export function formatFor(building: Building, loadCase: LoadCase): 'allowable' | 'strength' | undefined {
+  const named = basisOf(building, loadCase)?.combinations ?? building.combinations;
+  if (typeof named !== 'string') return undefined;
+  return named.endsWith('allowable') ? 'allowable' : 'strength';
+}
+
 function setOf(building: Building, loadCase: LoadCase): readonly FactoredCombination[] {
   const basis = basisOf(building, loadCase);
   const named: Combinations | undefined = basis?.combinations ?? building.combinations;

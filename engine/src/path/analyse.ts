@@ -4,7 +4,7 @@ import type { Result } from '../building/fault.js';
 import { Refusal } from '../building/refusal.js';
 import type { SeismicRules } from '../loads/asce7/overstrength.js';
 import { basisFindings } from '../loads/basis-findings.js';
-import { combinationsFor, gravityCombinations, overstrengthFor } from '../loads/combinations.js';
+import { combinationsFor, formatFor, gravityCombinations, overstrengthFor } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { sharingFaults } from '../walls/sharing-faults.js';
 import { bodiesOf, type Bodies } from './bodies.js';
@@ -24,6 +24,7 @@ import { planFindings, postFindings, torsionFindings } from './findings.js';
 import { addHorizontal, addVertical, emptyGraph } from './graph.js';
 import { levelDemands } from './level-demands.js';
 import { buildModel, type Model } from './model.js';
+import { pierRatios, slenderFindings } from './pier-ratios.js';
 import { requirementFindings, requirementsOf, type Requirements } from './requirements.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { descendAll, runCase, type CaseRun } from './run.js';
@@ -124,6 +125,18 @@ export function analysisOf(prepared: Prepared): Analysis {
     overstrength: overstrengthOf(building, loadCase, requirements.get(loadCase.id)),
   }));
   pierEndDemands(table, descent, supporting, lateral);
+  findings.push(
+    ...slenderFindings(model),
+    ...pierRatios(
+      table,
+      descent,
+      runs.map((run, c) => ({
+        ...(lateral[c] as LateralComponent),
+        run,
+        format: formatFor(building, run.subCase.loadCase),
+      })),
+    ),
+  );
   supportDemands(
     table,
     descent,

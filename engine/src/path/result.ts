@@ -48,6 +48,7 @@ export const Quantity = z.enum([
   'deflection',
   'deflection-ratio',
   'ratio',
+  'hold-down-ratio',
   'uplift',
   'bearing',
 ]);

@@ -25,6 +25,7 @@ import {
 import { centreOfMass } from './mass.js';
 import { openingChord, openingCorner, openingMoment } from './openings.js';
 import { pierDeflectionWorking } from './pier-deflection.js';
+import { holdDownRatio, pierRatio } from './pier-ratios.js';
 import { pierShear, pierUnitShear } from './piers.js';
 import { spanChord, spanMoment, spanShear, spanUnitShear } from './spans.js';
 import type { Steps } from './steps.js';
@@ -63,6 +64,8 @@ const WORKINGS: Readonly<Partial<Record<DemandKind, Readonly<Partial<Record<Quan
     shear: pierShear,
     'unit-shear': pierUnitShear,
     deflection: pierDeflectionWorking,
+    ratio: pierRatio,
+    'hold-down-ratio': holdDownRatio,
     'end-tension': endTension,
     'end-compression': endCompression,
   },
