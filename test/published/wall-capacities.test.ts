@@ -5,9 +5,9 @@ import { check } from './verification.js';
 describe('piers and hold-downs against what their assemblies may carry', () => {
   const building = analysed('wall-capacities');
   const ratio = (pier: string, caseId: string, combination: string) =>
-    value(building, `${pier.replace('/', '/roof/')}`, 'ratio', caseId, 1, combination);
+    value(building, pier.replace('/', '/roof/'), 'ratio', caseId, 1, combination);
   const unitShear = (pier: string, caseId: string) =>
-    value(building, `${pier.replace('/', '/roof/')}`, 'unit-shear', caseId);
+    value(building, pier.replace('/', '/roof/'), 'unit-shear', caseId);
   // 15/32 in. sheathing, 8d at 6 in.: allowable 260 lb/ft seismic, 365 wind (SDPWS-2015 Table 4.3A, half of 520 and 730)
   const source = 'SDPWS-2015 Table 4.3A with 4.2.3, 4.3.4.2, 4.3.3.4.1';
 
