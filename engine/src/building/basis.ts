@@ -21,6 +21,24 @@ export const AsceSeismic = z.strictObject({
   Cd: Positive.optional().describe('Default R'),
   importance: Positive.optional().describe('Iₑ; default 1'),
   redundancy: z.number().min(1).max(1.3).optional().describe('ρ; default 1'),
+  redundancyRule: z
+    .enum(['stated', 'determined'])
+    .optional()
+    .describe(
+      'Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated',
+    ),
+  accidentalTorsion: z
+    .enum(['stated', 'required'])
+    .optional()
+    .describe(
+      'Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated',
+    ),
+  shortPeriodCap: z
+    .boolean()
+    .optional()
+    .describe(
+      'Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false',
+    ),
   designCategory: z
     .enum(['A', 'B', 'C', 'D', 'E', 'F'])
     .optional()
@@ -28,8 +46,12 @@ export const AsceSeismic = z.strictObject({
       'Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it',
     ),
   period: Positive.optional().describe('T [s]; default the approximate period Cₜ hₙˣ'),
-  Ct: Positive.optional().describe('Cₜ for hₙ in feet; default 0.02'),
-  x: Positive.optional().describe('Default 0.75'),
+  periodSystem: z
+    .enum(['steel moment frames', 'concrete moment frames', 'eccentrically or buckling-restrained braced', 'all other'])
+    .optional()
+    .describe('System by which Cₜ and x of the approximate period are taken; default all other'),
+  Ct: Positive.optional().describe('Cₜ for hₙ in feet; default that of `periodSystem`, 0.02'),
+  x: Positive.optional().describe('Default that of `periodSystem`, 0.75'),
 });
 
 /** ASCE 7 chapters 26 and 27, directional procedure: main wind force resisting system, enclosed or partially enclosed. */

@@ -14,9 +14,17 @@ export type FactoredCombination = {
   readonly lateral: number;
 };
 
-/** The combinations that a load case enters: of the set of its basis, or of the file's where the basis names none. */
-export function combinationsFor(building: Building, loadCase: LoadCase): readonly FactoredCombination[] {
-  return setOf(building, loadCase).filter(({ applies }) => applies === loadCase.kind);
+/**
+ * The combinations that a load case enters: of the set of its basis, or of the file's where the basis names none.
+ *
+ * @param redundancy ρ where it is not the one that the basis states
+ */
+export function combinationsFor(
+  building: Building,
+  loadCase: LoadCase,
+  redundancy?: number,
+): readonly FactoredCombination[] {
+  return setOf(building, loadCase, redundancy).filter(({ applies }) => applies === loadCase.kind);
 }
 
 /** The forms with overstrength of the combinations that a load case enters; none where the set is the file's own list. */
@@ -54,12 +62,18 @@ export function formatFor(building: Building, loadCase: LoadCase): 'allowable' |
   return named.endsWith('allowable') ? 'allowable' : 'strength';
 }
 
-function setOf(building: Building, loadCase: LoadCase): readonly FactoredCombination[] {
+function setOf(building: Building, loadCase: LoadCase, redundancy?: number): readonly FactoredCombination[] {
   const basis = basisOf(building, loadCase);
   const named: Combinations | undefined = basis?.combinations ?? building.combinations;
   if (named === undefined) return [];
   if (named === 'EN 1990') return en1990Combinations();
-  if (typeof named === 'string') return asceCombinations(named, isAsce(basis) ? basis.seismic : undefined);
+  if (typeof named === 'string') {
+    const seismic = isAsce(basis) ? basis.seismic : undefined;
+    return asceCombinations(
+      named,
+      seismic === undefined || redundancy === undefined ? seismic : { ...seismic, redundancy },
+    );
+  }
   return named.map(({ id, factors }) => ({
     id,
     applies: factors.E !== undefined ? 'seismic' : factors.W !== undefined ? 'wind' : 'gravity',

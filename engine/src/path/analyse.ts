@@ -7,6 +7,7 @@ import { basisFindings } from '../loads/basis-findings.js';
 import { combinationsFor, formatFor, gravityCombinations, overstrengthFor } from '../loads/combinations.js';
 import { GRAVITY, type PostDescent } from '../walls/posts.js';
 import { sharingFaults } from '../walls/sharing-faults.js';
+import { neededRuns, withoutAccidental } from './accidental.js';
 import { bodiesOf, type Bodies } from './bodies.js';
 import { subCases } from './cases.js';
 import { addCombined, combinedRuns, type CombinedRun } from './combined.js';
@@ -25,7 +26,15 @@ import { addHorizontal, addVertical, emptyGraph } from './graph.js';
 import { levelDemands } from './level-demands.js';
 import { buildModel, type Model } from './model.js';
 import { pierRatios, slenderFindings } from './pier-ratios.js';
-import { requirementFindings, requirementsOf, type Requirements } from './requirements.js';
+import {
+  redundanciesOf,
+  redundancyFindings,
+  requirementFindings,
+  requirementsOf,
+  withRedundancies,
+  type Redundancies,
+  type Requirements,
+} from './requirements.js';
 import type { Analysis, Diagram, Finding } from './result.js';
 import { descendAll, runCase, type CaseRun } from './run.js';
 import { checkMembranes, semiRigidFindings } from './semi-rigid-findings.js';
@@ -56,6 +65,9 @@ export type Prepared = {
   readonly descent: PostDescent;
   /** Of the plan, then of torsion: what irregularities are read from. */
   readonly irregular: readonly Finding[];
+  /** What decided on accidental torsion. */
+  readonly accidental: readonly Finding[];
+  readonly redundancies: Redundancies;
   readonly requirements: Requirements;
   /** What stands under walls that stop. */
   readonly supporting: Supporting;
@@ -66,27 +78,45 @@ export function prepare(building: Building): Prepared {
   refuseUnavailable(building);
   const model = buildModel(building);
   const bodies = bodiesOf(model);
-  const runs = subCases(building, model).map((subCase) => runCase(model, bodies, subCase));
+  const { runs, findings: accidental } = neededRuns(
+    subCases(building, model).map((subCase) => runCase(model, bodies, subCase)),
+  );
   const combined = combinedRuns(building, model, runs);
   const descent = descendAll(model, [...runs, ...combined]);
   const irregular = [
     ...planFindings(model, bodies, new Set(runs.map(({ subCase }) => subCase.frame))),
     ...runs.flatMap((run) => torsionFindings(run)),
   ];
-  const requirements = requirementsOf(building, model, irregular, descent);
-  const supporting = supportingOf(descent);
-  return { building, model, bodies, runs, combined, descent, irregular, requirements, supporting };
+  const rules = requirementsOf(building, model, irregular, descent);
+  const redundancies = redundanciesOf(building, model, runs, rules);
+  return {
+    building,
+    model,
+    bodies,
+    runs,
+    combined,
+    descent,
+    irregular,
+    accidental,
+    redundancies,
+    requirements: withRedundancies(rules, redundancies),
+    supporting: supportingOf(descent),
+  };
 }
 
 /** @throws Refusal where the certificate is above its bound */
 export function analysisOf(prepared: Prepared): Analysis {
-  const { building, model, bodies, runs, combined, descent, irregular, requirements, supporting } = prepared;
+  const { building, model, bodies, runs, combined, descent, irregular, requirements, redundancies, supporting } =
+    prepared;
   const table: Table = { rows: [], units: unitNames(building) };
   const diagrams: Diagram[] = [];
   const graph = emptyGraph();
   const ledger: Ledger = new Map();
   const findings: Finding[] = [
     ...irregular,
+    ...prepared.accidental,
+    ...withoutAccidental(building, model),
+    ...redundancyFindings(redundancies),
     ...requirementFindings(building, requirements, supporting.feet.size + supporting.columns.size > 0),
   ];
   findings.push(...basisFindings(building));
@@ -121,7 +151,7 @@ export function analysisOf(prepared: Prepared): Analysis {
   const lateral = carried.map(({ id, loadCase }, c): LateralComponent => ({
     id,
     component: GRAVITY.length + c,
-    combinations: combinationsFor(building, loadCase),
+    combinations: combinationsFor(building, loadCase, redundancies.get(loadCase.id)?.factor),
     overstrength: overstrengthOf(building, loadCase, requirements.get(loadCase.id)),
   }));
   pierEndDemands(table, descent, supporting, lateral);

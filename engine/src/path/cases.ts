@@ -7,6 +7,7 @@ import { levelForces } from '../loads/level-forces.js';
 import type { Spread } from '../diaphragms/inertia.js';
 import { basisOf, isAsce, liveShare } from '../loads/basis-of.js';
 import type { LoadPiece } from '../statics/span-load.js';
+import { requiredEccentricities } from './accidental.js';
 import type { Model } from './model.js';
 
 export type SubCase = {
@@ -24,6 +25,8 @@ export type SubCase = {
   readonly eccentricity: number;
   /** Whether the eccentricity is amplified by Aₓ. */
   readonly amplified: boolean;
+  /** Torsional ratio above which the eccentricity stays; absent where it stays whatever the ratio. */
+  readonly neededAbove?: number;
   /** Storey force and diaphragm design force by level index [force] */
   readonly storeyForce: readonly number[];
   readonly diaphragmForce: readonly number[];
@@ -71,7 +74,7 @@ export function subCases(building: Building, model: Model): SubCase[] {
     };
     if (windFromBasis(loadCase)) return windCases(building, model, whole);
     const accidental = loadCase.accidental;
-    if (accidental === undefined) return [whole];
+    if (accidental === undefined) return [whole, ...requiredEccentricities(building, model, whole)];
     const amplified = accidental.amplified ?? false;
     return [
       whole,

@@ -1,10 +1,15 @@
 /** What the standard of a case's basis asks for beyond its forces, given how the building stands. */
-import type { Building } from '../building/definition.js';
+import type { Building, LoadCase } from '../building/definition.js';
 import { seismicRules, type SeismicRules } from '../loads/asce7/overstrength.js';
 import { basisOf, isAsce } from '../loads/basis-of.js';
 import type { PostDescent } from '../walls/posts.js';
 import type { Model } from './model.js';
+import { redundancyOf, type Redundancy } from './redundancy.js';
 import type { Finding } from './result.js';
+import type { CaseRun } from './run.js';
+
+/** ρ of the cases whose basis has it determined, by id of the load case. */
+export type Redundancies = ReadonlyMap<string, Redundancy>;
 
 /** By id of the load case; cases that no such rule touches are left out. */
 export type Requirements = ReadonlyMap<string, SeismicRules>;
@@ -51,6 +56,81 @@ function irregularitiesOf(findings: readonly Finding[], descent: PostDescent): s
   );
   if (offset) found.add('vertical 4');
   return [...found].sort();
+}
+
+/** ρ of every case whose basis has it determined; a combined case takes the largest of its parts. */
+export function redundanciesOf(
+  building: Building,
+  model: Model,
+  runs: readonly CaseRun[],
+  requirements: Requirements,
+): Redundancies {
+  const found = new Map<string, Redundancy>();
+  const asks = (loadCase: LoadCase): SeismicRules | undefined => {
+    const basis = basisOf(building, loadCase);
+    return isAsce(basis) && basis.seismic?.redundancyRule === 'determined' ? requirements.get(loadCase.id) : undefined;
+  };
+  for (const { subCase, ...run } of runs) {
+    const { loadCase } = subCase;
+    const rules = asks(loadCase);
+    if (rules === undefined || subCase.id !== loadCase.id) continue;
+    const basis = basisOf(building, loadCase);
+    const light = isAsce(basis) && basis.seismic?.lightFrame === true;
+    found.set(loadCase.id, redundancyOf(model, { subCase, ...run }, rules, light));
+  }
+  for (const loadCase of building.loadCases) {
+    if (loadCase.from !== 'combined' || asks(loadCase) === undefined) continue;
+    const parts = loadCase.parts.flatMap((part) => found.get(part.case) ?? []);
+    const largest = parts.reduce<Redundancy | undefined>(
+      (most, each) => (most === undefined || each.factor > most.factor ? each : most),
+      undefined,
+    );
+    if (largest !== undefined) found.set(loadCase.id, largest);
+  }
+  return found;
+}
+
+/** The rules with ρ as it was determined. */
+export function withRedundancies(requirements: Requirements, redundancies: Redundancies): Requirements {
+  return new Map(
+    [...requirements].map(([id, rules]) => [
+      id,
+      { ...rules, redundancy: redundancies.get(id)?.factor ?? rules.redundancy },
+    ]),
+  );
+}
+
+/** What decided on ρ. */
+export function redundancyFindings(redundancies: Redundancies): Finding[] {
+  return [...redundancies].map(([id, { factor, because, worst, bays }]): Finding => {
+    const without =
+      worst === undefined
+        ? 'no wall of a storey with more than 35 % of the base shear is taller than long'
+        : `without pier ${worst.pier} the storey under ${worst.level} loses ${(worst.loss * 100).toFixed(1)} % of its strength (at most 33 %)` +
+          (worst.torsion === undefined
+            ? ''
+            : ` and drifts ${worst.torsion.toPrecision(4)} times its average at an edge (at most 1.4)`);
+    const sides = bays === undefined ? '' : `; the plan has at least ${bays.toPrecision(3)} bays of wall on every side`;
+    const reason = {
+      category: 'the design category asks for no more',
+      removal: without,
+      perimeter: without + sides,
+      storey: without + sides,
+    };
+    return {
+      code: 'redundancy',
+      severity: factor > 1 ? 'warning' : 'note',
+      member: id,
+      case: id,
+      sentence: `ρ of ${id} is ${factor}: ${reason[because]} (ASCE 7-16 12.3.4).`,
+      numbers: {
+        redundancy: factor,
+        ...(worst === undefined ? {} : { loss: worst.loss }),
+        ...(worst?.torsion === undefined ? {} : { torsion: worst.torsion }),
+        ...(bays === undefined || !Number.isFinite(bays) ? {} : { bays }),
+      },
+    };
+  });
 }
 
 /** What the rules change, and what they would change if the file stated more. */

@@ -9,6 +9,7 @@ import {
   overstrengthFor,
   type FactoredCombination,
 } from '../loads/combinations.js';
+import type { Redundancy } from '../path/redundancy.js';
 import { basisPlace } from './basis-path.js';
 import { carriedCase, fromFile, fromFileOr, type Context } from './context.js';
 import type { Steps, Value } from './steps.js';
@@ -40,12 +41,13 @@ export function factorsOf(context: Context, caseId: string, id: string, steps: S
   }
   if (named === undefined) throw new Error(`no combinations for ${loadCase.id}`);
   const clause = `${named}: ${id}`;
+  const determined = context.redundancies.get(loadCase.id);
   const rules = context.requirements.get(loadCase.id);
   const raised = rules === undefined ? [] : overstrengthFor(building, loadCase, rules.overstrength);
   const overstrength = raised.find((candidate) => candidate.id === id);
   const combination =
     overstrength ??
-    (run === undefined ? gravityCombinations(building) : combinationsFor(building, loadCase)).find(
+    (run === undefined ? gravityCombinations(building) : combinationsFor(building, loadCase, determined?.factor)).find(
       (candidate) => candidate.id === id,
     );
   if (combination === undefined) throw new Error(`no combination ${id}`);
@@ -53,7 +55,15 @@ export function factorsOf(context: Context, caseId: string, id: string, steps: S
   const terms = publishedTerms(named, id);
   if (terms === undefined) throw new Error(`no combination ${id} in ${named}`);
   const seismic = isAsce(place?.basis) && place.basis.seismic !== undefined ? `${place.path}.seismic` : undefined;
-  return asceFactors(context, terms, clause, seismic, steps, overstrength === undefined ? undefined : rules);
+  return asceFactors(
+    context,
+    terms,
+    clause,
+    seismic,
+    steps,
+    overstrength === undefined ? undefined : rules,
+    determined,
+  );
 }
 
 /** A combination of gravity alone stands in the set of the first load case that has it. */
@@ -108,6 +118,7 @@ function asceFactors(
   seismic: string | undefined,
   steps: Steps,
   overstrength: SeismicRules | undefined,
+  determined: Redundancy | undefined,
 ): Factors {
   const gravity = new Map<GravityCase, Value>();
   for (const name of GRAVITY) {
@@ -133,7 +144,10 @@ function asceFactors(
     const factor = overstrengthValue(context, seismic, overstrength, steps);
     return { gravity, lateral: steps.add('f_E', `${lateral}·Ω_0`, [factor], '1', notes) };
   }
-  const redundancy = fromFileOr(context, 'ρ', `${seismic}.redundancy`, 1, '1');
+  const redundancy =
+    determined === undefined
+      ? fromFileOr(context, 'ρ', `${seismic}.redundancy`, 1, '1')
+      : literal('ρ', determined.factor, 'redundancy, as the finding says', 'ASCE 7-16 12.3.4', steps);
   const notes = { what, clause: `${clause}; ASCE 7-16 Eq. 12.4-3` };
   return { gravity, lateral: steps.add('f_E', `${lateral}·ρ`, [redundancy], '1', notes) };
 }

@@ -14,6 +14,8 @@ export type BaseShear = {
   /** Period used [s] */
   readonly period: number;
   readonly coefficient: number;
+  /** S_DS used: that of the basis, or the one that 12.8.1.3 permits. */
+  readonly spectral: number;
   /** Which equation gave the coefficient. */
   readonly governs: '12.8-2' | '12.8-3' | '12.8-4' | '12.8-5' | '12.8-6';
   /** Exponent of the vertical distribution. */
@@ -24,15 +26,18 @@ export type BaseShear = {
  * Seismic response coefficient.
  *
  * @param heightFt structural height h_n [ft]
+ * @param storeys  above the base
  * Source: ASCE 7-16 12.8.1.1, 12.8.2, 12.8.3 (the same in 7-22); the equations from memory, not checked against the document.
  */
-export function baseShear(basis: AsceSeismic, heightFt: number): BaseShear {
+export function baseShear(basis: AsceSeismic, heightFt: number, storeys = Infinity): BaseShear {
   const importance = basis.importance ?? 1;
   const ratio = basis.R / importance;
-  const approximate = (basis.Ct ?? 0.02) * heightFt ** (basis.x ?? 0.75); // Eq. 12.8-7
+  const { Ct, x } = approximatePeriod(basis);
+  const approximate = Ct * heightFt ** x; // Eq. 12.8-7
   const period = basis.period === undefined ? approximate : Math.min(basis.period, upperLimit(basis.SD1) * approximate); // 12.8.2
   const longPeriod = basis.TL ?? 8;
-  let coefficient = basis.SDS / ratio; // Eq. 12.8-2
+  const spectral = spectralAcceleration(basis, period, storeys);
+  let coefficient = spectral / ratio; // Eq. 12.8-2
   let governs: BaseShear['governs'] = '12.8-2';
   const most =
     period <= longPeriod
@@ -53,7 +58,37 @@ export function baseShear(basis: AsceSeismic, heightFt: number): BaseShear {
     governs = '12.8-6';
   }
   const k = period <= 0.5 ? 1 : period >= 2.5 ? 2 : 0.5 * period + 0.75; // 12.8.3
-  return { period, coefficient, governs, k };
+  return { period, coefficient, spectral, governs, k };
+}
+
+/** Source: ASCE 7-16 Table 12.8-2, for h_n in feet; from memory, not checked against the document. */
+const PERIODS = {
+  'steel moment frames': { Ct: 0.028, x: 0.8 },
+  'concrete moment frames': { Ct: 0.016, x: 0.9 },
+  'eccentrically or buckling-restrained braced': { Ct: 0.03, x: 0.75 },
+  'all other': { Ct: 0.02, x: 0.75 },
+} as const;
+
+/** C_t and x of the approximate period: as stated, else those of the system. */
+export function approximatePeriod(basis: Pick<AsceSeismic, 'Ct' | 'x' | 'periodSystem'>): { Ct: number; x: number } {
+  const system = PERIODS[basis.periodSystem ?? 'all other'];
+  return { Ct: basis.Ct ?? system.Ct, x: basis.x ?? system.x };
+}
+
+/**
+ * S_DS for C_s: 1.0, but not less than 70 % of S_DS, for a regular structure of up to five storeys with T ≤ 0.5 s and ρ = 1. What the
+ * file cannot show (regular, risk category, site class) is stated by `shortPeriodCap`.
+ *
+ * Source: ASCE 7-16 12.8.1.3; from memory, not checked against the document.
+ */
+function spectralAcceleration(basis: AsceSeismic, period: number, storeys: number): number {
+  const permitted =
+    basis.shortPeriodCap === true &&
+    storeys <= 5 &&
+    period <= 0.5 &&
+    (basis.redundancy ?? 1) === 1 &&
+    basis.redundancyRule !== 'determined';
+  return permitted ? Math.min(basis.SDS, Math.max(1, 0.7 * basis.SDS)) : basis.SDS;
 }
 
 /** C_u, linear between the table's values. Source: ASCE 7-16 Table 12.8-1; from memory, not checked against the document. */

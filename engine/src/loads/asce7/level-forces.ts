@@ -24,7 +24,7 @@ export function equivalentLateralForces(
   }));
   const total = levels.reduce((sum, level) => sum + level.weight, 0);
   if (!(total > 0)) return noWeight(caseId);
-  const { coefficient, k } = baseShear(basis, levels[levels.length - 1]?.heightFt ?? 0);
+  const { coefficient, k } = baseShear(basis, levels[levels.length - 1]?.heightFt ?? 0, levels.length);
   const forces = verticalDistribution(levels, coefficient * total, k); // ASCE 7-16 Eq. 12.8-1
   const design = diaphragmLimits(levels, forces, basis);
   return {
