@@ -2551,15 +2551,32 @@ export interface operations {
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
                                 /**
+                                 * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                                 * @enum {string}
+                                 */
+                                redundancyRule?: "stated" | "determined";
+                                /**
+                                 * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                                 * @enum {string}
+                                 */
+                                accidentalTorsion?: "stated" | "required";
+                                /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                                shortPeriodCap?: boolean;
+                                /**
                                  * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                                  * @enum {string}
                                  */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
-                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                /**
+                                 * @description System by which Cₜ and x of the approximate period are taken; default all other
+                                 * @enum {string}
+                                 */
+                                periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                                /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                                 Ct?: number;
-                                /** @description Default 0.75 */
+                                /** @description Default that of `periodSystem`, 0.75 */
                                 x?: number;
                             };
                             wind?: {
@@ -2626,15 +2643,32 @@ export interface operations {
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
                                 /**
+                                 * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                                 * @enum {string}
+                                 */
+                                redundancyRule?: "stated" | "determined";
+                                /**
+                                 * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                                 * @enum {string}
+                                 */
+                                accidentalTorsion?: "stated" | "required";
+                                /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                                shortPeriodCap?: boolean;
+                                /**
                                  * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                                  * @enum {string}
                                  */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
-                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                /**
+                                 * @description System by which Cₜ and x of the approximate period are taken; default all other
+                                 * @enum {string}
+                                 */
+                                periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                                /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                                 Ct?: number;
-                                /** @description Default 0.75 */
+                                /** @description Default that of `periodSystem`, 0.75 */
                                 x?: number;
                             };
                             wind?: {
@@ -2749,15 +2783,32 @@ export interface operations {
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
                                 /**
+                                 * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                                 * @enum {string}
+                                 */
+                                redundancyRule?: "stated" | "determined";
+                                /**
+                                 * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                                 * @enum {string}
+                                 */
+                                accidentalTorsion?: "stated" | "required";
+                                /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                                shortPeriodCap?: boolean;
+                                /**
                                  * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                                  * @enum {string}
                                  */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
-                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                /**
+                                 * @description System by which Cₜ and x of the approximate period are taken; default all other
+                                 * @enum {string}
+                                 */
+                                periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                                /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                                 Ct?: number;
-                                /** @description Default 0.75 */
+                                /** @description Default that of `periodSystem`, 0.75 */
                                 x?: number;
                             };
                             wind?: {
@@ -2827,15 +2878,32 @@ export interface operations {
                                 /** @description ρ; default 1 */
                                 redundancy?: number;
                                 /**
+                                 * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                                 * @enum {string}
+                                 */
+                                redundancyRule?: "stated" | "determined";
+                                /**
+                                 * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                                 * @enum {string}
+                                 */
+                                accidentalTorsion?: "stated" | "required";
+                                /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                                shortPeriodCap?: boolean;
+                                /**
                                  * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                                  * @enum {string}
                                  */
                                 designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                                 /** @description T [s]; default the approximate period Cₜ hₙˣ */
                                 period?: number;
-                                /** @description Cₜ for hₙ in feet; default 0.02 */
+                                /**
+                                 * @description System by which Cₜ and x of the approximate period are taken; default all other
+                                 * @enum {string}
+                                 */
+                                periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                                /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                                 Ct?: number;
-                                /** @description Default 0.75 */
+                                /** @description Default that of `periodSystem`, 0.75 */
                                 x?: number;
                             };
                             wind?: {
@@ -3296,15 +3364,32 @@ export interface operations {
                             /** @description ρ; default 1 */
                             redundancy?: number;
                             /**
+                             * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                             * @enum {string}
+                             */
+                            redundancyRule?: "stated" | "determined";
+                            /**
+                             * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                             * @enum {string}
+                             */
+                            accidentalTorsion?: "stated" | "required";
+                            /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                            shortPeriodCap?: boolean;
+                            /**
                              * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                              * @enum {string}
                              */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
-                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            /**
+                             * @description System by which Cₜ and x of the approximate period are taken; default all other
+                             * @enum {string}
+                             */
+                            periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                            /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                             Ct?: number;
-                            /** @description Default 0.75 */
+                            /** @description Default that of `periodSystem`, 0.75 */
                             x?: number;
                         };
                         wind?: {
@@ -3371,15 +3456,32 @@ export interface operations {
                             /** @description ρ; default 1 */
                             redundancy?: number;
                             /**
+                             * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                             * @enum {string}
+                             */
+                            redundancyRule?: "stated" | "determined";
+                            /**
+                             * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                             * @enum {string}
+                             */
+                            accidentalTorsion?: "stated" | "required";
+                            /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                            shortPeriodCap?: boolean;
+                            /**
                              * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                              * @enum {string}
                              */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
-                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            /**
+                             * @description System by which Cₜ and x of the approximate period are taken; default all other
+                             * @enum {string}
+                             */
+                            periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                            /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                             Ct?: number;
-                            /** @description Default 0.75 */
+                            /** @description Default that of `periodSystem`, 0.75 */
                             x?: number;
                         };
                         wind?: {
@@ -3494,15 +3596,32 @@ export interface operations {
                             /** @description ρ; default 1 */
                             redundancy?: number;
                             /**
+                             * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                             * @enum {string}
+                             */
+                            redundancyRule?: "stated" | "determined";
+                            /**
+                             * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                             * @enum {string}
+                             */
+                            accidentalTorsion?: "stated" | "required";
+                            /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                            shortPeriodCap?: boolean;
+                            /**
                              * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                              * @enum {string}
                              */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
-                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            /**
+                             * @description System by which Cₜ and x of the approximate period are taken; default all other
+                             * @enum {string}
+                             */
+                            periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                            /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                             Ct?: number;
-                            /** @description Default 0.75 */
+                            /** @description Default that of `periodSystem`, 0.75 */
                             x?: number;
                         };
                         wind?: {
@@ -3572,15 +3691,32 @@ export interface operations {
                             /** @description ρ; default 1 */
                             redundancy?: number;
                             /**
+                             * @description Where ρ comes from: `redundancy`, or what the loss of one wall does to each storey, in each direction; default stated
+                             * @enum {string}
+                             */
+                            redundancyRule?: "stated" | "determined";
+                            /**
+                             * @description Accidental eccentricity of load cases from this basis: as each case states it, or ±5 % with amplification where a case states none and a torsional irregularity asks for it; default stated
+                             * @enum {string}
+                             */
+                            accidentalTorsion?: "stated" | "required";
+                            /** @description Cₛ from an SDS of 1, but not less than 70 % of it, with up to five storeys, T ≤ 0.5 s and ρ = 1: states that the structure is regular, of risk category I or II and not on site class E or F; default false */
+                            shortPeriodCap?: boolean;
+                            /**
                              * @description Seismic design category; without one no overstrength for collectors and under walls that stop, and no other rule that hangs on it
                              * @enum {string}
                              */
                             designCategory?: "A" | "B" | "C" | "D" | "E" | "F";
                             /** @description T [s]; default the approximate period Cₜ hₙˣ */
                             period?: number;
-                            /** @description Cₜ for hₙ in feet; default 0.02 */
+                            /**
+                             * @description System by which Cₜ and x of the approximate period are taken; default all other
+                             * @enum {string}
+                             */
+                            periodSystem?: "steel moment frames" | "concrete moment frames" | "eccentrically or buckling-restrained braced" | "all other";
+                            /** @description Cₜ for hₙ in feet; default that of `periodSystem`, 0.02 */
                             Ct?: number;
-                            /** @description Default 0.75 */
+                            /** @description Default that of `periodSystem`, 0.75 */
                             x?: number;
                         };
                         wind?: {

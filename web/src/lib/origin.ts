@@ -72,6 +72,12 @@ const PLAIN: Partial<Record<`${Demand['kind']}/${Quantity}`, string>> = {
   'opening/corner-force': 'the edge force of the strip, to be tied into the floor beyond the corner',
   'collector/axial-tension': 'floor shear on both sides and piers above and below, summed along the line',
   'collector/axial-compression': 'floor shear on both sides and piers above and below, summed along the line',
+  'collector/design-tension':
+    'the axial force of the set of forces that governs, at strength level: storey or diaphragm forces with overstrength, or the diaphragm forces themselves',
+  'collector/design-compression':
+    'the axial force of the set of forces that governs, at strength level: storey or diaphragm forces with overstrength, or the diaphragm forces themselves',
+  'collector/connection-force':
+    'what the floor hands to the wall line under the diaphragm forces, raised by 25 % for irregularities',
   'support/moment': 'the couple of the end-post forces at the foot of the lowest pier',
   'support/uplift': 'the tension of the end post, with what stands on it from above and the gravity of the combination',
   'support/bearing':

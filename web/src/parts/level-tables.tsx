@@ -156,8 +156,12 @@ export function CollectorTable({
     const tension = index.of(`${level}/${line.id}`, 'axial-tension', caseId, sense);
     const compression = index.of(`${level}/${line.id}`, 'axial-compression', caseId, sense);
     const reaction = index.of(`${line.id}/${level}`, 'reaction', caseId, sense);
-    return tension === undefined && reaction === undefined ? [] : [{ line, tension, compression, reaction }];
+    const design = (['design-tension', 'design-compression'] as const).map((what) =>
+      index.of(`${level}/${line.id}`, what, caseId, sense),
+    );
+    return tension === undefined && reaction === undefined ? [] : [{ line, tension, compression, reaction, design }];
   });
+  const designed = rows.some(({ design }) => design.some((demand) => demand !== undefined));
   return (
     <section className="panel">
       <h2>Wall lines and their collectors</h2>
@@ -169,10 +173,12 @@ export function CollectorTable({
             <th>Axial force along it</th>
             <th className="n">Tension +</th>
             <th className="n">Compression −</th>
+            {designed && <th className="n">Design +</th>}
+            {designed && <th className="n">Design −</th>}
           </tr>
         </thead>
         <tbody>
-          {rows.map(({ line, tension, compression, reaction }) => {
+          {rows.map(({ line, tension, compression, reaction, design }) => {
             const collector = collectors.find((candidate) => candidate.line.id === line.id);
             return (
               <tr key={line.id} className={line.id === shown ? 'on' : undefined}>
@@ -198,6 +204,12 @@ export function CollectorTable({
                 <td className="n">
                   <Figure demand={compression} />
                 </td>
+                {designed &&
+                  design.map((demand, i) => (
+                    <td className="n" key={i}>
+                      <Figure demand={demand} />
+                    </td>
+                  ))}
               </tr>
             );
           })}
