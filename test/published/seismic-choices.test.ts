@@ -162,7 +162,8 @@ test('ρ from what the loss of one wall does to the storey', () => {
   const numbers = (building: Building) => finding(solved(building), 'redundancy')?.numbers;
   // One slender wall of 8 ft on each side: half of the strength goes, and 0.8 bays are fewer than 2.
   const two = { along: square, across: [[0, 8]] as [number, number][] };
-  expect(numbers(oneStorey('flexible', two))).toEqual({ redundancy: 1.3, loss: 0.5, bays: expect.closeTo(0.8, 12) });
+  expect(numbers(oneStorey('flexible', two))).toMatchObject({ redundancy: 1.3, loss: 0.5 });
+  expect(numbers(oneStorey('flexible', two))?.['bays']).toBeCloseTo(0.8, 12);
   // Two slender walls on each side: a quarter goes.
   const four = {
     along: square,
@@ -232,8 +233,10 @@ test('ρ = 1 for a regular plan with two bays of wall on every side', () => {
   };
   const heavy = finding(solved(oneStorey('flexible', walls)), 'redundancy')?.numbers;
   const light = finding(solved(oneStorey('flexible', walls, { lightFrame: true })), 'redundancy')?.numbers;
-  expect(heavy).toMatchObject({ redundancy: 1.3, bays: expect.closeTo(1.05, 12) });
-  expect(light).toMatchObject({ redundancy: 1, bays: expect.closeTo(2.1, 12) });
+  expect(heavy?.['redundancy']).toBe(1.3);
+  expect(heavy?.['bays']).toBeCloseTo(1.05, 12);
+  expect(light?.['redundancy']).toBe(1);
+  expect(light?.['bays']).toBeCloseTo(2.1, 12);
 });
 
 test('ρ as determined stands in the combinations', () => {
