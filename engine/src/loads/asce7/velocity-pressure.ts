@@ -22,7 +22,7 @@ const PROFILE_2022: Readonly<Record<Exposure, Profile>> = {
 /** Below this height K_z stays what it is there [ft] */
 const LEAST_HEIGHT_FT = 15;
 
-function profileOf(edition: WindEdition, exposure: Exposure): Profile {
+export function profileOf(edition: WindEdition, exposure: Exposure): Profile {
   return (edition === 'ASCE 7-16' ? PROFILE_2016 : PROFILE_2022)[exposure];
 }
 
