@@ -10,7 +10,8 @@ import { analysed, value } from './cases.js';
 const g = 9.81;
 
 test('four storeys: period, design acceleration, base shear and storey forces', () => {
-  // EN 1998-1:2004 Eqs. 3.14, 4.5, 4.6, 4.11: derived by hand from the equations, masses 300, 300, 300 and 250 t at 3, 6, 9, 12 m
+  // EN 1998-1:2004 Eqs. 3.14, 4.5, 4.6, 4.11: derived by hand from the equations, masses 300, 300, 300 and 250 t at 3, 6, 9, 12 m;
+  // in the file they are G + ψ_E·Q with ψ_E = 0.3 (Eq. 3.17)
   const basis = { agR: 0.25, groundType: 'B', q: 3.9 } as const;
   const found = baseShear(basis, 12, 4);
   expect(found.period).toBeCloseTo(0.3224, 4);

@@ -1,6 +1,7 @@
 /** Workings of the lateral force method of EN 1998-1; its equations from memory, not checked against the document. */
 import type { EnSeismic } from '../building/basis.js';
 import { baseShear } from '../loads/en1998/lateral-force.js';
+import { liveShareOf } from '../loads/en1998/live-share.js';
 import { spectrumOf } from '../loads/en1998/spectrum.js';
 import { METRES_PER_FOOT, metresPer } from '../loads/units.js';
 import { elevationOf, fromFile, fromFileOr, readOff, type Context } from './context.js';
@@ -25,7 +26,8 @@ export function enForce(context: Context, path: string, level: number, steps: St
     ),
   );
   const ratio = ordinateSteps(context, path, heights[heights.length - 1] as Value, levels.length, steps);
-  const weights = levels.map(({ index }) => weightStep(context, index, steps, `w_${index}`));
+  const liveShare = liveShareOf(atPath(context.building, path) as EnSeismic); // Eq. 3.17
+  const weights = levels.map(({ index }) => weightStep(context, index, steps, `w_${index}`, liveShare));
   const whole = steps.add('W', sumOf(weights), weights, force, { what: 'weight m·g' });
   const shear = steps.add('F_b', 's_d·λ·W', [ratio.ordinate, ratio.lambda, whole], force, {
     what: 'base shear',

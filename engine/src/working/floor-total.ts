@@ -9,7 +9,7 @@ import type { Steps, Value } from './steps.js';
 /** @param inertias how the level's force lies on each of the diaphragms that count */
 export function totalStep(
   context: Context,
-  inertias: readonly Pick<Inertia, 'diaphragm' | 'frame' | 'spread' | 'facade'>[],
+  inertias: readonly (Pick<Inertia, 'frame' | 'spread' | 'facade'> & Weighed)[],
   steps: Steps,
   symbol = 'Σn',
   named?: string,

@@ -6,6 +6,7 @@ import { basisPlace } from './basis-path.js';
 import { casePath, fromDemand, fromFile, fromFileOr, levelOf, readOff, runOf, type Context } from './context.js';
 import { enForce } from './en-forces.js';
 import type { Steps, Value } from './steps.js';
+import { windLoads } from './wind-load.js';
 
 export function levelForce(context: Context, demand: Demand, steps: Steps): void {
   const { loadCase } = runOf(context, demand.case).subCase;
@@ -15,7 +16,7 @@ export function levelForce(context: Context, demand: Demand, steps: Steps): void
   }
   const place = basisPlace(context.building, loadCase);
   const level = levelOf(context, demand.member).index;
-  if (loadCase.kind === 'wind') windForce(context, demand, `${place?.path ?? ''}.wind`, level, steps);
+  if (loadCase.kind === 'wind') windForce(context, demand, level, steps);
   else if (isAsce(place?.basis)) asceForce(context, `${place.path}.seismic`, level, steps);
   else if (place !== undefined) enForce(context, `${place.path}.seismic`, level, steps);
   else throw new Error(`no basis for ${loadCase.id}`);
@@ -47,22 +48,12 @@ export function levelDiaphragmForce(context: Context, demand: Demand, steps: Ste
 }
 
 /** The wind of the stretches of façade that go to the level; three quarters of it with an eccentricity. */
-function windForce(context: Context, demand: Demand, path: string, level: number, steps: Steps): void {
+function windForce(context: Context, demand: Demand, level: number, steps: Steps): void {
   const { subCase } = runOf(context, demand.case);
-  const { length, perLength } = context.units;
-  const loads: Value[] = [];
+  const { length } = context.units;
+  const loads = windLoads(context, subCase.loadCase, demand.member, steps);
   const widths: Value[] = [];
-  (subCase.facade?.[level] ?? []).forEach(({ from, to, w }, i) => {
-    loads.push(
-      readOff(
-        context,
-        `w_${i + 1}`,
-        path,
-        w[0] ?? 0,
-        perLength,
-        'windward and leeward pressure over the height of façade that goes to the level',
-      ),
-    );
+  (subCase.facade?.[level] ?? []).forEach(({ from, to }, i) => {
     widths.push(readOff(context, `b_${i + 1}`, 'levels', to - from, length, 'width of the stretch, from the outlines'));
   });
   const sum = loads.map(({ symbol }, i) => `${symbol}·${widths[i]?.symbol ?? ''}`).join(' + ');
