@@ -2492,11 +2492,30 @@ export interface operations {
                                 /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                                 id: string;
                                 name?: string;
-                                /** @description [force/length] */
+                                /**
+                                 * @description Blocked panels with nominal unit shears after SDPWS-2015 Table 4.2A (values from memory, not checked against the document); stated values go before; default none
+                                 * @enum {string}
+                                 */
+                                published?: "blocked-15-32-8d-6in-2x" | "blocked-15-32-8d-4in-2x" | "blocked-15-32-8d-2.5in-2x" | "blocked-15-32-8d-2in-2x" | "blocked-15-32-8d-6in-3x" | "blocked-15-32-8d-4in-3x" | "blocked-15-32-8d-2.5in-3x" | "blocked-15-32-8d-2in-3x" | "blocked-15-32-10d-6in-2x" | "blocked-15-32-10d-4in-2x" | "blocked-15-32-10d-2.5in-2x" | "blocked-15-32-10d-2in-2x" | "blocked-15-32-10d-6in-3x" | "blocked-15-32-10d-4in-3x" | "blocked-15-32-10d-2.5in-3x" | "blocked-15-32-10d-2in-3x";
+                                /** @description [force/length]; default that of the published assembly */
                                 nominalUnitShear?: {
+                                    /** @description v_s [force/length] */
                                     seismic?: number;
+                                    /** @description v_w [force/length] */
                                     wind?: number;
                                 };
+                                /**
+                                 * @description Edition of SDPWS whose reduction of nominal unit shears applies; default 2015
+                                 * @enum {string}
+                                 */
+                                edition?: "2015" | "2021";
+                                /**
+                                 * @description Reduction where the combinations are a list of the file’s own, or none; a published set brings its own; default allowable
+                                 * @enum {string}
+                                 */
+                                format?: "allowable" | "strength";
+                                /** @description Of the framing; below 0.50 the nominal unit shear is multiplied by 1 − (0.5 − G); default 0.50 */
+                                specificGravity?: number;
                                 /** @description Gₐ [force/length] */
                                 apparentShearStiffness?: number;
                                 /** @description E·A of the chords along outline and openings of a semi-rigid diaphragm [force]; default none */
@@ -2508,21 +2527,63 @@ export interface operations {
                                 /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                                 id: string;
                                 name?: string;
-                                /** @description [force/length] */
+                                /**
+                                 * @description Blocked panels on one side, by grade, thickness [in], nail, edge spacing and panel, with nominal unit shears and Gₐ of SDPWS-2015 Table 4.3A; stated values go before; default none
+                                 * @enum {string}
+                                 */
+                                published?: "structural-1-5-16-6d-6in-osb" | "structural-1-5-16-6d-6in-plywood" | "structural-1-5-16-6d-4in-osb" | "structural-1-5-16-6d-4in-plywood" | "structural-1-5-16-6d-3in-osb" | "structural-1-5-16-6d-3in-plywood" | "structural-1-5-16-6d-2in-osb" | "structural-1-5-16-6d-2in-plywood" | "structural-1-3-8-8d-6in-osb" | "structural-1-3-8-8d-6in-plywood" | "structural-1-3-8-8d-4in-osb" | "structural-1-3-8-8d-4in-plywood" | "structural-1-3-8-8d-3in-osb" | "structural-1-3-8-8d-3in-plywood" | "structural-1-3-8-8d-2in-osb" | "structural-1-3-8-8d-2in-plywood" | "structural-1-7-16-8d-6in-osb" | "structural-1-7-16-8d-6in-plywood" | "structural-1-7-16-8d-4in-osb" | "structural-1-7-16-8d-4in-plywood" | "structural-1-7-16-8d-3in-osb" | "structural-1-7-16-8d-3in-plywood" | "structural-1-7-16-8d-2in-osb" | "structural-1-7-16-8d-2in-plywood" | "structural-1-15-32-8d-6in-osb" | "structural-1-15-32-8d-6in-plywood" | "structural-1-15-32-8d-4in-osb" | "structural-1-15-32-8d-4in-plywood" | "structural-1-15-32-8d-3in-osb" | "structural-1-15-32-8d-3in-plywood" | "structural-1-15-32-8d-2in-osb" | "structural-1-15-32-8d-2in-plywood" | "structural-1-15-32-10d-6in-osb" | "structural-1-15-32-10d-6in-plywood" | "structural-1-15-32-10d-4in-osb" | "structural-1-15-32-10d-4in-plywood" | "structural-1-15-32-10d-3in-osb" | "structural-1-15-32-10d-3in-plywood" | "structural-1-15-32-10d-2in-osb" | "structural-1-15-32-10d-2in-plywood" | "sheathing-5-16-6d-6in-osb" | "sheathing-5-16-6d-6in-plywood" | "sheathing-5-16-6d-4in-osb" | "sheathing-5-16-6d-4in-plywood" | "sheathing-5-16-6d-3in-osb" | "sheathing-5-16-6d-3in-plywood" | "sheathing-5-16-6d-2in-osb" | "sheathing-5-16-6d-2in-plywood" | "sheathing-3-8-6d-6in-osb" | "sheathing-3-8-6d-6in-plywood" | "sheathing-3-8-6d-4in-osb" | "sheathing-3-8-6d-4in-plywood" | "sheathing-3-8-6d-3in-osb" | "sheathing-3-8-6d-3in-plywood" | "sheathing-3-8-6d-2in-osb" | "sheathing-3-8-6d-2in-plywood" | "sheathing-3-8-8d-6in-osb" | "sheathing-3-8-8d-6in-plywood" | "sheathing-3-8-8d-4in-osb" | "sheathing-3-8-8d-4in-plywood" | "sheathing-3-8-8d-3in-osb" | "sheathing-3-8-8d-3in-plywood" | "sheathing-3-8-8d-2in-osb" | "sheathing-3-8-8d-2in-plywood" | "sheathing-7-16-8d-6in-osb" | "sheathing-7-16-8d-6in-plywood" | "sheathing-7-16-8d-4in-osb" | "sheathing-7-16-8d-4in-plywood" | "sheathing-7-16-8d-3in-osb" | "sheathing-7-16-8d-3in-plywood" | "sheathing-7-16-8d-2in-osb" | "sheathing-7-16-8d-2in-plywood" | "sheathing-15-32-8d-6in-osb" | "sheathing-15-32-8d-6in-plywood" | "sheathing-15-32-8d-4in-osb" | "sheathing-15-32-8d-4in-plywood" | "sheathing-15-32-8d-3in-osb" | "sheathing-15-32-8d-3in-plywood" | "sheathing-15-32-8d-2in-osb" | "sheathing-15-32-8d-2in-plywood" | "sheathing-15-32-10d-6in-osb" | "sheathing-15-32-10d-6in-plywood" | "sheathing-15-32-10d-4in-osb" | "sheathing-15-32-10d-4in-plywood" | "sheathing-15-32-10d-3in-osb" | "sheathing-15-32-10d-3in-plywood" | "sheathing-15-32-10d-2in-osb" | "sheathing-15-32-10d-2in-plywood" | "sheathing-19-32-10d-6in-osb" | "sheathing-19-32-10d-6in-plywood" | "sheathing-19-32-10d-4in-osb" | "sheathing-19-32-10d-4in-plywood" | "sheathing-19-32-10d-3in-osb" | "sheathing-19-32-10d-3in-plywood" | "sheathing-19-32-10d-2in-osb" | "sheathing-19-32-10d-2in-plywood";
+                                /** @description [force/length]; default that of the published assembly */
                                 nominalUnitShear?: {
+                                    /** @description v_s [force/length] */
                                     seismic?: number;
+                                    /** @description v_w [force/length] */
                                     wind?: number;
                                 };
-                                /** @description Gₐ [force/length] */
+                                /**
+                                 * @description Edition of SDPWS whose reduction of nominal unit shears applies; default 2015
+                                 * @enum {string}
+                                 */
+                                edition?: "2015" | "2021";
+                                /**
+                                 * @description Reduction where the combinations are a list of the file’s own, or none; a published set brings its own; default allowable
+                                 * @enum {string}
+                                 */
+                                format?: "allowable" | "strength";
+                                /** @description Of the framing; below 0.50 the nominal unit shear is multiplied by 1 − (0.5 − G); default 0.50 */
+                                specificGravity?: number;
+                                /** @description Gₐ [force/length]; default that of the published assembly */
                                 apparentShearStiffness?: number;
+                                /** @description E·A of one end post [force], for the bending term of the deflection; default none: end posts do not change their length */
+                                endPostStiffness?: number;
+                                /** @description Deflects by the four-term equation with the slip of its nails; default the three-term equation with Gₐ */
+                                fourTerm?: {
+                                    /** @description G_v·t_v through the thickness of the panel [force/length] */
+                                    panelRigidity: number;
+                                    /** @enum {string} */
+                                    nail: "6d" | "8d" | "10d";
+                                    /** @description Spacing of the nails at panel edges [length] */
+                                    edgeSpacing: number;
+                                    /**
+                                     * @description Grade of the panel; default sheathing
+                                     * @enum {string}
+                                     */
+                                    grade?: "structural-1" | "sheathing";
+                                };
+                                /**
+                                 * @description For the limit of height over length and the factor of slender piers; other: neither; default panels-blocked
+                                 * @enum {string}
+                                 */
+                                sheathing?: "panels-blocked" | "panels-unblocked" | "plaster" | "gypsum" | "other";
                             }[];
                             holdDowns?: {
                                 /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                                 id: string;
                                 name?: string;
-                                /** @description [force] */
+                                /** @description Against allowable combinations [force] */
                                 allowableTension?: number;
-                                /** @description [length] */
+                                /** @description Against strength combinations [force] */
+                                strengthTension?: number;
+                                /** @description Vertical elongation of the hold-down system at the allowable tension, for the rotation term of the deflection [length]; default none: it does not give */
                                 deflectionAtAllowable?: number;
                             }[];
                         };
@@ -3305,11 +3366,30 @@ export interface operations {
                             /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                             id: string;
                             name?: string;
-                            /** @description [force/length] */
+                            /**
+                             * @description Blocked panels with nominal unit shears after SDPWS-2015 Table 4.2A (values from memory, not checked against the document); stated values go before; default none
+                             * @enum {string}
+                             */
+                            published?: "blocked-15-32-8d-6in-2x" | "blocked-15-32-8d-4in-2x" | "blocked-15-32-8d-2.5in-2x" | "blocked-15-32-8d-2in-2x" | "blocked-15-32-8d-6in-3x" | "blocked-15-32-8d-4in-3x" | "blocked-15-32-8d-2.5in-3x" | "blocked-15-32-8d-2in-3x" | "blocked-15-32-10d-6in-2x" | "blocked-15-32-10d-4in-2x" | "blocked-15-32-10d-2.5in-2x" | "blocked-15-32-10d-2in-2x" | "blocked-15-32-10d-6in-3x" | "blocked-15-32-10d-4in-3x" | "blocked-15-32-10d-2.5in-3x" | "blocked-15-32-10d-2in-3x";
+                            /** @description [force/length]; default that of the published assembly */
                             nominalUnitShear?: {
+                                /** @description v_s [force/length] */
                                 seismic?: number;
+                                /** @description v_w [force/length] */
                                 wind?: number;
                             };
+                            /**
+                             * @description Edition of SDPWS whose reduction of nominal unit shears applies; default 2015
+                             * @enum {string}
+                             */
+                            edition?: "2015" | "2021";
+                            /**
+                             * @description Reduction where the combinations are a list of the file’s own, or none; a published set brings its own; default allowable
+                             * @enum {string}
+                             */
+                            format?: "allowable" | "strength";
+                            /** @description Of the framing; below 0.50 the nominal unit shear is multiplied by 1 − (0.5 − G); default 0.50 */
+                            specificGravity?: number;
                             /** @description Gₐ [force/length] */
                             apparentShearStiffness?: number;
                             /** @description E·A of the chords along outline and openings of a semi-rigid diaphragm [force]; default none */
@@ -3321,21 +3401,63 @@ export interface operations {
                             /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                             id: string;
                             name?: string;
-                            /** @description [force/length] */
+                            /**
+                             * @description Blocked panels on one side, by grade, thickness [in], nail, edge spacing and panel, with nominal unit shears and Gₐ of SDPWS-2015 Table 4.3A; stated values go before; default none
+                             * @enum {string}
+                             */
+                            published?: "structural-1-5-16-6d-6in-osb" | "structural-1-5-16-6d-6in-plywood" | "structural-1-5-16-6d-4in-osb" | "structural-1-5-16-6d-4in-plywood" | "structural-1-5-16-6d-3in-osb" | "structural-1-5-16-6d-3in-plywood" | "structural-1-5-16-6d-2in-osb" | "structural-1-5-16-6d-2in-plywood" | "structural-1-3-8-8d-6in-osb" | "structural-1-3-8-8d-6in-plywood" | "structural-1-3-8-8d-4in-osb" | "structural-1-3-8-8d-4in-plywood" | "structural-1-3-8-8d-3in-osb" | "structural-1-3-8-8d-3in-plywood" | "structural-1-3-8-8d-2in-osb" | "structural-1-3-8-8d-2in-plywood" | "structural-1-7-16-8d-6in-osb" | "structural-1-7-16-8d-6in-plywood" | "structural-1-7-16-8d-4in-osb" | "structural-1-7-16-8d-4in-plywood" | "structural-1-7-16-8d-3in-osb" | "structural-1-7-16-8d-3in-plywood" | "structural-1-7-16-8d-2in-osb" | "structural-1-7-16-8d-2in-plywood" | "structural-1-15-32-8d-6in-osb" | "structural-1-15-32-8d-6in-plywood" | "structural-1-15-32-8d-4in-osb" | "structural-1-15-32-8d-4in-plywood" | "structural-1-15-32-8d-3in-osb" | "structural-1-15-32-8d-3in-plywood" | "structural-1-15-32-8d-2in-osb" | "structural-1-15-32-8d-2in-plywood" | "structural-1-15-32-10d-6in-osb" | "structural-1-15-32-10d-6in-plywood" | "structural-1-15-32-10d-4in-osb" | "structural-1-15-32-10d-4in-plywood" | "structural-1-15-32-10d-3in-osb" | "structural-1-15-32-10d-3in-plywood" | "structural-1-15-32-10d-2in-osb" | "structural-1-15-32-10d-2in-plywood" | "sheathing-5-16-6d-6in-osb" | "sheathing-5-16-6d-6in-plywood" | "sheathing-5-16-6d-4in-osb" | "sheathing-5-16-6d-4in-plywood" | "sheathing-5-16-6d-3in-osb" | "sheathing-5-16-6d-3in-plywood" | "sheathing-5-16-6d-2in-osb" | "sheathing-5-16-6d-2in-plywood" | "sheathing-3-8-6d-6in-osb" | "sheathing-3-8-6d-6in-plywood" | "sheathing-3-8-6d-4in-osb" | "sheathing-3-8-6d-4in-plywood" | "sheathing-3-8-6d-3in-osb" | "sheathing-3-8-6d-3in-plywood" | "sheathing-3-8-6d-2in-osb" | "sheathing-3-8-6d-2in-plywood" | "sheathing-3-8-8d-6in-osb" | "sheathing-3-8-8d-6in-plywood" | "sheathing-3-8-8d-4in-osb" | "sheathing-3-8-8d-4in-plywood" | "sheathing-3-8-8d-3in-osb" | "sheathing-3-8-8d-3in-plywood" | "sheathing-3-8-8d-2in-osb" | "sheathing-3-8-8d-2in-plywood" | "sheathing-7-16-8d-6in-osb" | "sheathing-7-16-8d-6in-plywood" | "sheathing-7-16-8d-4in-osb" | "sheathing-7-16-8d-4in-plywood" | "sheathing-7-16-8d-3in-osb" | "sheathing-7-16-8d-3in-plywood" | "sheathing-7-16-8d-2in-osb" | "sheathing-7-16-8d-2in-plywood" | "sheathing-15-32-8d-6in-osb" | "sheathing-15-32-8d-6in-plywood" | "sheathing-15-32-8d-4in-osb" | "sheathing-15-32-8d-4in-plywood" | "sheathing-15-32-8d-3in-osb" | "sheathing-15-32-8d-3in-plywood" | "sheathing-15-32-8d-2in-osb" | "sheathing-15-32-8d-2in-plywood" | "sheathing-15-32-10d-6in-osb" | "sheathing-15-32-10d-6in-plywood" | "sheathing-15-32-10d-4in-osb" | "sheathing-15-32-10d-4in-plywood" | "sheathing-15-32-10d-3in-osb" | "sheathing-15-32-10d-3in-plywood" | "sheathing-15-32-10d-2in-osb" | "sheathing-15-32-10d-2in-plywood" | "sheathing-19-32-10d-6in-osb" | "sheathing-19-32-10d-6in-plywood" | "sheathing-19-32-10d-4in-osb" | "sheathing-19-32-10d-4in-plywood" | "sheathing-19-32-10d-3in-osb" | "sheathing-19-32-10d-3in-plywood" | "sheathing-19-32-10d-2in-osb" | "sheathing-19-32-10d-2in-plywood";
+                            /** @description [force/length]; default that of the published assembly */
                             nominalUnitShear?: {
+                                /** @description v_s [force/length] */
                                 seismic?: number;
+                                /** @description v_w [force/length] */
                                 wind?: number;
                             };
-                            /** @description Gₐ [force/length] */
+                            /**
+                             * @description Edition of SDPWS whose reduction of nominal unit shears applies; default 2015
+                             * @enum {string}
+                             */
+                            edition?: "2015" | "2021";
+                            /**
+                             * @description Reduction where the combinations are a list of the file’s own, or none; a published set brings its own; default allowable
+                             * @enum {string}
+                             */
+                            format?: "allowable" | "strength";
+                            /** @description Of the framing; below 0.50 the nominal unit shear is multiplied by 1 − (0.5 − G); default 0.50 */
+                            specificGravity?: number;
+                            /** @description Gₐ [force/length]; default that of the published assembly */
                             apparentShearStiffness?: number;
+                            /** @description E·A of one end post [force], for the bending term of the deflection; default none: end posts do not change their length */
+                            endPostStiffness?: number;
+                            /** @description Deflects by the four-term equation with the slip of its nails; default the three-term equation with Gₐ */
+                            fourTerm?: {
+                                /** @description G_v·t_v through the thickness of the panel [force/length] */
+                                panelRigidity: number;
+                                /** @enum {string} */
+                                nail: "6d" | "8d" | "10d";
+                                /** @description Spacing of the nails at panel edges [length] */
+                                edgeSpacing: number;
+                                /**
+                                 * @description Grade of the panel; default sheathing
+                                 * @enum {string}
+                                 */
+                                grade?: "structural-1" | "sheathing";
+                            };
+                            /**
+                             * @description For the limit of height over length and the factor of slender piers; other: neither; default panels-blocked
+                             * @enum {string}
+                             */
+                            sheathing?: "panels-blocked" | "panels-unblocked" | "plaster" | "gypsum" | "other";
                         }[];
                         holdDowns?: {
                             /** @description Identity for life: goes from revision to revision with its member; unique in its collection. */
                             id: string;
                             name?: string;
-                            /** @description [force] */
+                            /** @description Against allowable combinations [force] */
                             allowableTension?: number;
-                            /** @description [length] */
+                            /** @description Against strength combinations [force] */
+                            strengthTension?: number;
+                            /** @description Vertical elongation of the hold-down system at the allowable tension, for the rotation term of the deflection [length]; default none: it does not give */
                             deflectionAtAllowable?: number;
                         }[];
                     };
@@ -4427,7 +4549,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4713,7 +4835,7 @@ export interface operations {
             query?: {
                 member?: string;
                 kind?: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
-                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity?: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                 level?: string;
                 case?: string;
                 sense?: "1" | "-1";
@@ -4745,7 +4867,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -4984,7 +5106,7 @@ export interface operations {
         parameters: {
             query: {
                 member: string;
-                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                 /** @description Default the case with the largest value */
                 case?: string;
                 /** @description Default 1 */
@@ -5028,7 +5150,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                             /** @description Load case or sub-case (`EX`, `EX/+e`); `gravity` with gravity alone; D, L, Lr, S for components */
                             case: string;
                             /** @description 1 along the case’s direction, -1 against it */
@@ -5428,7 +5550,7 @@ export interface operations {
                             /** @enum {string} */
                             kind: "level" | "diaphragm-span" | "opening" | "transfer-diaphragm" | "strut" | "collector" | "wall-line" | "pier" | "support";
                             /** @enum {string} */
-                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                            quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                             case: string;
                             sense: 1 | -1;
                             combination?: string;
@@ -5558,7 +5680,7 @@ export interface operations {
         parameters: {
             query: {
                 member: string;
-                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                 case: string;
                 sense: "1" | "-1";
                 combination?: string;
@@ -5580,7 +5702,7 @@ export interface operations {
                     "application/json": {
                         member: string;
                         /** @enum {string} */
-                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "uplift" | "bearing";
+                        quantity: "force" | "diaphragm-force" | "storey-shear" | "overturning-moment" | "drift" | "centre-of-mass-x" | "centre-of-mass-y" | "centre-of-rigidity-x" | "centre-of-rigidity-y" | "torsion" | "torsional-ratio" | "torsional-amplification" | "shear" | "unit-shear" | "net-unit-shear" | "moment" | "chord-force" | "secondary-moment" | "corner-force" | "axial-tension" | "axial-compression" | "design-tension" | "design-compression" | "connection-force" | "reaction" | "end-tension" | "end-compression" | "deflection" | "deflection-ratio" | "ratio" | "hold-down-ratio" | "uplift" | "bearing";
                         case: string;
                         /** @enum {string} */
                         sense: "1" | "-1";
