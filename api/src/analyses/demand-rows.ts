@@ -11,7 +11,7 @@ type DemandColumns = Omit<DemandRow, 'revisionId' | 'projectId' | 'position' | '
 /** All demands of a revision, in the order in which the analysis gave them: tens of thousands, so without a detour. */
 export async function readDemands(pool: pg.Pool, revisionId: string): Promise<Demand[]> {
   const { rows } = await pool.query<DemandColumns>(
-    `SELECT "member", "kind", "quantity", "case", "sense", "combination", "value", "unit", "at_x" AS "atX", "at_y" AS "atY"
+    `SELECT "member", "kind", "quantity", "case", "sense", "combination", "value", "unit", "at_x" AS "atX", "at_y" AS "atY", "governs"
      FROM "demand" WHERE "revision_id" = $1 ORDER BY "position"`,
     [revisionId],
   );
@@ -29,6 +29,7 @@ export function demandOf(row: DemandColumns): Demand {
     unit: row.unit,
     ...(row.combination === null ? {} : { combination: row.combination }),
     ...(row.atX === null || row.atY === null ? {} : { at: [row.atX, row.atY] }),
+    ...(row.governs === null ? {} : { governs: row.governs }),
   };
   return demand as Demand;
 }

@@ -26,14 +26,15 @@ export async function storeAnalysis(
     unit: demand.unit,
     x: demand.at?.[0] ?? null,
     y: demand.at?.[1] ?? null,
+    governs: demand.governs ?? null,
   }));
   await transaction.$executeRaw`
     INSERT INTO "demand" ("revision_id", "project_id", "position", "member", "level", "kind", "quantity", "case", "sense",
-                          "combination", "value", "unit", "at_x", "at_y")
+                          "combination", "value", "unit", "at_x", "at_y", "governs")
     SELECT ${revisionId}::uuid, ${projectId}::uuid, r."position", r."member", r."level", r."kind", r."quantity", r."case", r."sense",
-           r."combination", r."value", r."unit", r."x", r."y"
+           r."combination", r."value", r."unit", r."x", r."y", r."governs"
     FROM json_to_recordset(${JSON.stringify(rows)}::json) AS r("position" int, "member" text, "level" text, "kind" text,
-      "quantity" text, "case" text, "sense" smallint, "combination" text, "value" float8, "unit" text, "x" float8, "y" float8)`;
+      "quantity" text, "case" text, "sense" smallint, "combination" text, "value" float8, "unit" text, "x" float8, "y" float8, "governs" text)`;
   const { demands: _rows, ...document } = analysis;
   const text = JSON.stringify(document);
   await transaction.$executeRaw`
