@@ -39,7 +39,8 @@ export function openingPlans(
   lines: readonly number[],
   stated: number | undefined,
 ): OpeningPlan[] {
-  if (openings.length === 0) return [];
+  // An opening narrower than the tolerance of places leaves no mark in the profile.
+  if (openings.length === 0 || profile.slabs.length < 2) return [];
   const { slabs, tolerance, frame } = profile;
   const jumps = slabs.map((slab, i) => {
     const next = slabs[i + 1];
@@ -57,7 +58,7 @@ export function openingPlans(
       const edge = ahead < 0 ? from : to;
       const strips = ahead < 0 ? cut.left : cut.right;
       const beside = stripsBeside(strips, Math.min(...t), Math.max(...t), tolerance);
-      const at = slabs.findIndex((slab) => Math.abs(slab.to - edge) <= tolerance);
+      const at = nearestEnd(slabs, edge);
       const beyond = slabs[ahead < 0 ? at : at + 1] as Slab;
       const side = (slabs[at] as Slab).to;
       const edges = facing(beyond, ahead);
@@ -137,4 +138,13 @@ function stripsBeside(strips: readonly Interval[], low: number, high: number, to
       a >= low + tolerance && previous !== undefined && previous[1] < high - tolerance && a <= high + tolerance;
     return below || above;
   });
+}
+
+/** The slab that ends nearest to a place, with another one behind it: breaks closer than the tolerance are one. */
+function nearestEnd(slabs: readonly Slab[], s: number): number {
+  let best = 0;
+  for (let i = 1; i < slabs.length - 1; i++) {
+    if (Math.abs((slabs[i] as Slab).to - s) < Math.abs((slabs[best] as Slab).to - s)) best = i;
+  }
+  return best;
 }
